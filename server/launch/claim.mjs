@@ -1,0 +1,79 @@
+import { chmodSync, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import path from 'node:path';
+import { explainSystemError, LaunchError, notAllowed } from './messages.mjs';
+import { findNpm } from './npm-parent.mjs';
+import { plaitDir, shown } from './paths.mjs';
+import { endProcess, findByEnvironment, identify, isSameAlive } from './processes.mjs';
+
+/** Marks every process that belongs to a launch, so that the next one finds what a kill -9 left behind. */
+const MARK = 'PLAIT_LAUNCH';
+const ENDING = /** @type {const} */ ([
+  { signal: 'SIGTERM', ms: 15_000 },
+  { signal: 'SIGKILL', ms: 5_000 },
+]);
+
+/** A launch whose npm was killed sees that by itself and stops its server and database in order: give it the time. */
+const HOLDER_ENDING = /** @type {const} */ ([
+  { signal: 0, ms: 40_000 },
+  { signal: 'SIGKILL', ms: 2_000 },
+]);
+
+/** @param {string} stateDir @returns {Record<string, string>} */
+export function markOf(stateDir) {
+  return { [MARK]: stateDir };
+}
+
+/** Makes the state folder; others may pass through it, to the database, and read nothing. @param {string} stateDir */
+function makeStateDir(stateDir) {
+  try {
+    for (const folder of [plaitDir, stateDir]) {
+      if (!existsSync(folder)) mkdirSync(folder);
+      chmodSync(folder, 0o711);
+    }
+  } catch (error) {
+    throw new LaunchError(explainSystemError(error) ?? notAllowed(shown(stateDir)));
+  }
+}
+
+/**
+ * @typedef {import('./processes.mjs').Identity} Identity
+ * @typedef {Identity & { url: string, npm?: Identity }} Holder the launch that has the folder, and the npm above it
+ */
+
+/** @param {string} file @returns {Holder | undefined} */
+function readHolder(file) {
+  try {
+    return JSON.parse(readFileSync(file, 'utf8'));
+  } catch {
+    return undefined;
+  }
+}
+
+/**
+ * Makes this process the only launch of a state folder, and ends what an earlier, killed one left running (but not its
+ * database, which own-cluster.mjs ends in its own way).
+ * @param {string} stateDir @param {string} url shown to a second launch
+ * @returns {Promise<{ release: () => void, ended: number }>} @throws LaunchError when another launch is running
+ */
+export async function claimState(stateDir, url) {
+  makeStateDir(stateDir);
+  const file = path.join(stateDir, 'running.json');
+  const holder = readHolder(file);
+  const isLeftOver = holder?.npm !== undefined && !isSameAlive(holder.npm);
+  if (isLeftOver) await endProcess(holder.pid, [...HOLDER_ENDING]);
+  if (holder && isSameAlive(holder)) {
+    throw new LaunchError(
+      `Plait is already running from this folder, at ${holder.url} (process ${holder.pid}): use that one, or stop it with Ctrl-C in its terminal first.`,
+    );
+  }
+  rmSync(file, { force: true });
+  try {
+    writeFileSync(file, JSON.stringify({ ...identify(process.pid), url, npm: findNpm() }), { flag: 'wx' });
+  } catch (error) {
+    if (/** @type {NodeJS.ErrnoException} */ (error).code !== 'EEXIST') throw error;
+    throw new LaunchError('Plait is being started from this folder by another command just now: use that one.');
+  }
+  const orphans = findByEnvironment(MARK, stateDir);
+  await Promise.all(orphans.map((pid) => endProcess(pid, [...ENDING])));
+  return { release: () => rmSync(file, { force: true }), ended: orphans.length };
+}

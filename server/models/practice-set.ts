@@ -1,0 +1,28 @@
+import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize';
+import type { SetKind } from '#shared/schemas/practice.ts';
+import { reference, required, tenantColumns, tenantOptions } from './tenant.ts';
+
+/** A session's questions for one student. */
+export class PracticeSet extends Model<InferAttributes<PracticeSet>, InferCreationAttributes<PracticeSet>> {
+  declare id: CreationOptional<string>;
+  declare schoolId: CreationOptional<string>;
+  declare userId: string;
+  declare kind: SetKind;
+  declare setOn: string;
+  declare budgetSeconds: number;
+  declare openedAt: Date;
+  declare finishedAt: CreationOptional<Date | null>;
+}
+
+PracticeSet.init(
+  {
+    ...tenantColumns,
+    userId: reference(),
+    kind: required(DataTypes.TEXT),
+    setOn: required(DataTypes.DATEONLY),
+    budgetSeconds: required(DataTypes.INTEGER),
+    openedAt: required(DataTypes.DATE),
+    finishedAt: { type: DataTypes.DATE, allowNull: true },
+  },
+  tenantOptions('PracticeSet', 'sets'),
+);

@@ -1,0 +1,15 @@
+import { type Actor, leads, worksIn } from './actor.ts';
+import type { Policy } from './authorize.ts';
+
+export interface ClassFacts {
+  classId: string;
+  subjectId: string;
+}
+
+const teachesIt = (actor: Actor, { classId }: ClassFacts) => actor.classIds.includes(classId);
+
+/** A teaching group: its own teachers, and the head of its department. */
+export const classPolicy = {
+  read: (actor: Actor, facts: ClassFacts) => worksIn(actor, facts.subjectId),
+  setTaught: (actor: Actor, facts: ClassFacts) => teachesIt(actor, facts) || leads(actor, facts.subjectId),
+} satisfies Policy<'read' | 'setTaught', ClassFacts>;

@@ -1,0 +1,93 @@
+import type { SubjectFact, TopicFact } from '#server/services/practice/study-facts.ts';
+import { nextWords } from '#shared/domain/schedule/next-words.ts';
+import { reasonWords } from '#shared/domain/schedule/reason.ts';
+import type { HowSure } from '#shared/schemas/how-sure.ts';
+import type { MarkedPart } from '#shared/schemas/marked-part.ts';
+import type { AnswerResultDto, AskedQuestionDto, SetItemDto } from '#shared/schemas/practice.ts';
+import { bodyMarks, partMarks, type QuestionBody, type QuestionKind } from '#shared/schemas/question-body.ts';
+import type { Reason } from '#shared/schemas/reason.ts';
+
+/** A question without its scheme, topic or anything an answer could be read from. */
+export const presentAsked = (number: number, kind: QuestionKind, body: QuestionBody): AskedQuestionDto => ({
+  number,
+  kind,
+  stem: body.stem,
+  maxMarks: bodyMarks(body),
+  parts: body.parts.map((part) => ({
+    prompt: part.prompt,
+    lines: part.lines,
+    marks: partMarks(part),
+    answerLabel: part.answerLabel ?? null,
+    unit: part.answer.kind === 'number' && !part.answer.isUnitRequired ? (part.answer.unit ?? null) : null,
+    answerKind: part.answer.kind,
+  })),
+});
+
+export const presentSubject = ({ id, code, name, strand }: SubjectFact): SetItemDto['subject'] => ({
+  id,
+  code,
+  name,
+  strand,
+});
+
+export const presentTopic = ({ id, number, title }: TopicFact): AnswerResultDto['topic'] => ({ id, number, title });
+
+/** How one part of an answer stands: decided, or waiting for the student's own ticks. */
+export interface PartStanding extends Pick<MarkedPart, 'words'> {
+  markedBy: 'plait' | 'student';
+  earned: (boolean | null)[];
+}
+
+export interface ResultFacts {
+  answerId: string;
+  setItemId: string;
+  already: boolean;
+  howSure: HowSure;
+  responses: string[];
+  body: QuestionBody;
+  topic: TopicFact;
+  reason: Reason;
+  reasonPaper: string | null;
+  parts: PartStanding[];
+  /** Null until every part is marked. */
+  marks: number | null;
+  returnsOn: string | null;
+  paper: { title: string; on: string } | null;
+}
+
+/** An answer with its marks and scheme, as its student sees it. */
+export function presentResult(facts: ResultFacts): AnswerResultDto {
+  const { body, marks, topic, howSure, returnsOn, paper } = facts;
+  const maxMarks = bodyMarks(body);
+  return {
+    answerId: facts.answerId,
+    setItemId: facts.setItemId,
+    already: facts.already,
+    state: marks === null ? 'selfMark' : 'marked',
+    howSure,
+    responses: facts.responses,
+    marks,
+    maxMarks,
+    topic: presentTopic(topic),
+    parts: body.parts.map((part, index) => {
+      const standing = facts.parts[index];
+      return {
+        markedBy: standing?.markedBy ?? 'student',
+        words: standing?.words ?? '',
+        modelAnswer: part.modelAnswer,
+        points: part.points.map((point, at) => ({
+          code: point.code ?? null,
+          text: point.text,
+          marks: point.marks,
+          allow: point.allow ?? [],
+          ignore: point.ignore ?? [],
+          reject: point.reject ?? [],
+          isEarned: standing?.earned[at] ?? null,
+        })),
+      };
+    }),
+    guidance: body.guidance ?? null,
+    why: reasonWords(facts.reason, { topic: topic.title, paper: facts.reasonPaper }),
+    next: marks === null ? null : { words: nextWords({ marks, maxMarks, howSure, returnsOn, paper }), returnsOn },
+  };
+}

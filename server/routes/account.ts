@@ -1,0 +1,128 @@
+import type { Request } from 'express';
+import type { PassportStatic } from 'passport';
+import type { Pool } from 'pg';
+import { withSchool } from '#server/db/scope.ts';
+import { notFound, notSignedIn, Problem } from '#server/errors.ts';
+import type { SignInLimits } from '#server/http/rate-limits.ts';
+import { openRoute, type Route, route, sessionRoute } from '#server/http/registry.ts';
+import {
+  ADMIN_DEVICE,
+  endOtherSessions,
+  endSession,
+  type Lifetime,
+  OWN_DEVICE,
+  type SessionUser,
+  SHARED_DEVICE,
+  startSession,
+} from '#server/http/session.ts';
+import { changePassword } from '#server/services/people/change-password.ts';
+import { loadScope } from '#server/services/people/load-scope.ts';
+import { showMe } from '#server/services/people/show-me.ts';
+import { rolesOf } from '#server/services/people/sign-in.ts';
+import { type DemoPeople, showSignInPage } from '#server/services/people/sign-in-page.ts';
+import {
+  changePasswordSchema,
+  demoSignInSchema,
+  type SignIn,
+  schoolParamsSchema,
+  signInSchema,
+} from '#shared/schemas/auth.ts';
+
+/** What signing in needs from the running app. */
+export interface AccountDeps {
+  passport: PassportStatic;
+  limits: SignInLimits;
+  pool: Pool;
+  cookie: string;
+  clock: () => number;
+  /** Present only where the demo school was seeded by the start command. */
+  demo?: DemoPeople;
+}
+
+async function lifetimeFor(user: SessionUser, isOwnDevice: boolean): Promise<Lifetime> {
+  const roles = await rolesOf(user.schoolId, user.userId);
+  if (roles.includes('schoolAdmin')) return ADMIN_DEVICE;
+  const isStaff = roles.some((role) => role !== 'student' && role !== 'carer');
+  return isOwnDevice && !isStaff ? OWN_DEVICE : SHARED_DEVICE;
+}
+
+const authenticate = (passport: PassportStatic, request: Request): Promise<SessionUser | null> =>
+  new Promise((done, fail) => {
+    const verified = (error: unknown, user: SessionUser | false) => (error ? fail(error) : done(user || null));
+    passport.authenticate('local', verified)(request, request.res, fail);
+  });
+
+/** Signing in and out, and one's own account. */
+export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: AccountDeps): Route[] {
+  const open = async (request: Request, user: SessionUser, isOwnDevice: boolean) => {
+    await startSession(request, user, await lifetimeFor(user, isOwnDevice), clock());
+    return withSchool(user.schoolId, async (school) => {
+      const scope = await loadScope(school, user.userId);
+      if (!scope) throw notSignedIn();
+      return showMe(scope);
+    });
+  };
+  const signIn = async (body: SignIn, request: Request) => {
+    const account = `${body.schoolCode}/${body.name.toLowerCase()}`;
+    const address = request.ip ?? '';
+    await limits.check(account, address);
+    // The strategy reads the request's body: give it the parsed one.
+    request.body = body;
+    const user = await authenticate(passport, request);
+    if (!user) {
+      await limits.failed(account, address);
+      throw new Problem(
+        401,
+        'sign-in-failed',
+        'That name and password do not match. Your school can give you a new password.',
+      );
+    }
+    await limits.succeeded(account, address);
+    return open(request, user, body.isOwnDevice);
+  };
+  return [
+    openRoute({
+      method: 'get',
+      path: '/schools/:code',
+      access: 'anyone',
+      params: schoolParamsSchema,
+      run: ({ params }) => showSignInPage(params.code, demo),
+    }),
+    openRoute({
+      method: 'post',
+      path: '/sign-in',
+      access: 'anyone',
+      body: signInSchema,
+      run: ({ body }, request) => signIn(body, request),
+    }),
+    openRoute({
+      method: 'post',
+      path: '/demo-sign-in',
+      access: 'anyone',
+      body: demoSignInSchema,
+      run: async ({ body }, request) => {
+        if (!demo) throw notFound();
+        return open(request, await demo.find(body.schoolCode, body.username), false);
+      },
+    }),
+    openRoute({
+      method: 'post',
+      path: '/sign-out',
+      access: 'anyone',
+      run: async (_input, request, response) => endSession(request, response, cookie),
+    }),
+    route({ method: 'get', path: '/me', access: 'signedIn', run: showMe }),
+    sessionRoute({
+      method: 'post',
+      path: '/me/password',
+      access: 'session',
+      body: changePasswordSchema,
+      run: async ({ body }, request, user) => {
+        await changePassword(user, body);
+        await endOtherSessions(pool, user.userId, request.sessionID);
+      },
+    }),
+    // The session's own clock is wound on by the middleware that every request passes.
+    sessionRoute({ method: 'post', path: '/me/heartbeat', access: 'session', run: async () => undefined }),
+  ];
+}

@@ -1,0 +1,3 @@
+import type { Route } from '#server/http/registry.ts';
+
+export const curriculumRoutes: Route[] = [];

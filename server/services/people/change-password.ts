@@ -1,0 +1,49 @@
+import { select, withSchool } from '#server/db/scope.ts';
+import { notSignedIn, unprocessable } from '#server/errors.ts';
+import { User } from '#server/models/user.ts';
+import { recordAudit } from '#server/services/audit/record-audit.ts';
+import type { ChangePassword } from '#shared/schemas/auth.ts';
+import { roleWords } from '#shared/schemas/role.ts';
+import { passwordFault } from './password-rule.ts';
+import { hashPassword, verifyPassword } from './passwords.ts';
+import { rolesOf } from './sign-in.ts';
+
+interface Found {
+  name: string;
+  username: string;
+  password_hash: string | null;
+  school: string;
+  subjects: string[];
+}
+
+/**
+ * Changes one's own password, the present one given. Hashing stays outside the transaction.
+ * @throws Problem 422 at `current` or `next`
+ */
+export async function changePassword(
+  user: { userId: string; schoolId: string },
+  { current, next }: ChangePassword,
+): Promise<void> {
+  const [found] = await withSchool(user.schoolId, () =>
+    select<Found>(
+      `SELECT u.name, u.username, u.password_hash, s.name AS school, ARRAY(SELECT name FROM subjects) AS subjects
+       FROM users u, schools s WHERE u.id = $1 AND u.disabled_at IS NULL`,
+      [user.userId],
+    ),
+  );
+  if (!found) throw notSignedIn();
+  if (!(await verifyPassword(found.password_hash, current))) {
+    throw unprocessable([{ pointer: '#/current', detail: 'That is not your password.' }]);
+  }
+  const roles = await rolesOf(user.schoolId, user.userId);
+  const fault = await passwordFault(next, {
+    isStaff: roles.some((role) => role !== 'student' && role !== 'carer'),
+    words: [found.name, found.username, found.school, ...found.subjects, ...roles.map((role) => roleWords[role])],
+  });
+  if (fault) throw unprocessable([{ pointer: '#/next', detail: fault }]);
+  const passwordHash = await hashPassword(next);
+  await withSchool(user.schoolId, async () => {
+    await User.update({ passwordHash }, { where: { id: user.userId } });
+    await recordAudit(user, 'change-password', 'user', user.userId, 'done', ['password_hash']);
+  });
+}

@@ -1,0 +1,32 @@
+import { select } from '#server/db/scope.ts';
+import type { Scope } from '#server/services/people/load-scope.ts';
+import { type BuiltItem, buildSet } from '#shared/domain/schedule/build-set.ts';
+import type { SetKind } from '#shared/schemas/practice.ts';
+import type { LoadedCandidate } from './load-candidates.ts';
+
+/** Seconds of work in a set: a 25-minute session, and fifteen minutes in the morning. */
+export const BUDGET_SECONDS: Record<SetKind, number> = { mixed: 1500, morning: 900 };
+
+/** Pairs of topics that the department says are easily confused. */
+export async function loadConfusable(): Promise<[string, string][]> {
+  const rows = await select<{ topic_id: string; other_topic_id: string }>(
+    'SELECT topic_id, other_topic_id FROM confusable_topics ORDER BY topic_id, other_topic_id',
+  );
+  return rows.map((row) => [row.topic_id, row.other_topic_id]);
+}
+
+/** The set that would be opened now. The same facts give the same set. */
+export const proposeSet = (
+  { today, school }: Pick<Scope, 'today' | 'school'>,
+  kind: SetKind,
+  candidates: readonly LoadedCandidate[],
+  confusable: readonly [string, string][],
+): BuiltItem[] =>
+  buildSet({
+    candidates,
+    today,
+    budgetSeconds: BUDGET_SECONDS[kind],
+    maxSubjects: school.subjectsPerSet,
+    mode: kind,
+    confusable,
+  });

@@ -1,0 +1,96 @@
+import { execute, select } from '#server/db/scope.ts';
+import { foldLog } from '#shared/domain/schedule/fold.ts';
+import { gradeOf } from '#shared/domain/schedule/grade.ts';
+import type { HowSure } from '#shared/schemas/how-sure.ts';
+
+/** One answer with its newest mark, as the logs hold them. */
+export interface LoggedAnswer {
+  id: string;
+  user_id: string;
+  question_id: string;
+  set_id: string;
+  given_at: Date;
+  given_on: string;
+  how_sure: HowSure;
+  marks: number | null;
+  max_marks: number | null;
+}
+
+/** What the log says about one student and one question. */
+export interface FoldedState {
+  stability: number;
+  difficulty: number;
+  lastOn: string;
+  attempts: number;
+  lastGrade: number;
+  lastShare: number;
+}
+
+/** The answer log of a student for some questions, each answer with its newest mark event. */
+export const loadLog = (userId: string, questionIds: readonly string[]): Promise<LoggedAnswer[]> =>
+  select<LoggedAnswer>(
+    `SELECT a.id, a.user_id, a.question_id, i.set_id, a.given_at, to_char(a.given_on, 'YYYY-MM-DD') AS given_on,
+       a.how_sure, m.marks, m.max_marks
+     FROM answers a
+     JOIN set_items i ON i.id = a.set_item_id
+     LEFT JOIN LATERAL (SELECT e.marks, e.max_marks FROM mark_events e WHERE e.answer_id = a.id
+                        ORDER BY e.sequence DESC LIMIT 1) m ON true
+     WHERE a.user_id = $1 AND a.question_id = ANY($2)
+     ORDER BY a.given_at, a.id`,
+    [userId, questionIds],
+  );
+
+/** Folds a log of one student and one question; null while nothing in it is marked. */
+export function foldAnswers(log: readonly LoggedAnswer[]): FoldedState | null {
+  const folded = foldLog(
+    log.map((answer) => ({
+      answerId: answer.id,
+      givenAt: answer.given_at,
+      givenOn: answer.given_on,
+      grade:
+        answer.marks === null || answer.max_marks === null
+          ? null
+          : gradeOf({ marks: answer.marks, maxMarks: answer.max_marks, howSure: answer.how_sure }),
+    })),
+  );
+  const latest = log.findLast((answer) => answer.marks !== null);
+  if (!folded.memory || folded.lastGrade === null || !latest) return null;
+  const { stability, difficulty, lastOn } = folded.memory;
+  return {
+    stability,
+    difficulty,
+    lastOn,
+    attempts: folded.attempts,
+    lastGrade: folded.lastGrade,
+    lastShare: (latest.marks ?? 0) / Math.max(1, latest.max_marks ?? 1),
+  };
+}
+
+/** Replaces the stored memory of one question by the fold of its log: the log is the truth, this is its sum. */
+export async function rebuildMemory(schoolId: string, userId: string, questionId: string): Promise<FoldedState | null> {
+  const state = foldAnswers(await loadLog(userId, [questionId]));
+  if (!state) {
+    await execute('DELETE FROM memory_states WHERE user_id = $1 AND question_id = $2', [userId, questionId]);
+    return null;
+  }
+  await execute(
+    `INSERT INTO memory_states
+       (school_id, user_id, question_id, stability, difficulty, last_on, attempts, last_grade, last_share)
+     VALUES ($1, $2, $3, $4, $5, $6, $7, $8, $9)
+     ON CONFLICT (school_id, user_id, question_id) DO UPDATE SET
+       stability = excluded.stability, difficulty = excluded.difficulty, last_on = excluded.last_on,
+       attempts = excluded.attempts, last_grade = excluded.last_grade, last_share = excluded.last_share`,
+    [
+      schoolId,
+      userId,
+      questionId,
+      state.stability,
+      state.difficulty,
+      state.lastOn,
+      state.attempts,
+      state.lastGrade,
+      state.lastShare,
+    ],
+  );
+  return state;
+}

@@ -1,0 +1,30 @@
+import { longDayWords } from '#shared/domain/time/words.ts';
+import type { HowSure } from '#shared/schemas/how-sure.ts';
+
+export interface NextFacts {
+  marks: number;
+  maxMarks: number;
+  howSure: HowSure;
+  /** About when the question comes back; null where no day is left before its paper. */
+  returnsOn: string | null;
+  /** Title and day of the next paper that examines it; null without a sitting. */
+  paper: { title: string; on: string } | null;
+}
+
+/** What happens next with a question, after its mark: when it comes back, and before which paper. */
+export function nextWords({ marks, maxMarks, howSure, returnsOn, paper }: NextFacts): string {
+  const missed = maxMarks - marks;
+  const cause = causeWords(missed, maxMarks, howSure);
+  if (returnsOn === null)
+    return `${cause}${cause ? 'and this' : 'This'} was the last look before ${paper?.title ?? 'the exam'}.`;
+  const back = `${cause ? 'so this' : 'This'} comes back about ${longDayWords(returnsOn)}`;
+  const before = paper ? `, and again before ${paper.title} on ${longDayWords(paper.on)}` : '';
+  return `${cause}${back}${before}.`;
+}
+
+function causeWords(missed: number, maxMarks: number, howSure: HowSure): string {
+  if (missed === 0) return '';
+  if (howSure === 'certain') return `You were certain and dropped ${missed === 1 ? 'a mark' : `${missed} marks`}, `;
+  if (missed === maxMarks) return 'No marks yet, ';
+  return `${missed === 1 ? 'A mark was' : `${missed} marks were`} missed, `;
+}

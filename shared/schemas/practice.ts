@@ -1,0 +1,229 @@
+import { z } from 'zod';
+import { daySchema, instantSchema } from './common.ts';
+import { sittingSchema, subjectRefSchema } from './curriculum.ts';
+import { howSureSchema } from './how-sure.ts';
+import { markCodeSchema, questionKindSchema } from './question-body.ts';
+
+export const setKindSchema = z.enum(['mixed', 'morning']);
+export type SetKind = z.output<typeof setKindSchema>;
+
+export const setKindWords: Record<SetKind, string> = { mixed: 'Mixed set', morning: 'Morning set' };
+
+/** Standing of a topic by expected recall; `notStarted` where nothing was attempted. */
+export const standingSchema = z.enum(['secure', 'developing', 'weak', 'notStarted']);
+export type Standing = z.output<typeof standingSchema>;
+export const standingWords: Record<Standing, string> = {
+  secure: 'Secure',
+  developing: 'Developing',
+  weak: 'Weak',
+  notStarted: 'Not started',
+};
+
+export const topicRefSchema = z.object({ id: z.uuid(), number: z.string(), title: z.string() });
+
+/** A question as the student meets it: no scheme, no topic, nothing to read the answer from. */
+export const askedQuestionSchema = z.object({
+  number: z.int(),
+  kind: questionKindSchema,
+  stem: z.string(),
+  maxMarks: z.int(),
+  parts: z.array(
+    z.object({
+      prompt: z.string(),
+      lines: z.int(),
+      marks: z.int(),
+      answerLabel: z.string().nullable(),
+      /** Printed after the answer line. */
+      unit: z.string().nullable(),
+      answerKind: z.enum(['number', 'text', 'selfMarked']),
+    }),
+  ),
+});
+export type AskedQuestionDto = z.output<typeof askedQuestionSchema>;
+
+const schemePointSchema = z.object({
+  code: markCodeSchema.nullable(),
+  text: z.string(),
+  marks: z.int(),
+  allow: z.array(z.string()),
+  ignore: z.array(z.string()),
+  reject: z.array(z.string()),
+  /** Null until somebody has decided. */
+  isEarned: z.boolean().nullable(),
+});
+
+/** What an answer came to: the scheme, what was earned, and when it comes back. */
+export const answerResultSchema = z.object({
+  answerId: z.uuid(),
+  setItemId: z.uuid(),
+  /** True where the item had been answered before, in another tab or on another device. */
+  already: z.boolean(),
+  /** `selfMark`: at least one part waits for the student to mark it against the scheme. */
+  state: z.enum(['marked', 'selfMark']),
+  howSure: howSureSchema,
+  responses: z.array(z.string()),
+  /** Null until every part is marked. */
+  marks: z.int().nullable(),
+  maxMarks: z.int(),
+  topic: topicRefSchema,
+  parts: z.array(
+    z.object({
+      /** Who decides this part: Plait or the student. */
+      markedBy: z.enum(['plait', 'student']),
+      /** One sentence: what earned the marks, or what was expected. */
+      words: z.string(),
+      modelAnswer: z.string(),
+      points: z.array(schemePointSchema),
+    }),
+  ),
+  guidance: z.string().nullable(),
+  /** Why the scheduler chose it, in words. */
+  why: z.string(),
+  /** What happens next, in words, with the day it comes back where there is one. */
+  next: z.object({ words: z.string(), returnsOn: daySchema.nullable() }).nullable(),
+});
+export type AnswerResultDto = z.output<typeof answerResultSchema>;
+
+export const setItemSchema = z.object({
+  id: z.uuid(),
+  position: z.int(),
+  subject: subjectRefSchema,
+  question: askedQuestionSchema,
+  result: answerResultSchema.nullable(),
+});
+export type SetItemDto = z.output<typeof setItemSchema>;
+
+/** A set as opened: at most 60 items. */
+export const setSchema = z.object({
+  id: z.uuid(),
+  kind: setKindSchema,
+  on: daySchema,
+  status: z.enum(['open', 'finished']),
+  budgetSeconds: z.int(),
+  /** Seconds of work already handed in. */
+  secondsSoFar: z.int(),
+  openedAt: instantSchema,
+  items: z.array(setItemSchema).max(60),
+});
+export type SetDto = z.output<typeof setSchema>;
+
+export const openSetSchema = z.strictObject({ kind: setKindSchema });
+
+/** One handed-in answer. The client makes `id` before sending and keeps it until it is acknowledged. */
+export const handInSchema = z.strictObject({
+  id: z.uuid(),
+  setItemId: z.uuid(),
+  /** One string a part, in order; blank is allowed. */
+  responses: z.array(z.string().max(2000)).min(1).max(8),
+  howSure: howSureSchema,
+  /** Seconds spent on the question, as the client's monotonic clock measured them. */
+  seconds: z.int().min(0).max(7200),
+  /** Milliseconds between handing in and sending, for answers kept while offline. */
+  ageMs: z
+    .int()
+    .min(0)
+    .max(90 * 24 * 3600 * 1000),
+});
+export type HandIn = z.output<typeof handInSchema>;
+
+/** The student's own ticks: one row a part, one tick a mark point. */
+export const selfMarkSchema = z.strictObject({
+  id: z.uuid(),
+  answerId: z.uuid(),
+  ticks: z.array(z.array(z.boolean()).max(20)).min(1).max(8),
+});
+export type SelfMark = z.output<typeof selfMarkSchema>;
+
+/** How a set went. */
+export const setSummarySchema = z.object({
+  id: z.uuid(),
+  kind: setKindSchema,
+  on: daySchema,
+  answered: z.int(),
+  marks: z.int(),
+  maxMarks: z.int(),
+  minutes: z.int(),
+  /** Questions not reached: they return to the pool. */
+  unused: z.int(),
+  items: z
+    .array(
+      z.object({
+        setItemId: z.uuid(),
+        subject: subjectRefSchema,
+        marks: z.int().nullable(),
+        maxMarks: z.int(),
+      }),
+    )
+    .max(60),
+  topics: z
+    .array(
+      z.object({
+        subject: subjectRefSchema,
+        topic: topicRefSchema,
+        marks: z.int(),
+        maxMarks: z.int(),
+        /** Expected recall, 0–100, before the set and after it; null where nothing had been attempted. */
+        recallBefore: z.int().nullable(),
+        recallAfter: z.int().nullable(),
+        returnsOn: daySchema.nullable(),
+      }),
+    )
+    .max(60),
+  breakMinutes: z.int(),
+});
+export type SetSummaryDto = z.output<typeof setSummarySchema>;
+
+/** A set offered, under way or done on Today. */
+export const todaySetSchema = z.object({
+  kind: setKindSchema,
+  status: z.enum(['ready', 'open', 'done', 'nothing']),
+  setId: z.uuid().nullable(),
+  minutes: z.int(),
+  questions: z.int(),
+  answered: z.int(),
+  /** The strands in the order they will be asked. */
+  strands: z.array(z.object({ subject: subjectRefSchema, isAnswered: z.boolean() })).max(60),
+  /** Why these subjects, in one or two sentences. */
+  sentence: z.string(),
+  finishedAt: instantSchema.nullable(),
+  marks: z.int().nullable(),
+  maxMarks: z.int().nullable(),
+});
+export type TodaySetDto = z.output<typeof todaySetSchema>;
+
+const weakTopicSchema = z.object({
+  subject: subjectRefSchema,
+  topic: topicRefSchema,
+  /** Expected recall on the day of its paper, 0–100. */
+  recall: z.int(),
+  standing: standingSchema,
+});
+
+export const todaySchema = z.object({
+  on: daySchema,
+  /** Days to the first sitting still to come; null without sittings. */
+  daysToFirst: z.int().nullable(),
+  nextPapers: z.array(sittingSchema).max(4),
+  mixed: todaySetSchema,
+  morning: todaySetSchema,
+  weakTopics: z.array(weakTopicSchema).max(5),
+});
+export type TodayDto = z.output<typeof todaySchema>;
+
+/** One topic of the student's own, weakest first. */
+export const myTopicSchema = z.object({
+  subject: subjectRefSchema,
+  topic: topicRefSchema,
+  standing: standingSchema,
+  /** Expected recall now, 0–100, over the questions attempted; null where none was. */
+  recall: z.int().nullable(),
+  attempted: z.int(),
+  questions: z.int(),
+  lastPractisedOn: daySchema.nullable(),
+  returnsOn: daySchema.nullable(),
+  nextPaper: z.object({ title: z.string(), on: daySchema, daysAway: z.int() }).nullable(),
+  isTaught: z.boolean(),
+});
+export type MyTopicDto = z.output<typeof myTopicSchema>;
+/** A student's topics: bounded by their subjects. */
+export const myTopicListSchema = z.object({ on: daySchema, items: z.array(myTopicSchema).max(1000) });

@@ -1,0 +1,35 @@
+import { useId } from 'react';
+
+interface SegmentedProps<Value extends string> {
+  /** Names the choice for screen readers. */
+  label: string;
+  options: readonly { value: Value; label: string }[];
+  value: Value;
+  onChange: (value: Value) => void;
+}
+
+/** One choice of a few, all in sight. A radio group: arrow keys move and choose. */
+export function Segmented<Value extends string>({ label, options, value, onChange }: SegmentedProps<Value>) {
+  const name = useId();
+  return (
+    <fieldset className="seg max-w-full overflow-x-auto">
+      <legend className="sr-only">{label}</legend>
+      {options.map((option) => (
+        <label
+          key={option.value}
+          className="cursor-pointer max-md:min-h-11 has-checked:bg-ink has-checked:text-sheet has-focus-visible:outline-3 has-focus-visible:-outline-offset-4 has-focus-visible:outline-focus"
+        >
+          <input
+            type="radio"
+            className="sr-only"
+            name={name}
+            value={option.value}
+            checked={option.value === value}
+            onChange={() => onChange(option.value)}
+          />
+          {option.label}
+        </label>
+      ))}
+    </fieldset>
+  );
+}

@@ -1,0 +1,59 @@
+import { useId, useState } from 'react';
+import type { TopicDto } from '#shared/schemas/curriculum.ts';
+import { problemWords } from '#src/lib/show-problem.ts';
+import { useSetTaught } from '#src/queries/curriculum.ts';
+
+interface TaughtFieldProps {
+  subjectId: string;
+  topic: TopicDto;
+  row: TopicDto['taught'][number];
+  /** Shows the class above the field, where no column heading does. */
+  hasLabel: boolean;
+}
+
+/** When one class was taught one topic. Saved when the field is left or Enter is pressed. */
+export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProps) {
+  const id = useId();
+  const set = useSetTaught(subjectId);
+  // Null while the field shows what is saved.
+  const [typed, setTyped] = useState<string | null>(null);
+  const saved = row.taughtOn ?? '';
+  const save = () => {
+    if (typed === null || typed === saved) {
+      setTyped(null);
+      return;
+    }
+    set.mutate(
+      { classId: row.classId, topicId: topic.id, taughtOn: typed || null },
+      { onSuccess: () => setTyped(null) },
+    );
+  };
+  const said = set.isPending ? 'Saving…' : set.isError ? problemWords(set.error) : set.isSuccess ? 'Saved' : '';
+  return (
+    <div className="min-w-0">
+      <label htmlFor={id} className={hasLabel ? 'text-sm font-medium' : 'sr-only'}>
+        {row.className}
+        <span className="sr-only">, {topic.title}, taught on</span>
+      </label>
+      <input
+        id={id}
+        type="date"
+        className={`inp sm num max-md:!min-h-11 ${set.isError ? 'bad' : ''}`}
+        value={typed ?? saved}
+        aria-invalid={set.isError ? true : undefined}
+        aria-describedby={`${id}-said`}
+        onChange={(event) => {
+          setTyped(event.target.value);
+          if (!set.isIdle) set.reset();
+        }}
+        onBlur={save}
+        onKeyDown={(event) => {
+          if (event.key === 'Enter') save();
+        }}
+      />
+      <p id={`${id}-said`} role="status" className={`min-h-4 text-xs ${set.isError ? 'err' : 'text-ink-2'}`}>
+        {said}
+      </p>
+    </div>
+  );
+}

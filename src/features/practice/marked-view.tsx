@@ -1,0 +1,150 @@
+import { type ReactNode, useEffect, useRef } from 'react';
+import { longDayWords } from '#shared/domain/time/words.ts';
+import type { AnswerResultDto, SetItemDto } from '#shared/schemas/practice.ts';
+import { partLetter } from '#src/components/exam-question.tsx';
+import { MarkScheme, pointCode } from '#src/components/mark-scheme.tsx';
+import { Markdown } from '#src/components/markdown.tsx';
+import { MarksBadge } from '#src/components/marks-badge.tsx';
+import { Sheet, SheetRow } from '#src/components/sheet.tsx';
+import { Caret, Tick } from '#src/components/tick.tsx';
+import { keyed } from '#src/lib/keyed.ts';
+import { SaidHowSure } from './how-sure-choice.tsx';
+import { AnsweredRows, SubjectRow } from './question-rows.tsx';
+
+type ResultPart = AnswerResultDto['parts'][number];
+
+/** Ticks and carets of one part, for the marks margin. */
+export function MarginMarks({ part }: { part: ResultPart | undefined }) {
+  const decided = part?.points.filter((point) => point.isEarned !== null) ?? [];
+  return (
+    <div className="flex flex-col items-center justify-end gap-1.5 h-full pb-6" aria-hidden="true">
+      {keyed(decided, (point) => point.text).map(({ key, item: point }) => (
+        <span key={key} className={`inline-flex items-center gap-1 mcode ${point.isEarned ? '' : 'no'}`}>
+          {point.isEarned ? <Tick size={20} isDrawn /> : <Caret />}
+          {pointCode(point)}
+        </span>
+      ))}
+    </div>
+  );
+}
+
+const isFull = (part: ResultPart): boolean => part.points.every((point) => point.isEarned);
+
+function PartScheme({ part, letter }: { part: ResultPart; letter: string | null }) {
+  return (
+    <div className="[&:not(:first-child)]:mt-4">
+      {letter ? <h4 className="text-sm font-semibold text-ink-2">{letter}</h4> : null}
+      <MarkScheme points={part.points} isDrawn />
+      {isFull(part) ? null : (
+        <p className="mt-2 text-sm text-ink-2">
+          Model answer: <Markdown isInline source={part.modelAnswer} />
+        </p>
+      )}
+    </div>
+  );
+}
+
+/** The sentence with its day in bold. */
+function WithDay({ words, day }: { words: string; day: string | null }) {
+  const long = day ? longDayWords(day) : null;
+  const at = long ? words.indexOf(long) : -1;
+  if (!long || at < 0) return words;
+  return (
+    <>
+      {words.slice(0, at)}
+      <b className="text-ink">{long}</b>
+      {words.slice(at + long.length)}
+    </>
+  );
+}
+
+function headingFor({ marks, maxMarks }: AnswerResultDto): string {
+  const lost = maxMarks - (marks ?? 0);
+  if (lost === 0) return 'What earned the marks';
+  return lost === 1 ? 'Where the mark went' : 'Where the marks went';
+}
+
+function Explanation({ result }: { result: AnswerResultDto }) {
+  const isSingle = result.parts.length === 1;
+  return (
+    <section>
+      <h3>{headingFor(result)}</h3>
+      <div className="mt-1 grid gap-1.5">
+        {result.parts.map((part, index) => (
+          // Parts never change places.
+          <div key={partLetter(index)}>
+            {isSingle ? null : `${partLetter(index)} `}
+            <Markdown isInline source={part.words} />
+          </div>
+        ))}
+        {result.guidance ? <Markdown source={result.guidance} /> : null}
+      </div>
+      {result.next ? (
+        <>
+          <h3 className="mt-5">What happens next</h3>
+          <p className="mt-1 text-ink-2">
+            <WithDay words={result.next.words} day={result.next.returnsOn} />
+          </p>
+        </>
+      ) : null}
+      <h3 className="mt-5">Why this question</h3>
+      <p className="mt-1 text-ink-2">{result.why}</p>
+    </section>
+  );
+}
+
+interface MarkedViewProps {
+  item: SetItemDto;
+  number: number;
+  result: AnswerResultDto;
+  /** What comes next: the buttons below the sheet. */
+  steps: ReactNode;
+  /** Marked just now, so that the focus belongs here. */
+  isFresh: boolean;
+}
+
+/** An answer with its marks, the scheme, where the marks went and when it comes back. */
+export function MarkedView({ item, number, result, steps, isFresh }: MarkedViewProps) {
+  const heading = useRef<HTMLHeadingElement>(null);
+  useEffect(() => {
+    if (isFresh) heading.current?.focus({ preventScroll: true });
+  }, [isFresh]);
+  const badge = <MarksBadge marks={result.marks} maxMarks={result.maxMarks} />;
+  return (
+    <>
+      <Sheet>
+        <SubjectRow item={item} topic={result.topic} />
+        <AnsweredRows
+          item={item}
+          number={number}
+          responses={result.responses}
+          renderMarks={(index) => <MarginMarks part={result.parts[index]} />}
+        />
+        <SheetRow marks={<div className="flex items-end justify-center h-full pb-6">{badge}</div>}>
+          <div className="pb-6 flex items-end justify-between gap-4">
+            <SaidHowSure howSure={result.howSure} />
+            <span className="md:hidden">{badge}</span>
+          </div>
+        </SheetRow>
+        <SheetRow hasRule>
+          <div className="py-5 md:py-6 grid grid-cols-1 md:grid-cols-2 gap-x-10 gap-y-6">
+            <section>
+              <h2 ref={heading} tabIndex={-1} className="!text-[1.125rem] !leading-6">
+                Mark scheme
+              </h2>
+              {result.parts.map((part, index) => (
+                <PartScheme
+                  key={partLetter(index)}
+                  part={part}
+                  letter={result.parts.length > 1 ? partLetter(index) : null}
+                />
+              ))}
+            </section>
+            <Explanation result={result} />
+          </div>
+        </SheetRow>
+      </Sheet>
+      <div className="flex flex-wrap justify-end gap-3 mt-5 px-5 md:px-0">{steps}</div>
+    </>
+  );
+}

@@ -1,0 +1,33 @@
+import type { SetDto, SetItemDto } from '#shared/schemas/practice.ts';
+import type { Waiting } from './answer-queue.ts';
+
+/** What is to be done with an item: ask it, wait for the server, let it be marked by its student, or nothing more. */
+export type Stage = 'ask' | 'waiting' | 'selfMark' | 'marked';
+
+export function stageOf(item: SetItemDto, waiting: readonly Waiting[]): Stage {
+  if (waiting.some((entry) => entry.setItemId === item.id)) return 'waiting';
+  if (!item.result) return 'ask';
+  return item.result.state === 'selfMark' ? 'selfMark' : 'marked';
+}
+
+/** Items answered, those waiting on this device included. */
+export const answeredIn = (set: SetDto, waiting: readonly Waiting[]): Set<string> =>
+  new Set([
+    ...set.items.filter(({ result }) => result !== null).map(({ id }) => id),
+    ...waiting.map(({ setItemId }) => setItemId),
+  ]);
+
+/** Seconds of work handed in, those waiting on this device included. */
+export const secondsIn = (set: SetDto, waiting: readonly Waiting[]): number =>
+  set.secondsSoFar + waiting.reduce((sum, entry) => sum + (entry.kind === 'answer' ? entry.body.seconds : 0), 0);
+
+/**
+ * Place of the next item to work on, from 0, or −1 where none is left: first what was never asked, unless
+ * the time is up, then what its student has to mark.
+ */
+export function nextPlaceIn(set: SetDto, waiting: readonly Waiting[], exceptId?: string): number {
+  const find = (stage: Stage) =>
+    set.items.findIndex((item) => item.id !== exceptId && stageOf(item, waiting) === stage);
+  const toAsk = secondsIn(set, waiting) < set.budgetSeconds ? find('ask') : -1;
+  return toAsk >= 0 ? toAsk : find('selfMark');
+}

@@ -1,0 +1,103 @@
+import { useCallback, useEffect, useMemo, useRef, useState, useSyncExternalStore } from 'react';
+import { isTransient, NetworkError, ProblemError } from '#src/lib/api.ts';
+import { isSignedOut, noticeSignedOut } from '#src/lib/query-client.ts';
+import { handIn, saveSelfMark } from '#src/queries/practice.ts';
+import { AnswerQueue, ageOf, type Waiting } from './answer-queue.ts';
+
+const FIRST_WAIT_MS = 1000;
+const LONGEST_WAIT_MS = 30_000;
+
+/** Why answers wait: no connection, or a server that has no time. Null while they go through. */
+export type Away = 'offline' | 'busy' | null;
+
+export interface Refusal {
+  entry: Waiting;
+  words: string;
+}
+
+const sendOne = (setId: string, entry: Waiting) =>
+  entry.kind === 'answer'
+    ? handIn(setId, { ...entry.body, ageMs: ageOf(entry.stamp) })
+    : saveSelfMark(setId, entry.body);
+
+const waitAfter = (error: unknown, failures: number): number => {
+  const asked = error instanceof ProblemError ? (error.retryAfterSeconds ?? 0) * 1000 : 0;
+  return Math.max(asked, Math.min(FIRST_WAIT_MS * 2 ** failures, LONGEST_WAIT_MS));
+};
+
+/**
+ * Sends what was handed in, one after another and oldest first, and tries again with growing waits and
+ * when the connection returns. An answer the server refuses for good is given back through `onRefused`.
+ */
+export function useAnswerQueue(userId: string, setId: string, onRefused: (refusal: Refusal) => void) {
+  const queue = useMemo(() => new AnswerQueue(userId, setId), [userId, setId]);
+  const waiting = useSyncExternalStore(queue.subscribe, queue.waiting);
+  const [away, setAway] = useState<Away>(null);
+  const isStopped = useRef(false);
+  const isSending = useRef(false);
+  const failures = useRef(0);
+  const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
+  const refused = useRef(onRefused);
+  useEffect(() => {
+    refused.current = onRefused;
+  });
+
+  const drain = useCallback(async () => {
+    if (isSending.current || isStopped.current) return;
+    isSending.current = true;
+    clearTimeout(timer.current);
+    try {
+      for (let entry = queue.waiting()[0]; entry; entry = queue.waiting()[0]) {
+        try {
+          await sendOne(setId, entry);
+        } catch (error) {
+          if (isSignedOut(error) || isTransient(error)) throw error;
+          refused.current({ entry, words: error instanceof ProblemError ? error.detail : 'The server did not take it.' });
+        }
+        queue.remove(entry.body.id);
+        failures.current = 0;
+        setAway(null);
+        if (isStopped.current) return;
+      }
+    } catch (error) {
+      noticeSignedOut(error);
+      if (isStopped.current) return;
+      if (isTransient(error)) setAway(error instanceof NetworkError ? 'offline' : 'busy');
+      timer.current = setTimeout(() => void drain(), waitAfter(error, failures.current));
+      failures.current += 1;
+    } finally {
+      isSending.current = false;
+    }
+  }, [queue, setId]);
+
+  useEffect(() => {
+    const retry = () => {
+      failures.current = 0;
+      void drain();
+    };
+    const leave = () => setAway('offline');
+    const back = () => {
+      if (queue.waiting().length === 0) setAway(null);
+      retry();
+    };
+    isStopped.current = false;
+    retry();
+    window.addEventListener('online', back);
+    window.addEventListener('offline', leave);
+    return () => {
+      isStopped.current = true;
+      clearTimeout(timer.current);
+      window.removeEventListener('online', back);
+      window.removeEventListener('offline', leave);
+    };
+  }, [drain, queue]);
+
+  const add = useCallback(
+    (entry: Waiting) => {
+      queue.add(entry);
+      void drain();
+    },
+    [queue, drain],
+  );
+  return { waiting, away, add };
+}

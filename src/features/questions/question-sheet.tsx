@@ -1,0 +1,49 @@
+import type { DraftBody } from '#shared/schemas/question.ts';
+import type { QuestionKind } from '#shared/schemas/question-body.ts';
+import { ExamQuestion, partLetter } from '#src/components/exam-question.tsx';
+import { MarkScheme } from '#src/components/mark-scheme.tsx';
+import { Markdown } from '#src/components/markdown.tsx';
+import { Sheet, SheetRow } from '#src/components/sheet.tsx';
+import { toAskedQuestion, toSchemePoints } from './asked-question.ts';
+
+interface QuestionSheetProps {
+  body: DraftBody;
+  kind: QuestionKind;
+  number: number;
+  lang?: string | undefined;
+  /** The model answers too, which the editor's own fields show already. */
+  hasModelAnswers?: boolean;
+}
+
+/** A question as the exam page has it, its mark scheme below. */
+export function QuestionSheet({ body, kind, number, lang, hasModelAnswers = false }: QuestionSheetProps) {
+  return (
+    <Sheet>
+      <ExamQuestion question={toAskedQuestion(body, kind, number)} number={number} lang={lang} />
+      <SheetRow hasRule>
+        <div className="pt-4 pb-5">
+          <h3 className="mb-1">Mark scheme</h3>
+          {body.parts.map((part, index) => (
+            // Parts are shown in their order and hold no state here.
+            <div key={partLetter(index)} className="mt-2">
+              {body.parts.length > 1 ? <p className="font-semibold">Part {partLetter(index)}</p> : null}
+              <MarkScheme points={toSchemePoints(part)} />
+              {hasModelAnswers ? (
+                <div className="mt-3">
+                  <p className="hint">Model answer</p>
+                  <p className="pen whitespace-pre-wrap [overflow-wrap:anywhere]">{part.modelAnswer || 'None yet'}</p>
+                </div>
+              ) : null}
+            </div>
+          ))}
+          {body.guidance?.trim() ? (
+            <div className="mt-4">
+              <p className="hint">Guidance, shown after the answer</p>
+              <Markdown source={body.guidance} lang={lang} />
+            </div>
+          ) : null}
+        </div>
+      </SheetRow>
+    </Sheet>
+  );
+}

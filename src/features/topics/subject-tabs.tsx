@@ -1,0 +1,34 @@
+import { Link } from 'react-router-dom';
+import type { MyTopicDto } from '#shared/schemas/practice.ts';
+import { StrandLabel } from '#src/components/strand-label.tsx';
+
+interface SubjectTabsProps {
+  subjects: MyTopicDto['subject'][];
+  /** Null for all. */
+  chosenId: string | null;
+}
+
+/** Chooses one subject or all; kept in the address. */
+export function SubjectTabs({ subjects, chosenId }: SubjectTabsProps) {
+  return (
+    <nav className="tabs lg:!gap-x-[1.1rem]" aria-label="Subject">
+      <Link to="/topics" replace preventScrollReset aria-current={chosenId === null ? 'page' : undefined}>
+        All {subjects.length}
+        <span className="max-lg:sr-only"> subjects</span>
+      </Link>
+      {subjects.map((subject) => (
+        <Link
+          key={subject.id}
+          to={`/topics?subject=${subject.id}`}
+          replace
+          preventScrollReset
+          aria-current={chosenId === subject.id ? 'page' : undefined}
+          className="!flex items-center gap-1.5 min-h-11"
+        >
+          <StrandLabel subject={subject} isPale={chosenId !== subject.id} />
+          <span className="max-lg:sr-only">{subject.name}</span>
+        </Link>
+      ))}
+    </nav>
+  );
+}

@@ -1,0 +1,84 @@
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { Link, type LoaderFunctionArgs, useLocation, useParams } from 'react-router-dom';
+import { z } from 'zod';
+import { dayWords } from '#shared/domain/time/words.ts';
+import { setKindWords } from '#shared/schemas/practice.ts';
+import { EmptyState } from '#src/components/empty-state.tsx';
+import { MarksBadge } from '#src/components/marks-badge.tsx';
+import { BreakTimer } from '#src/features/practice/break-timer.tsx';
+import { SummaryRibbon } from '#src/features/practice/summary-ribbon.tsx';
+import { SummaryTopics } from '#src/features/practice/summary-topics.tsx';
+import { queryClient } from '#src/lib/query-client.ts';
+import { useMe } from '#src/queries/me.ts';
+import { summaryQuery } from '#src/queries/practice.ts';
+
+const arrivalSchema = z.object({ breakEndsAt: z.number() });
+
+export async function loader({ params }: LoaderFunctionArgs): Promise<null> {
+  await queryClient.ensureQueryData(summaryQuery(params.id ?? ''));
+  return null;
+}
+
+const count = (number: number, word: string) => `${number} ${word}${number === 1 ? '' : 's'}`;
+
+/** How a set went, and the break after it. */
+export function Component() {
+  const { id = '' } = useParams();
+  const summary = useSuspenseQuery(summaryQuery(id)).data;
+  const { today } = useMe();
+  const arrival = arrivalSchema.safeParse(useLocation().state);
+  const name = setKindWords[summary.kind];
+  const when = summary.on === today ? 'today' : dayWords(summary.on);
+  return (
+    <div className="page">
+      <title>{`${name}, how it went – Plait`}</title>
+      <div className="grid grid-cols-1 lg:grid-cols-[minmax(0,1fr)_19.5rem] gap-x-14 gap-y-8">
+        <div className="min-w-0">
+          <div className="flex items-end justify-between gap-4 mb-6">
+            <div>
+              <p className="text-ink-2 mb-1.5 num">
+                {name}, {when}
+              </p>
+              <h1>
+                {count(summary.answered, 'question')} in {count(summary.minutes, 'minute')}
+              </h1>
+            </div>
+            {summary.answered > 0 ? (
+              <span className="mb-1">
+                <MarksBadge isLarge marks={summary.marks} maxMarks={summary.maxMarks} />
+              </span>
+            ) : null}
+          </div>
+          {summary.answered === 0 ? (
+            <EmptyState
+              title="Nothing was answered"
+              action={
+                <Link className="btn quiet" to="/topics">
+                  See your topics
+                </Link>
+              }
+            >
+              Every question went back to the pool and is weighed again for your next set.
+            </EmptyState>
+          ) : (
+            <>
+              <SummaryRibbon summary={summary} />
+              <SummaryTopics topics={summary.topics} today={today} />
+            </>
+          )}
+          {summary.unused > 0 && summary.answered > 0 ? (
+            <p className="text-ink-2">
+              The other {summary.unused === 1 ? 'question goes' : `${summary.unused} questions go`} back to the pool and{' '}
+              {summary.unused === 1 ? 'is' : 'are'} weighed again for your next set.
+            </p>
+          ) : null}
+        </div>
+        <BreakTimer
+          kind={summary.kind}
+          minutes={summary.breakMinutes}
+          endsAt={arrival.success ? arrival.data.breakEndsAt : null}
+        />
+      </div>
+    </div>
+  );
+}

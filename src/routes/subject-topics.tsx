@@ -1,0 +1,76 @@
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { Link, type LoaderFunctionArgs, useNavigate, useParams } from 'react-router-dom';
+import { subjectParamsSchema } from '#shared/schemas/curriculum.ts';
+import { EmptyState } from '#src/components/empty-state.tsx';
+import { StrandLabel } from '#src/components/strand-label.tsx';
+import { SubjectChoice } from '#src/components/subject-choice.tsx';
+import { TopicList } from '#src/features/curriculum/topic-list.tsx';
+import { queryClient } from '#src/lib/query-client.ts';
+import { subjectsQuery, topicsQuery } from '#src/queries/curriculum.ts';
+
+export async function loader({ params }: LoaderFunctionArgs) {
+  const parsed = subjectParamsSchema.safeParse(params);
+  const { items } = await queryClient.ensureQueryData(subjectsQuery());
+  const subject = items.find((one) => one.id === parsed.data?.subjectId);
+  if (!subject) throw new Response('No such subject', { status: 404 });
+  await queryClient.ensureQueryData(topicsQuery(subject.id));
+  return null;
+}
+
+export function Component() {
+  const { subjectId } = subjectParamsSchema.parse(useParams());
+  const navigate = useNavigate();
+  const { data: subjects } = useSuspenseQuery(subjectsQuery());
+  const { data: topics } = useSuspenseQuery(topicsQuery(subjectId));
+  const subject = subjects.find((one) => one.id === subjectId);
+  if (!subject) return null;
+  const live = topics.reduce((sum, topic) => sum + topic.liveQuestions, 0);
+  const hasSeveral = subject.specifications.length > 1;
+  return (
+    <div className="page !max-w-[84rem]">
+      <title>{`Topics, ${subject.name} – Plait`}</title>
+      <div className="mb-7 flex flex-wrap items-end justify-between gap-4">
+        <div className="min-w-0">
+          <p className="mb-1.5 flex items-center gap-2 text-ink-2">
+            <StrandLabel subject={subject} /> {subject.name}
+          </p>
+          <h1>Topics</h1>
+          <p className="mt-1.5 max-w-[40rem] text-md text-ink-2">
+            A topic comes up in students’ sets once their class was taught it. Set the date for each class.
+          </p>
+        </div>
+        <SubjectChoice
+          subjects={subjects}
+          value={subject.id}
+          onChange={(id) => void navigate(`/subjects/${id}/topics`)}
+        />
+      </div>
+      {topics.length === 0 ? (
+        <EmptyState title={`No topics in ${subject.name} yet`}>
+          Questions, gaps and planning all hang on the topics of your specification. The head of department lists them.
+        </EmptyState>
+      ) : (
+        subject.specifications.map((specification) => (
+          <section key={specification.id} aria-labelledby={specification.id} className="mb-10">
+            <h2 id={specification.id} className="mb-2">
+              {specification.name}
+            </h2>
+            <TopicList
+              subject={subject}
+              specification={specification}
+              topics={topics.filter((topic) => topic.specificationId === specification.id)}
+            />
+          </section>
+        ))
+      )}
+      {live > 0 && hasSeveral ? (
+        <p className="hint">A question that serves several specifications counts in each of them.</p>
+      ) : null}
+      <p className="text-sm">
+        <Link className="link" to={`/questions?subject=${subject.id}`}>
+          All questions in {subject.name}
+        </Link>
+      </p>
+    </div>
+  );
+}

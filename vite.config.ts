@@ -1,0 +1,43 @@
+import tailwindcss from '@tailwindcss/vite';
+import react from '@vitejs/plugin-react';
+import { defineConfig } from 'vitest/config';
+
+const serverEntries = { main: 'server/main.ts', migrate: 'server/commands/migrate.ts', 'verify-log': 'server/commands/verify-log.ts' };
+
+export default defineConfig(({ isSsrBuild }) => ({
+  plugins: [react(), tailwindcss()],
+  build: isSsrBuild
+    ? { target: 'node20', sourcemap: true, rollupOptions: { input: serverEntries } }
+    : { target: 'es2022', outDir: 'dist/client', assetsInlineLimit: 0, manifest: true },
+  server: { proxy: { '/api': process.env.API_ORIGIN ?? 'http://127.0.0.1:3000' } },
+  test: {
+    projects: [
+      { extends: true, test: { name: 'unit', include: ['tests/unit/**/*.test.{ts,tsx}'], environment: 'node' } },
+      { extends: true, test: { name: 'property', include: ['tests/property/**/*.test.ts'], testTimeout: 60_000 } },
+      {
+        extends: true,
+        test: {
+          name: 'api',
+          include: ['tests/api/**/*.test.ts'],
+          globalSetup: ['tests/support/template-database.ts'],
+          setupFiles: ['tests/support/worker-database.ts'],
+          testTimeout: 20_000,
+          hookTimeout: 30_000,
+          maxWorkers: 2,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'e2e',
+          include: ['tests/e2e/**/*.test.ts'],
+          globalSetup: ['tests/support/running-app.ts'],
+          testTimeout: 120_000,
+          hookTimeout: 120_000,
+          maxWorkers: 1,
+          fileParallelism: false,
+        },
+      },
+    ],
+  },
+}));
