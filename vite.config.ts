@@ -2,7 +2,11 @@ import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 
-const serverEntries = { main: 'server/main.ts', migrate: 'server/commands/migrate.ts', 'verify-log': 'server/commands/verify-log.ts' };
+const serverEntries = {
+  main: 'server/main.ts',
+  migrate: 'server/commands/migrate.ts',
+  'verify-log': 'server/commands/verify-log.ts',
+};
 
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: [react(), tailwindcss()],
@@ -32,6 +36,7 @@ export default defineConfig(({ isSsrBuild }) => ({
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
           globalSetup: ['tests/support/running-app.ts'],
+          setupFiles: ['tests/support/running-app-database.ts'],
           testTimeout: 120_000,
           hookTimeout: 120_000,
           maxWorkers: 1,

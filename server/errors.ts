@@ -41,3 +41,7 @@ export const stale = (): Problem =>
 /** A body that parsed but breaks a rule, said at the field. */
 export const unprocessable = (errors: FieldError[]): Problem =>
   new Problem(422, 'invalid', errors[0]?.detail ?? 'Something in the form needs changing.', { errors });
+
+/** The database or another part is away for a moment; the client keeps what it has and sends it again. */
+export const busy = (detail = 'Plait is not available for a moment. Nothing is lost; try again shortly.'): Problem =>
+  new Problem(503, 'busy', detail, { retryAfterSeconds: 3 });

@@ -7,7 +7,9 @@ const weightRows = ({ topics, papers }: SpecificationContent) =>
   topics.flatMap((topic) =>
     papers.flatMap((paper) => {
       const marks = topic.weights[paper.number];
-      return marks ? [{ id: idFor(topic.id, 'weight', paper.number), topic_id: topic.id, paper_id: paper.id, marks }] : [];
+      return marks
+        ? [{ id: idFor(topic.id, 'weight', paper.number), topic_id: topic.id, paper_id: paper.id, marks }]
+        : [];
     }),
   );
 

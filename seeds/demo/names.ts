@@ -30,12 +30,11 @@ Tiago Lourenço, Viktor Hristov, Zuzanna Pawlik
   .split(',')
   .map((name) => name.trim());
 
-/** "Zuzanna Pawlik" → Pawlik. */
-export const familyName = (name: string): string => name.slice(name.lastIndexOf(' ') + 1);
-
-/** "Zuzanna Pawlik" → "Pawlik, Zuzanna". */
-export const sortName = (name: string): string =>
-  `${familyName(name)}, ${name.slice(0, name.lastIndexOf(' '))}`;
+/** "Zuzanna Pawlik" → "Pawlik, Zuzanna"; "Ms C. Hallworth" → "Hallworth, Ms C.". */
+export function sortName(name: string): string {
+  const space = name.lastIndexOf(' ');
+  return `${name.slice(space + 1)}, ${name.slice(0, space)}`;
+}
 
 /** Lower case without accents, a full stop between the words: "kristers.ozolins". */
 export const usernameFor = (name: string): string =>

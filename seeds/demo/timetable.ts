@@ -48,13 +48,7 @@ function examSlots(subjects: readonly SubjectPlan[]): string[][] {
 
 const schoolDay = (monday: string, index: number): string => addDays(monday, Math.floor(index / 5) * 7 + (index % 5));
 
-function season(
-  kind: Season['kind'],
-  name: string,
-  monday: string,
-  weeks: number,
-  slots: readonly string[][],
-): Season {
+function season(kind: Season['kind'], name: string, monday: string, weeks: number, slots: readonly string[][]): Season {
   const id = idFor('season', kind);
   const days = weeks * 5;
   if (slots.length > days * TIMES.length) throw new Error(`${name}: more papers than mornings and afternoons.`);
@@ -81,7 +75,10 @@ export function planSeasons(subjects: readonly SubjectPlan[], today: string): Se
 
 /** The day of the last sitting of all. */
 export function lastSitting(seasons: readonly Season[]): string {
-  const last = seasons.flatMap(({ sittings }) => sittings.map(({ on }) => on)).sort().at(-1);
+  const last = seasons
+    .flatMap(({ sittings }) => sittings.map(({ on }) => on))
+    .sort()
+    .at(-1);
   if (!last) throw new Error('The demo timetable has no sittings.');
   return last;
 }

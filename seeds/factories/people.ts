@@ -3,11 +3,9 @@ import { Membership } from '#server/models/membership.ts';
 import { User } from '#server/models/user.ts';
 import { hashPassword } from '#server/services/people/passwords.ts';
 import type { Role } from '#shared/schemas/role.ts';
+import { FACTORY_PASSWORD } from './password.ts';
 import type { FactorySchool } from './school.ts';
 import { unique } from './unique.ts';
-
-/** Every factory person's password. */
-export const FACTORY_PASSWORD = 'correct horse battery staple';
 
 let hash: Promise<string> | undefined;
 

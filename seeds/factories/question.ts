@@ -2,9 +2,10 @@ import { withSchool } from '#server/db/scope.ts';
 import { Question } from '#server/models/question.ts';
 import { QuestionTopic } from '#server/models/question-topic.ts';
 import { QuestionVersion } from '#server/models/question-version.ts';
+import { describeBody } from '#server/services/questions/describe-body.ts';
 import type { Tier } from '#shared/schemas/common.ts';
 import type { VersionStatus } from '#shared/schemas/question.ts';
-import { bodyMarks, type QuestionBody, type QuestionKind } from '#shared/schemas/question-body.ts';
+import type { QuestionBody, QuestionKind } from '#shared/schemas/question-body.ts';
 import type { FactorySubject } from './curriculum.ts';
 import type { FactoryPerson } from './people.ts';
 import type { FactorySchool } from './school.ts';
@@ -68,9 +69,7 @@ export async function aQuestion(
       kind,
       tier: values.tier ?? null,
       body,
-      searchText: body.stem.toLowerCase(),
-      excerpt: body.stem.slice(0, 160),
-      maxMarks: bodyMarks(body),
+      ...describeBody(body),
       expectedSeconds,
       authorId: author.id,
       savedAt: now,

@@ -7,7 +7,7 @@ export interface Cursor {
   id: string;
 }
 
-const cursorSchema = z.tuple([z.string(), z.string().regex(/^-?\d{1,18}(\.\d{1,12})?$/), z.uuid()]);
+const cursorSchema = z.tuple([z.string(), z.string().regex(/^-?\d{1,18}(\.\d{1,12})?$/), z.guid()]);
 
 const parseJson = (text: string): unknown => {
   try {

@@ -1,8 +1,14 @@
 import { STATUS_CODES } from 'node:http';
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Logger } from 'pino';
-import { ConnectionAcquireTimeoutError, ConnectionError, OptimisticLockError, UniqueConstraintError } from 'sequelize';
-import { Problem, stale } from '#server/errors.ts';
+import {
+  ConnectionAcquireTimeoutError,
+  ConnectionError,
+  DatabaseError,
+  OptimisticLockError,
+  UniqueConstraintError,
+} from 'sequelize';
+import { busy, Problem, stale } from '#server/errors.ts';
 import type { ProblemDetails } from '#shared/schemas/common.ts';
 
 interface ParserError {
@@ -13,23 +19,22 @@ interface ParserError {
 const isParserError = (error: unknown): error is ParserError =>
   error instanceof Error && 'type' in error && 'status' in error && typeof error.status === 'number';
 
-const busy = () =>
-  new Problem(503, 'busy', 'Plait is not available for a moment. Nothing is lost; try again shortly.', {
-    retryAfterSeconds: 3,
-  });
-
 /** Database conditions that pass by themselves: cut statements, shutdown, too many connections, a full disk. */
 const PASSING = new Set(['57014', '55P03', '57P01', '57P02', '57P03', '53100', '53300', '40001', '40P01', '25P03']);
 
-const sqlState = (error: unknown): string =>
-  error instanceof Error && 'original' in error ? ((error.original as { code?: string }).code ?? '') : '';
+/** True where the database was lost under the statement: it passes, or no server said anything at all. */
+const isPassing = (error: unknown): boolean => {
+  if (error instanceof ConnectionAcquireTimeoutError || error instanceof ConnectionError) return true;
+  if (!(error instanceof DatabaseError)) return false;
+  const { code } = error.original as { code?: string };
+  return code === undefined || PASSING.has(code);
+};
 
 function known(error: unknown): Problem | null {
   if (error instanceof Problem) return error;
   if (error instanceof OptimisticLockError) return stale();
   if (error instanceof UniqueConstraintError) return new Problem(409, 'duplicate', 'That is already there.');
-  if (error instanceof ConnectionAcquireTimeoutError || error instanceof ConnectionError) return busy();
-  if (PASSING.has(sqlState(error))) return busy();
+  if (isPassing(error)) return busy();
   if (isParserError(error)) {
     if (error.type === 'entity.too.large') return new Problem(413, 'too-large', 'That is larger than Plait takes.');
     return new Problem(400, 'malformed', 'The request could not be read.');
@@ -57,7 +62,8 @@ export function problemHandler(log: Logger): ErrorRequestHandler {
   return (error, request, response, next) => {
     if (response.headersSent) return next(error);
     const problem = known(error);
-    if (!problem || problem.status >= 500) log.error({ err: error, requestId: request.id }, 'unexpected error');
+    if (!problem) log.error({ err: error, requestId: request.id }, 'unexpected error');
+    else if (problem.status >= 500) log.warn({ err: error, requestId: request.id }, 'not available');
     sendProblem(
       response,
       problem ?? new Problem(500, 'unexpected', 'Something went wrong at our end. Nothing you did is lost.'),

@@ -3,6 +3,7 @@ import type { Request, RequestHandler, Response } from 'express';
 import session from 'express-session';
 import type { Pool } from 'pg';
 import type { Config } from '#server/config.ts';
+import { busy } from '#server/errors.ts';
 
 /** What a session knows of the person: ids only; rights are loaded afresh with each request. */
 export interface SessionUser {
@@ -45,7 +46,7 @@ export const cookieName = (origin: string): string => (origin.startsWith('https:
 /** express-session on PostgreSQL. Sets no cookie until somebody signs in. */
 export function sessions(config: Config, pool: Pool): RequestHandler {
   const Store = connectPgSimple(session);
-  return session({
+  const handle = session({
     name: cookieName(config.PUBLIC_ORIGIN),
     secret: config.SESSION_SECRET,
     resave: false,
@@ -53,6 +54,8 @@ export function sessions(config: Config, pool: Pool): RequestHandler {
     store: new Store({ pool, tableName: 'session', disableTouch: true, ttl: OWN_DEVICE.absolute / 1000 }),
     cookie: { httpOnly: true, sameSite: 'lax', path: '/', secure: config.PUBLIC_ORIGIN.startsWith('https:') },
   });
+  // The only thing that can go wrong in the store is the database being away.
+  return (request, response, next) => handle(request, response, (error) => (error ? next(busy()) : next()));
 }
 
 /** True while neither the idle nor the absolute end has passed. @param now milliseconds */

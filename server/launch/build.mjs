@@ -14,8 +14,10 @@ import {
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { cleanEnvironment, runCommand } from './commands.mjs';
+import { withLock } from './lock.mjs';
 import { packageFile, plaitDir, projectRoot } from './paths.mjs';
 import { isAlive } from './processes.mjs';
+import { makeStateDir } from './state-dir.mjs';
 
 /** What a build is made from. Launch scripts are not, but for this one. */
 const SOURCES = [
@@ -94,7 +96,7 @@ function moveIntoPlace(draft) {
  * @param {{ lifecycle?: import('./lifecycle.mjs').Lifecycle, onLine?: (line: string) => void, inherit?: boolean }} [options]
  */
 export async function build({ lifecycle, onLine, inherit } = {}) {
-  mkdirSync(plaitDir, { recursive: true });
+  makeStateDir(plaitDir);
   sweepDrafts();
   const draft = path.join(plaitDir, `build-${process.pid}`);
   // Taken before, so that a file saved during the build makes the next start build again.
@@ -128,8 +130,12 @@ export async function build({ lifecycle, onLine, inherit } = {}) {
  */
 export async function buildWhenChanged(progress, lifecycle) {
   if (builtStamp() === sourceStamp()) return 'as it was';
-  await build({ lifecycle, onLine: progress });
-  return 'built';
+  const onWait = () => progress('another command is building');
+  return withLock({ file: path.join(plaitDir, 'build.lock'), lifecycle, onWait }, async () => {
+    if (builtStamp() === sourceStamp()) return 'as it was';
+    await build({ lifecycle, onLine: progress });
+    return 'built';
+  });
 }
 
 /**

@@ -1,9 +1,9 @@
-import { chmodSync, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
-import { explainSystemError, LaunchError, notAllowed } from './messages.mjs';
+import { LaunchError } from './messages.mjs';
 import { findNpm } from './npm-parent.mjs';
-import { plaitDir, shown } from './paths.mjs';
 import { endProcess, findByEnvironment, identify, isSameAlive } from './processes.mjs';
+import { makeStateDir } from './state-dir.mjs';
 
 /** Marks every process that belongs to a launch, so that the next one finds what a kill -9 left behind. */
 const MARK = 'PLAIT_LAUNCH';
@@ -21,18 +21,6 @@ const HOLDER_ENDING = /** @type {const} */ ([
 /** @param {string} stateDir @returns {Record<string, string>} */
 export function markOf(stateDir) {
   return { [MARK]: stateDir };
-}
-
-/** Makes the state folder; others may pass through it, to the database, and read nothing. @param {string} stateDir */
-function makeStateDir(stateDir) {
-  try {
-    for (const folder of [plaitDir, stateDir]) {
-      if (!existsSync(folder)) mkdirSync(folder);
-      chmodSync(folder, 0o711);
-    }
-  } catch (error) {
-    throw new LaunchError(explainSystemError(error) ?? notAllowed(shown(stateDir)));
-  }
 }
 
 /**

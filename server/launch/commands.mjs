@@ -100,8 +100,7 @@ export function npm(args) {
  * @param {NodeJS.ProcessEnv} [extra] @returns {NodeJS.ProcessEnv}
  */
 export function cleanEnvironment(extra = {}) {
-  const ours =
-    /^(npm_(lifecycle|package|config_(?!registry|cafile|cache|userconfig|https?_?proxy|noproxy|proxy))|PG[A-Z]+$)/;
+  const ours = /^(npm_(lifecycle|package)_|PG[A-Z]+$)/;
   const kept = Object.entries(process.env).filter(([name]) => !ours.test(name));
   return { ...Object.fromEntries(kept), ...extra };
 }

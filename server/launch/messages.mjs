@@ -71,7 +71,7 @@ const OUTPUT_PATTERNS = [
     sentence: 'package.json and package-lock.json differ: run "npm install", then the same command again.',
   },
   {
-    pattern: /npm (error|ERR!)[^]*(ENOTFOUND|EAI_AGAIN|ETIMEDOUT|ECONNRESET|ECONNREFUSED|network)/,
+    pattern: /npm (error|ERR!)[\s\S]*(ENOTFOUND|EAI_AGAIN|ETIMEDOUT|ECONNRESET|ECONNREFUSED|network)/,
     sentence: 'The npm registry could not be reached: check the network, then run the same command again.',
   },
   {

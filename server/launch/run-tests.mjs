@@ -7,10 +7,11 @@ import { cleanEnvironment, npm, tryCommand } from './commands.mjs';
 import { installPackages } from './install.mjs';
 import { createLifecycle } from './lifecycle.mjs';
 import { explain, LaunchError, Stopped } from './messages.mjs';
-import { packageFile } from './paths.mjs';
+import { packageFile, plaitDir } from './paths.mjs';
 import { startThrowAwayCluster } from './postgres.mjs';
 import { findPrograms } from './postgres-programs.mjs';
 import { makeScratch } from './scratch.mjs';
+import { makeStateDir } from './state-dir.mjs';
 import { createSteps } from './steps.mjs';
 import { planTests } from './test-plan.mjs';
 import { sumTallies, tallyReport } from './test-report.mjs';
@@ -100,6 +101,7 @@ async function runAll(run, args, tallies) {
   /** @type {NodeJS.ProcessEnv} */
   const found = {};
 
+  makeStateDir(plaitDir);
   await steps.step('npm packages', (progress) => installPackages(progress, lifecycle));
   if (hasDatabase) {
     await steps.step('Test database', async (progress) => {

@@ -34,7 +34,7 @@ export const questions: Migration = {
         tier text CHECK (tier IN ('foundation', 'higher')),
         option text,
         body jsonb NOT NULL,
-        -- Wording and scheme in one plain string, for the list's search.
+        -- Wording and scheme in one plain string in lower case, for the list's search.
         search_text text NOT NULL,
         excerpt text NOT NULL,
         max_marks integer NOT NULL CHECK (max_marks >= 0),
@@ -46,7 +46,8 @@ export const questions: Migration = {
         sent_at timestamptz,
         live_at timestamptz,
         PRIMARY KEY (school_id, id),
-        UNIQUE (school_id, question_id, version),
+        -- The list counts a subject's questions by state, kind and author from this index alone.
+        UNIQUE (school_id, question_id, version) INCLUDE (status, kind, author_id),
         -- Lets a set item name a question and one of its own versions, never another's.
         UNIQUE (school_id, question_id, id),
         FOREIGN KEY (school_id, question_id) REFERENCES questions (school_id, id),

@@ -67,7 +67,7 @@ export const practice: Migration = {
         FOREIGN KEY (school_id, topic_id) REFERENCES topics (school_id, id)
       );
       CREATE INDEX answers_by_student ON answers (school_id, user_id, question_id, given_at);
-      CREATE INDEX answers_by_version ON answers (school_id, question_version_id);
+      CREATE INDEX answers_by_version ON answers (school_id, question_version_id) INCLUDE (id, user_id, seconds);
       -- A mark is an event: marking again adds one and the newest counts.
       CREATE TABLE mark_events (
         school_id uuid NOT NULL,
@@ -83,7 +83,7 @@ export const practice: Migration = {
         max_marks integer NOT NULL CHECK (max_marks >= marks),
         marked_at timestamptz NOT NULL,
         PRIMARY KEY (school_id, id),
-        UNIQUE (school_id, answer_id, sequence),
+        UNIQUE (school_id, answer_id, sequence) INCLUDE (marks, max_marks),
         FOREIGN KEY (school_id, answer_id) REFERENCES answers (school_id, id),
         FOREIGN KEY (school_id, marked_by) REFERENCES users (school_id, id)
       );

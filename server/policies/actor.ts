@@ -14,7 +14,7 @@ export interface Actor {
   schoolId: string;
   name: string;
   memberships: ActorMembership[];
-  /** Classes they teach. */
+  /** Classes they teach, in subjects they work in today. */
   classIds: string[];
   /** Students they are a linked carer of. */
   childIds: string[];

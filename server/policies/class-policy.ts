@@ -6,7 +6,8 @@ export interface ClassFacts {
   subjectId: string;
 }
 
-const teachesIt = (actor: Actor, { classId }: ClassFacts) => actor.classIds.includes(classId);
+const teachesIt = (actor: Actor, { classId, subjectId }: ClassFacts) =>
+  actor.classIds.includes(classId) && worksIn(actor, subjectId);
 
 /** A teaching group: its own teachers, and the head of its department. */
 export const classPolicy = {

@@ -46,6 +46,19 @@ export type TopicDto = z.output<typeof topicSchema>;
 /** A subject's topics: bounded by the specification, a few hundred at most. */
 export const topicListSchema = z.object({ items: z.array(topicSchema).max(500) });
 
+/** A topic as a head of department adds it. The client makes the id, so that a retried request adds it once. */
+export const createTopicSchema = z.strictObject({
+  id: z.uuid(),
+  specificationId: z.uuid(),
+  parentId: z.uuid().nullable(),
+  number: z.string().trim().min(1, 'Give the topic its number.').max(20),
+  title: z.string().trim().min(1, 'Give the topic a title.').max(200),
+  tier: tierSchema.nullable(),
+  /** Marks that the topic usually carries in each paper. */
+  weights: z.array(z.strictObject({ paperId: z.uuid(), marks: z.int().min(0).max(500) })).max(20),
+});
+export type CreateTopic = z.output<typeof createTopicSchema>;
+
 export const taughtParamsSchema = z.object({ classId: z.uuid(), topicId: z.uuid() });
 export const setTaughtSchema = z.strictObject({ taughtOn: daySchema.nullable() });
 

@@ -50,7 +50,14 @@ function PhoneMenu({ places, pathname }: { places: Place[]; pathname: string }) 
   const { isOpen, frame, button, toggle, close } = useDisclosure();
   return (
     <div ref={frame} className="relative md:hidden">
-      <button ref={button} type="button" className="btn quiet" aria-expanded={isOpen} aria-controls="menu" onClick={toggle}>
+      <button
+        ref={button}
+        type="button"
+        className="btn quiet"
+        aria-expanded={isOpen}
+        aria-controls="menu"
+        onClick={toggle}
+      >
         Menu
       </button>
       <ul

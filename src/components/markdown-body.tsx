@@ -42,12 +42,7 @@ export function MarkdownBody({ source, isInline }: { source: string; isInline: b
   return (
     <ReactMarkdown
       remarkPlugins={[remarkMath]}
-      rehypePlugins={[
-        [rehypeSanitize, schema],
-        rehypeRefuseFormulas,
-        [rehypeKatex, katexOptions],
-        rehypeFormulaErrors,
-      ]}
+      rehypePlugins={[[rehypeSanitize, schema], rehypeRefuseFormulas, [rehypeKatex, katexOptions], rehypeFormulaErrors]}
       urlTransform={allowedUrl}
       components={isInline ? inlineParts : blockParts}
     >

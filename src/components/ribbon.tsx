@@ -40,7 +40,19 @@ function strokesOf(lobe: Lobe, size: RibbonSize, surface: string, tint: number):
   ];
 }
 
-function Strand({ lobe, size, surface, tint, mask }: { lobe: Lobe; size: RibbonSize; surface: string; tint: number; mask: string | undefined }) {
+function Strand({
+  lobe,
+  size,
+  surface,
+  tint,
+  mask,
+}: {
+  lobe: Lobe;
+  size: RibbonSize;
+  surface: string;
+  tint: number;
+  mask: string | undefined;
+}) {
   return (
     <g mask={mask}>
       {strokesOf(lobe, size, surface, tint).map(({ stroke, width }) => (
@@ -114,7 +126,9 @@ export const Ribbon = memo(function Ribbon(props: RibbonProps) {
       style={{ maxWidth: width, height: 'auto', fontFamily: 'var(--font-text)' }}
       fill="none"
       strokeLinecap="round"
-      {...(name ? { role: 'img', 'aria-label': ribbonWords(name, items) } : { 'aria-hidden': true })}
+      role="img"
+      aria-label={name ? ribbonWords(name, items) : undefined}
+      aria-hidden={name ? undefined : true}
     >
       <defs>
         {lobes.map((lobe, index) =>
@@ -147,7 +161,12 @@ export const Ribbon = memo(function Ribbon(props: RibbonProps) {
       ))}
       <g stroke="none">
         {lobes.map((lobe) => (
-          <LobeText key={lobe.body.slice(0, 16)} lobe={lobe} hasLabel={hasLabel} fontSize={size.width >= 24 ? 12 : 11} />
+          <LobeText
+            key={lobe.body.slice(0, 16)}
+            lobe={lobe}
+            hasLabel={hasLabel}
+            fontSize={size.width >= 24 ? 12 : 11}
+          />
         ))}
       </g>
     </svg>

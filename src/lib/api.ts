@@ -55,10 +55,21 @@ async function problemOf(response: Response): Promise<ProblemError | NetworkErro
   // A proxy or a captive portal answered, not Plait.
   if (response.status >= 502) return new NetworkError('The server could not be reached.');
   const { status } = response;
-  return new ProblemError({ type: '/problems/unreadable', title: 'Failed', status, detail: `The server answered ${status}.` });
+  return new ProblemError({
+    type: '/problems/unreadable',
+    title: 'Failed',
+    status,
+    detail: `The server answered ${status}.`,
+  });
 }
 
-async function call<S extends z.ZodType>(method: Method, path: string, body: unknown, schema: S | undefined, signal?: AbortSignal) {
+async function call<S extends z.ZodType>(
+  method: Method,
+  path: string,
+  body: unknown,
+  schema: S | undefined,
+  signal?: AbortSignal,
+) {
   const response = await request(method, path, body, signal);
   if (!response.ok) throw await problemOf(response);
   if (!schema) return undefined;

@@ -5,7 +5,8 @@ import { dayWords, longDayWords } from '#shared/domain/time/words.ts';
 export const dayMonthWords = (day: string): string => dayWords(day).slice(4);
 
 /** "13 May 2027". */
-export const dateWords = (day: string): string => `${longDayWords(day).split(' ').slice(1).join(' ')} ${day.slice(0, 4)}`;
+export const dateWords = (day: string): string =>
+  `${longDayWords(day).split(' ').slice(1).join(' ')} ${day.slice(0, 4)}`;
 
 const clocks = new Map<string, Intl.DateTimeFormat>();
 

@@ -14,7 +14,9 @@ const ALLOWED = new Set([
   ...list('left right middle big Big bigg Bigg bigl bigr Bigl Bigr biggl biggr Biggl Biggr bigm Bigm'),
   ...list('lfloor rfloor lceil rceil langle rangle lvert rvert lVert rVert lbrace rbrace lbrack rbrack vert Vert'),
   ...list('begin end hline quad qquad thinspace medspace thickspace enspace limits nolimits displaystyle textstyle'),
-  ...list('scriptstyle scriptscriptstyle text textbf textit textrm textsf texttt textnormal mathrm mathbf mathit mathsf'),
+  ...list(
+    'scriptstyle scriptscriptstyle text textbf textit textrm textsf texttt textnormal mathrm mathbf mathit mathsf',
+  ),
   ...list('mathtt mathbb mathcal mathfrak mathscr boldsymbol bm pmb operatorname'),
   ...list('alpha beta gamma delta epsilon varepsilon zeta eta theta vartheta iota kappa lambda mu nu xi pi varpi rho'),
   ...list('varrho sigma varsigma tau upsilon phi varphi chi psi omega Gamma Delta Theta Lambda Xi Pi Sigma Upsilon'),
@@ -22,7 +24,9 @@ const ALLOWED = new Set([
   ...list('times div pm mp cdot ast star circ bullet oplus otimes cup cap setminus land lor lnot neg wedge vee'),
   ...list('le leq ge geq lt gt ne neq approx equiv sim simeq cong propto ll gg subset supset subseteq supseteq in ni'),
   ...list('notin parallel perp mid nmid prec succ'),
-  ...list('to gets rightarrow leftarrow leftrightarrow Rightarrow Leftarrow Leftrightarrow longrightarrow longleftarrow'),
+  ...list(
+    'to gets rightarrow leftarrow leftrightarrow Rightarrow Leftarrow Leftrightarrow longrightarrow longleftarrow',
+  ),
   ...list('Longrightarrow implies iff mapsto uparrow downarrow rightleftharpoons leftrightharpoons xrightarrow'),
   ...list('xleftarrow xrightleftharpoons rightharpoonup'),
   ...list('sum prod int iint oint lim sin cos tan cosec csc sec cot arcsin arccos arctan sinh cosh tanh log ln lg exp'),
@@ -33,7 +37,9 @@ const ALLOWED = new Set([
 ]);
 
 const ENVIRONMENTS = new Set(
-  list('matrix pmatrix bmatrix Bmatrix vmatrix Vmatrix array aligned alignedat gathered cases rcases split smallmatrix align align* gather'),
+  list(
+    'matrix pmatrix bmatrix Bmatrix vmatrix Vmatrix array aligned alignedat gathered cases rcases split smallmatrix align align* gather',
+  ),
 );
 
 /** Why a formula is not drawn, in words, or null where it may be. */

@@ -35,7 +35,9 @@ export const queryClient = new QueryClient({
 });
 
 /** Reads anew what has gone stale; what is held serves where the server cannot be reached. */
-export async function loadFresh<Data, Key extends QueryKey>(options: FetchQueryOptions<Data, Error, Data, Key>): Promise<Data> {
+export async function loadFresh<Data, Key extends QueryKey>(
+  options: FetchQueryOptions<Data, Error, Data, Key>,
+): Promise<Data> {
   try {
     return await queryClient.fetchQuery(options);
   } catch (error) {

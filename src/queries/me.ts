@@ -1,11 +1,5 @@
 import { queryOptions, useMutation, useSuspenseQuery } from '@tanstack/react-query';
-import {
-  type ChangePassword,
-  type MeDto,
-  meSchema,
-  type SignIn,
-  signInPageSchema,
-} from '#shared/schemas/auth.ts';
+import { type ChangePassword, type MeDto, meSchema, type SignIn, signInPageSchema } from '#shared/schemas/auth.ts';
 import { api } from '#src/lib/api.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 

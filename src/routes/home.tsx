@@ -32,8 +32,8 @@ export function Component() {
           What you can see
         </h2>
         <p className="max-w-[36rem]">
-          So far this page only. The pages for your role are still being built; nothing is waiting for you, and nothing is
-          lost by coming back later.
+          So far this page only. The pages for your role are still being built; nothing is waiting for you, and nothing
+          is lost by coming back later.
         </p>
       </section>
     </div>

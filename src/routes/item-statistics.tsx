@@ -15,6 +15,7 @@ import { readPage, usePageLinks } from '#src/lib/cursor-pages.ts';
 import { rangeWords } from '#src/lib/figures.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
+import { subjectLang } from '#src/lib/subject-words.ts';
 import { subjectsQuery, topicsQuery } from '#src/queries/curriculum.ts';
 import { itemStatisticsQuery } from '#src/queries/statistics.ts';
 
@@ -116,11 +117,7 @@ function SubjectStatistics({ subject, subjects }: { subject: SubjectDto; subject
       ) : null}
       {page && page.items.length > 0 ? (
         <>
-          <ItemTable
-            rows={page.items}
-            lang={subject.strand === 'fr' ? 'fr' : undefined}
-            isBusy={list.isPlaceholderData}
-          />
+          <ItemTable rows={page.items} lang={subjectLang(subject)} isBusy={list.isPlaceholderData} />
           <Pager words={words} {...links} />
         </>
       ) : null}

@@ -34,7 +34,12 @@ export function Component() {
       <p className="text-ink-2 text-md mt-1.5 mb-7 max-w-[36rem]">
         Other devices on which you are signed in are signed out.
       </p>
-      <form className="grid gap-5 max-w-[25rem]" onSubmit={(event) => void submit(event)} noValidate aria-label="Change password">
+      <form
+        className="grid gap-5 max-w-[25rem]"
+        onSubmit={(event) => void submit(event)}
+        noValidate
+        aria-label="Change password"
+      >
         {errors.root ? (
           <p role="alert" className="note gap">
             {errors.root.message}
@@ -43,7 +48,15 @@ export function Component() {
         <p role="status" className={isChanged ? 'note' : 'sr-only'}>
           {isChanged ? 'Saved. Use the new password from now on.' : ''}
         </p>
-        <input type="text" className="hidden" autoComplete="username" value={me.username} readOnly tabIndex={-1} aria-hidden="true" />
+        <input
+          type="text"
+          className="hidden"
+          autoComplete="username"
+          value={me.username}
+          readOnly
+          tabIndex={-1}
+          aria-hidden="true"
+        />
         <PasswordField
           label="Password now"
           autoComplete="current-password"

@@ -64,7 +64,9 @@ export function Component() {
       {page && page.items.length > 0 ? (
         <>
           <ReviewQueue rows={page.items} zone={zone} hasSubjects={subjects.length > 1} />
-          <Pager words={rangeWords(from, page.items.length, page.total)} {...links} />
+          {links.previous || links.next ? (
+            <Pager words={rangeWords(from, page.items.length, page.total)} {...links} />
+          ) : null}
         </>
       ) : null}
     </div>

@@ -1,5 +1,5 @@
 import { Link, type LoaderFunctionArgs, redirect, useLoaderData } from 'react-router-dom';
-import { setKindWords, type SetKind, type TodaySetDto } from '#shared/schemas/practice.ts';
+import { type SetKind, setKindWords, type TodaySetDto } from '#shared/schemas/practice.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { ProblemError } from '#src/lib/api.ts';
 import { clockWords } from '#src/lib/dates.ts';

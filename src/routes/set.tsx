@@ -21,10 +21,7 @@ export function Component() {
   const navigate = useNavigate();
   const [search, setSearch] = useSearchParams();
   const wanted = Number.parseInt(search.get('q') ?? '', 10);
-  const showPlace = useCallback(
-    (number: number) => setSearch({ q: String(number) }, { replace: true }),
-    [setSearch],
-  );
+  const showPlace = useCallback((number: number) => setSearch({ q: String(number) }, { replace: true }), [setSearch]);
   const showSummary = ({ breakMinutes }: SetSummaryDto) =>
     void navigate(`/sets/${id}/summary`, { replace: true, state: { breakEndsAt: Date.now() + breakMinutes * 60_000 } });
   return (

@@ -1,5 +1,12 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { Link, type LoaderFunctionArgs, useNavigate, useParams, useRouteError, useSearchParams } from 'react-router-dom';
+import {
+  Link,
+  type LoaderFunctionArgs,
+  useNavigate,
+  useParams,
+  useRouteError,
+  useSearchParams,
+} from 'react-router-dom';
 import { DemoPeople } from '#src/features/sign-in/demo-people.tsx';
 import { SignInForm } from '#src/features/sign-in/sign-in-form.tsx';
 import { SignInFrame } from '#src/features/sign-in/sign-in-frame.tsx';

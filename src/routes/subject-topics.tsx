@@ -6,6 +6,7 @@ import { StrandLabel } from '#src/components/strand-label.tsx';
 import { SubjectChoice } from '#src/components/subject-choice.tsx';
 import { TopicList } from '#src/features/curriculum/topic-list.tsx';
 import { queryClient } from '#src/lib/query-client.ts';
+import { subjectWords } from '#src/lib/subject-words.ts';
 import { subjectsQuery, topicsQuery } from '#src/queries/curriculum.ts';
 
 export async function loader({ params }: LoaderFunctionArgs) {
@@ -46,7 +47,7 @@ export function Component() {
         />
       </div>
       {topics.length === 0 ? (
-        <EmptyState title={`No topics in ${subject.name} yet`}>
+        <EmptyState title={`No topics in ${subjectWords(subject.name)} yet`}>
           Questions, gaps and planning all hang on the topics of your specification. The head of department lists them.
         </EmptyState>
       ) : (
@@ -68,7 +69,7 @@ export function Component() {
       ) : null}
       <p className="text-sm">
         <Link className="link" to={`/questions?subject=${subject.id}`}>
-          All questions in {subject.name}
+          All questions in {subjectWords(subject.name)}
         </Link>
       </p>
     </div>

@@ -3,7 +3,7 @@ import pg from 'pg';
 import supertest from 'supertest';
 import type TestAgent from 'supertest/lib/agent.js';
 import { afterAll } from 'vitest';
-import { FACTORY_PASSWORD } from '#seeds/factories/people.ts';
+import { FACTORY_PASSWORD } from '#seeds/factories/password.ts';
 import { createApp } from '#server/app.ts';
 import { readConfig } from '#server/config.ts';
 import { sequelize } from '#server/db/sequelize.ts';

@@ -43,7 +43,11 @@ export async function loadScope(scope: SchoolScope, userId: string): Promise<Sco
           FROM memberships m
           WHERE m.user_id = u.id AND m.valid_from <= day.today AND (m.valid_to IS NULL OR m.valid_to >= day.today)),
         '[]') AS memberships,
-       ARRAY(SELECT t.class_id FROM class_teachers t WHERE t.user_id = u.id) AS class_ids,
+       -- A class counts for as long as the role in its subject does: what is left of an ended one reaches nobody.
+       ARRAY(SELECT t.class_id FROM class_teachers t JOIN classes c ON c.id = t.class_id
+          WHERE t.user_id = u.id AND EXISTS (SELECT 1 FROM memberships m
+            WHERE m.user_id = u.id AND m.subject_id = c.subject_id AND m.role IN ('teacher', 'headOfDepartment')
+              AND m.valid_from <= day.today AND (m.valid_to IS NULL OR m.valid_to >= day.today))) AS class_ids,
        ARRAY(SELECT l.student_id FROM carer_links l WHERE l.carer_id = u.id) AS child_ids
      FROM users u, schools s, LATERAL (SELECT ($2::timestamptz AT TIME ZONE s.zone)::date AS today) day
      WHERE u.id = $1 AND u.disabled_at IS NULL`,

@@ -1,5 +1,5 @@
 import argon2 from 'argon2';
-import { Problem } from '#server/errors.ts';
+import { busy } from '#server/errors.ts';
 
 /** OWASP Password Storage Cheat Sheet, argon2id minimum: 19 MiB, two passes, one lane. */
 const PARAMETERS = { type: argon2.argon2id, memoryCost: 19_456, timeCost: 2, parallelism: 1 } as const;
@@ -14,9 +14,7 @@ const waiting: (() => void)[] = [];
 async function inTurn<T>(work: () => Promise<T>): Promise<T> {
   if (running >= AT_ONCE) {
     if (waiting.length >= QUEUE) {
-      throw new Problem(503, 'busy', 'Many people are signing in at once. Try again in a few seconds.', {
-        retryAfterSeconds: 5,
-      });
+      throw busy('Many people are signing in at once. Try again in a few seconds.');
     }
     await new Promise<void>((go) => waiting.push(go));
   }

@@ -38,7 +38,7 @@ export interface LoadedCandidate extends Candidate {
  * live questions of the tier, with memory states and today's answers. A topic whose papers have all been sat is
  * over; one without any sitting is worked towards the season's end.
  */
-const CANDIDATES = `
+export const CANDIDATES = `
   WITH entry AS (
     SELECT c.id AS class_id, c.specification_id, c.subject_id, e.tier, e.option
     FROM enrolments e JOIN classes c ON c.id = e.class_id

@@ -1,6 +1,6 @@
+import type { z } from 'zod';
 import type { FieldError } from '#server/errors.ts';
 import { markPart } from '#shared/domain/marking/mark-part.ts';
-import type { z } from 'zod';
 import { reviewableSchema } from '#shared/schemas/question.ts';
 import type { QuestionBody, QuestionKind, QuestionPart } from '#shared/schemas/question-body.ts';
 

@@ -11,20 +11,20 @@ export interface NextFacts {
   paper: { title: string; on: string } | null;
 }
 
-/** What happens next with a question, after its mark: when it comes back, and before which paper. */
+/** What happens next with a question, after its mark: about when it comes back, and when its paper is. */
 export function nextWords({ marks, maxMarks, howSure, returnsOn, paper }: NextFacts): string {
-  const missed = maxMarks - marks;
-  const cause = causeWords(missed, maxMarks, howSure);
-  if (returnsOn === null)
+  const cause = causeWords(maxMarks - marks, maxMarks, howSure);
+  if (returnsOn === null) {
     return `${cause}${cause ? 'and this' : 'This'} was the last look before ${paper?.title ?? 'the exam'}.`;
-  const back = `${cause ? 'so this' : 'This'} comes back about ${longDayWords(returnsOn)}`;
-  const before = paper ? `, and again before ${paper.title} on ${longDayWords(paper.on)}` : '';
-  return `${cause}${back}${before}.`;
+  }
+  const back = `${cause}${cause ? 'so this' : 'This'} comes back about ${longDayWords(returnsOn)}.`;
+  return paper ? `${back} ${paper.title} is on ${longDayWords(paper.on)}.` : back;
 }
 
+/** Why it comes back, as the opening of the sentence; empty where every mark was earned. */
 function causeWords(missed: number, maxMarks: number, howSure: HowSure): string {
   if (missed === 0) return '';
   if (howSure === 'certain') return `You were certain and dropped ${missed === 1 ? 'a mark' : `${missed} marks`}, `;
-  if (missed === maxMarks) return 'No marks yet, ';
-  return `${missed === 1 ? 'A mark was' : `${missed} marks were`} missed, `;
+  if (missed === maxMarks) return 'No marks this time, ';
+  return `${missed === 1 ? 'One mark was' : `${missed} marks were`} missed, `;
 }

@@ -1,5 +1,7 @@
 import { useId, useState } from 'react';
 import type { TopicDto } from '#shared/schemas/curriculum.ts';
+import { useToast } from '#src/components/toast.tsx';
+import { dateWords } from '#src/lib/dates.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { useSetTaught } from '#src/queries/curriculum.ts';
 
@@ -17,6 +19,7 @@ export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProp
   const set = useSetTaught(subjectId);
   // Null while the field shows what is saved.
   const [typed, setTyped] = useState<string | null>(null);
+  const toast = useToast();
   const saved = row.taughtOn ?? '';
   const save = () => {
     if (typed === null || typed === saved) {
@@ -25,15 +28,23 @@ export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProp
     }
     set.mutate(
       { classId: row.classId, topicId: topic.id, taughtOn: typed || null },
-      { onSuccess: () => setTyped(null) },
+      {
+        onSuccess: () => {
+          setTyped(null);
+          toast(
+            typed
+              ? `Saved. ${row.className} was taught ${topic.title} on ${dateWords(typed)}.`
+              : `Saved. ${row.className} has no date for ${topic.title}.`,
+          );
+        },
+      },
     );
   };
-  const said = set.isPending ? 'Saving…' : set.isError ? problemWords(set.error) : set.isSuccess ? 'Saved' : '';
   return (
     <div className="min-w-0">
       <label htmlFor={id} className={hasLabel ? 'text-sm font-medium' : 'sr-only'}>
         {row.className}
-        <span className="sr-only">, {topic.title}, taught on</span>
+        <span className="sr-only">, {topic.title},</span> taught on
       </label>
       <input
         id={id}
@@ -41,7 +52,8 @@ export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProp
         className={`inp sm num max-md:!min-h-11 ${set.isError ? 'bad' : ''}`}
         value={typed ?? saved}
         aria-invalid={set.isError ? true : undefined}
-        aria-describedby={`${id}-said`}
+        aria-describedby={set.isError ? `${id}-error` : undefined}
+        aria-busy={set.isPending}
         onChange={(event) => {
           setTyped(event.target.value);
           if (!set.isIdle) set.reset();
@@ -51,9 +63,11 @@ export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProp
           if (event.key === 'Enter') save();
         }}
       />
-      <p id={`${id}-said`} role="status" className={`min-h-4 text-xs ${set.isError ? 'err' : 'text-ink-2'}`}>
-        {said}
-      </p>
+      {set.isError ? (
+        <p id={`${id}-error`} role="alert" className="err mt-1">
+          {problemWords(set.error)}
+        </p>
+      ) : null}
     </div>
   );
 }

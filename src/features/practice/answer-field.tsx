@@ -54,7 +54,9 @@ export function AnswerField({ part, index, isOnly, value, onChange, isDisabled, 
             </span>
           ) : null}
         </div>
-        {part.lines > 2 ? <p className="hint mt-2 text-right">Do your working on paper. Type only the answer.</p> : null}
+        {part.lines > 2 ? (
+          <p className="hint mt-2 text-right">Do your working on paper. Type only the answer.</p>
+        ) : null}
       </div>
     );
   }

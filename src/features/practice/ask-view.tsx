@@ -79,7 +79,9 @@ export function AskView(props: AskViewProps) {
                 lang={langOf(item)}
                 value={draft.responses[index] ?? ''}
                 isDisabled={isSending}
-                onChange={(text) => change({ responses: parts.map((_, at) => (at === index ? text : (draft.responses[at] ?? ''))) })}
+                onChange={(text) =>
+                  change({ responses: parts.map((_, at) => (at === index ? text : (draft.responses[at] ?? ''))) })
+                }
               />
             )}
           />

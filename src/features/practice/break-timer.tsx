@@ -36,7 +36,13 @@ function WaveTimer({ share }: { share: number }) {
     <svg viewBox="0 0 300 34" className="w-full" fill="none" strokeLinecap="round" aria-hidden="true">
       <path d={WAVE} style={{ stroke: 'var(--rule)' }} strokeWidth="8" />
       {share > 0 ? (
-        <path d={WAVE} pathLength={1} strokeDasharray={`${share} 2`} style={{ stroke: 'var(--accent)' }} strokeWidth="8" />
+        <path
+          d={WAVE}
+          pathLength={1}
+          strokeDasharray={`${share} 2`}
+          style={{ stroke: 'var(--accent)' }}
+          strokeWidth="8"
+        />
       ) : null}
     </svg>
   );

@@ -37,8 +37,8 @@ export function RunnerNotes({ away, waiting, marked, refusal, isAlready }: Runne
       {away ? (
         <Note tone="cau">
           <p>
-            <b>{away === 'offline' ? 'You are offline.' : 'Plait is busy.'}</b> Your answers are kept on this device and sent
-            when {away === 'offline' ? 'you are back' : 'it has time'}.{waitingWords(waiting)}
+            <b>{away === 'offline' ? 'You are offline.' : 'Plait is busy.'}</b> Your answers are kept on this device and
+            sent when {away === 'offline' ? 'you are back' : 'it has time'}.{waitingWords(waiting)}
           </p>
         </Note>
       ) : null}
@@ -66,8 +66,8 @@ export function RunnerNotes({ away, waiting, marked, refusal, isAlready }: Runne
       {isAlready ? (
         <Note tone="cau">
           <p>
-            <b>You had already answered this question</b> in another tab or on another device. That answer counts, and it
-            is the one shown.
+            <b>You had already answered this question</b> in another tab or on another device. That answer counts, and
+            it is the one shown.
           </p>
         </Note>
       ) : null}

@@ -18,7 +18,9 @@ function Notes({ set, control }: { set: SetDto; control: RunnerControl }) {
     <>
       <RunnerNotes
         away={away}
-        waiting={set.items.flatMap(({ id }, index) => (waiting.some((entry) => entry.setItemId === id) ? [index + 1] : []))}
+        waiting={set.items.flatMap(({ id }, index) =>
+          waiting.some((entry) => entry.setItemId === id) ? [index + 1] : [],
+        )}
         marked={set.items.flatMap(({ id, result }, index) =>
           passedIds.includes(id) && result && index !== place
             ? [{ number: index + 1, onOpen: () => goOn(null, index) }]

@@ -37,7 +37,12 @@ function TickRow({ point, isOn, onChange }: { point: SchemePoint; isOn: boolean;
     <li>
       <label className={`mtick cursor-pointer ${isOn ? 'on' : ''}`}>
         <span className="box has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-focus">
-          <input type="checkbox" className="sr-only" checked={isOn} onChange={(event) => onChange(event.target.checked)} />
+          <input
+            type="checkbox"
+            className="sr-only"
+            checked={isOn}
+            onChange={(event) => onChange(event.target.checked)}
+          />
           {isOn ? <Tick isDrawn /> : null}
         </span>
         <span className="text-md leading-[1.6rem] min-w-0">
@@ -104,7 +109,9 @@ export function SelfMarkView({ item, number, result, kept, isSending, onTicks, o
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus({ preventScroll: true }), []);
   const change = (at: number, index: number, isOn: boolean) => {
-    const next = ticks.map((row, part) => (part === at ? row.map((was, point) => (point === index ? isOn : was)) : row));
+    const next = ticks.map((row, part) =>
+      part === at ? row.map((was, point) => (point === index ? isOn : was)) : row,
+    );
     setTicks(next);
     onTicks(next);
   };

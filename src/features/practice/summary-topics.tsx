@@ -1,7 +1,7 @@
 import type { SetSummaryDto } from '#shared/schemas/practice.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
-import { keyed } from '#src/lib/keyed.ts';
 import { returnWords } from '#src/lib/dates.ts';
+import { keyed } from '#src/lib/keyed.ts';
 
 type Row = SetSummaryDto['topics'][number];
 
@@ -69,7 +69,10 @@ export function SummaryTopics({ topics, today }: { topics: Row[]; today: string 
           </thead>
           <tbody>
             {keyed(bySubject(topics), ({ row }) => row.topic.id).map(({ key, item: { row, isFirst } }) => (
-              <tr key={key} className="border-b border-rule-soft max-sm:grid max-sm:grid-cols-[2.5rem_minmax(0,1fr)_auto]">
+              <tr
+                key={key}
+                className="border-b border-rule-soft max-sm:grid max-sm:grid-cols-[2.5rem_minmax(0,1fr)_auto]"
+              >
                 <td className="py-2 max-sm:row-span-2">
                   {isFirst ? <StrandLabel subject={row.subject} /> : null}
                   <span className="sr-only">{row.subject.name}</span>
@@ -91,7 +94,9 @@ export function SummaryTopics({ topics, today }: { topics: Row[]; today: string 
             ))}
           </tbody>
         </table>
-        <p className="hint mt-3">Expected recall is an estimate of what you would remember now, before the set and after it.</p>
+        <p className="hint mt-3">
+          Expected recall is an estimate of what you would remember now, before the set and after it.
+        </p>
       </div>
     </section>
   );

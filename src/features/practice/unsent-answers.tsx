@@ -7,8 +7,8 @@ function UnsentSet({ userId, setId }: { userId: string; setId: string }) {
   return (
     <p className="note cau mx-5 md:mx-10 mt-4">
       {away ? <b>{away === 'offline' ? 'You are offline. ' : 'Plait is busy. '}</b> : null}
-      {waiting.length === 1 ? 'One answer is' : `${waiting.length} answers are`} kept on this device and sent when you are
-      back.
+      {waiting.length === 1 ? 'One answer is' : `${waiting.length} answers are`} kept on this device and sent when you
+      are back.
     </p>
   );
 }

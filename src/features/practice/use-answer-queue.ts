@@ -52,7 +52,10 @@ export function useAnswerQueue(userId: string, setId: string, onRefused: (refusa
           await sendOne(setId, entry);
         } catch (error) {
           if (isSignedOut(error) || isTransient(error)) throw error;
-          refused.current({ entry, words: error instanceof ProblemError ? error.detail : 'The server did not take it.' });
+          refused.current({
+            entry,
+            words: error instanceof ProblemError ? error.detail : 'The server did not take it.',
+          });
         }
         queue.remove(entry.body.id);
         failures.current = 0;

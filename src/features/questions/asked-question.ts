@@ -40,3 +40,18 @@ export function tryAnswer(part: DraftPart, answer: string): PartVerdict | null {
   const spec = answerSpecSchema.safeParse(part.answer);
   return spec.success ? markPart({ answer: spec.data, points: part.points }, answer) : null;
 }
+
+/** Which answers Plait gives the marks, as a reviewer reads it. Null where the student decides. */
+export function specWords({ answer }: DraftPart): string | null {
+  if (answer.kind === 'selfMarked') return null;
+  if (answer.kind === 'number') {
+    const unit = answer.unit ? ` ${answer.unit}` : '';
+    const size = answer.range
+      ? `${answer.range.min ?? '…'} to ${answer.range.max ?? '…'}${unit}`
+      : `${answer.value ?? '…'}${unit}${answer.tolerance ? `, give or take ${answer.tolerance}` : ' exactly'}`;
+    return `Accepts ${size}.${answer.isUnitRequired ? ' The student types the unit.' : ''}`;
+  }
+  const rejects = answer.reject?.length ? ` Rejects ${answer.reject.join('; ')}.` : '';
+  const others = answer.unlisted === 'wrong' ? 'Anything else earns nothing.' : 'The student marks anything else.';
+  return `Accepts ${answer.accept.join('; ')}.${rejects} ${others}`;
+}

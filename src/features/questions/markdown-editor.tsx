@@ -38,7 +38,7 @@ function applyEdit(area: HTMLTextAreaElement, act: MarkdownAct) {
 /** Arrow keys move along a toolbar; Tab leaves it. */
 function moveAlong(event: KeyboardEvent<HTMLDivElement>) {
   const all = [...event.currentTarget.querySelectorAll('button')];
-  const at = all.findIndex((button) => button.matches(":focus"));
+  const at = all.findIndex((button) => button.matches(':focus'));
   const step = { ArrowRight: 1, ArrowLeft: -1 }[event.key];
   const target = event.key === 'Home' ? 0 : event.key === 'End' ? all.length - 1 : step && at + step;
   if (target === undefined || !all[target]) return;

@@ -44,18 +44,18 @@ export function NoteRows({ name, number }: NoteRowsProps) {
           </button>
         </div>
       ))}
-      <div className="mt-0.5 flex gap-4 text-sm">
+      <div className="mt-0.5 flex gap-3 text-sm">
         {kinds.map((kind) => (
           <button
             key={kind}
             type="button"
             id={`${groupId}-${kind}`}
-            className="min-h-7 text-ink-2 underline decoration-edge decoration-dotted underline-offset-3 hover:text-ink hover:decoration-solid disabled:opacity-45 max-md:min-h-11"
+            className="min-h-7 text-ink-2 hover:text-ink hover:underline disabled:opacity-45 max-md:min-h-11"
             aria-label={`Add ${kind} to point ${number}`}
             disabled={fields.filter((note) => note.kind === kind).length >= MOST_OF_A_KIND}
             onClick={() => append({ kind, text: '' }, { focusName: `${name}.${fields.length}.text` })}
           >
-            {noteWords[kind]}
+            + {noteWords[kind]}
           </button>
         ))}
       </div>

@@ -65,7 +65,7 @@ export function PointRow({ part, index, count, hasCodes, onMove, onRemove }: Poi
         max={10}
         className="!min-h-9 text-right"
       />
-      <div className="flex justify-end max-sm:col-span-full max-sm:row-start-3">
+      <div className="flex justify-end max-sm:col-span-full max-sm:row-start-3 max-sm:-mt-12 max-sm:justify-self-end">
         <button
           type="button"
           id={fieldId(`${name}.up`)}

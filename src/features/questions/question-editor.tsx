@@ -7,6 +7,7 @@ import type { QuestionDto } from '#shared/schemas/question.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { useToast } from '#src/components/toast.tsx';
 import { clockWords } from '#src/lib/dates.ts';
+import { subjectLang } from '#src/lib/subject-words.ts';
 import { useMe } from '#src/queries/me.ts';
 import { questionQuery } from '#src/queries/questions.ts';
 import { fieldId, problemsOf, reviewResolver } from './check-question.ts';
@@ -65,7 +66,7 @@ export function QuestionEditor(props: QuestionEditorProps) {
     if (isSubmitted && state.kind === 'saved') void form.trigger();
   }, [isSubmitted, state.kind, form]);
 
-  const lang = subject.strand === 'fr' ? 'fr' : undefined;
+  const lang = subjectLang(subject);
   const savedAt = question ? clockWords(question.current.savedAt, zone) : '';
   return (
     <FormProvider {...form}>
@@ -117,12 +118,16 @@ export function QuestionEditor(props: QuestionEditorProps) {
         </form>
         <section aria-labelledby="preview-title" className="min-w-0">
           <div className="lg:sticky lg:top-4 lg:max-h-[calc(100dvh-2rem)] lg:overflow-y-auto lg:p-1 lg:-m-1">
-            <QuestionPreview number={question?.number ?? 1} lang={lang} />
+            <QuestionPreview lang={lang} />
             {question ? <LiveStatistics question={question} zone={zone} /> : null}
-            {question ? <VersionList question={question} zone={zone} /> : null}
           </div>
         </section>
       </div>
+      {question ? (
+        <div className="mt-4 lg:max-w-[calc(50%-1.25rem)]">
+          <VersionList question={question} zone={zone} />
+        </div>
+      ) : null}
       {isTrying ? (
         <TryAnswers body={toDraftBody(form.getValues())} lang={lang} onClose={() => setIsTrying(false)} />
       ) : null}

@@ -8,6 +8,7 @@ import { Skeleton } from '#src/components/skeleton.tsx';
 import { readPage, usePageLinks } from '#src/lib/cursor-pages.ts';
 import { rangeWords } from '#src/lib/figures.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
+import { subjectLang, subjectWords } from '#src/lib/subject-words.ts';
 import { questionListQuery } from '#src/queries/questions.ts';
 import { isNarrowed, readListSearch, toFilter, withSearch } from './list-search.ts';
 import { QuestionFilters } from './question-filters.tsx';
@@ -30,7 +31,7 @@ export function QuestionList({ subject, topics, search, onSearch }: QuestionList
   const counts = page?.counts;
   const all = counts && counts.draft + counts.inReview + counts.live + counts.retired;
   const words = page ? rangeWords(readPage(search).from, page.items.length, page.total) : '';
-  const lang = subject.strand === 'fr' ? 'fr' : undefined;
+  const lang = subjectLang(subject);
   return (
     <div className="grid grid-cols-1 gap-x-9 lg:grid-cols-[13.5rem_minmax(0,1fr)]">
       <TopicNav {...{ subject, topics, search }} chosen={asked.topic} total={all} />
@@ -69,8 +70,7 @@ export function QuestionList({ subject, topics, search, onSearch }: QuestionList
 }
 
 function NothingListed({ subject, isNarrowed: isMatch }: { subject: SubjectDto; isNarrowed: boolean }) {
-  const { name } = subject;
-  const inSentence = /^(English|French)/.test(name) ? name : name.charAt(0).toLowerCase() + name.slice(1);
+  const inSentence = subjectWords(subject.name);
   if (isMatch) {
     return (
       <EmptyState

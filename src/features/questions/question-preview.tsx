@@ -12,7 +12,8 @@ const views = [
 ] as const;
 type View = (typeof views)[number]['value'];
 
-const narrowMargin = '[&_.rm]:hidden [&_.qtext]:text-[1.0625rem] [&_.qtext]:leading-7 [&_.qnum]:text-[1.75rem]';
+const narrowMargin =
+  '[&_.answer-line]:w-20 sm:[&_.answer-line]:w-36 [&_.rm]:hidden [&_.qtext]:text-[1.0625rem] [&_.qtext]:leading-7 [&_.qnum]:text-[1.75rem]';
 const frames: Record<View, string> = {
   screen: `[&_.qsheet]:grid-cols-[clamp(40px,6vw,58px)_minmax(0,1fr)] md:[&_.qsheet>div]:px-6 md:[&_.qsheet>.mg]:px-0 ${narrowMargin}`,
   phone: `mx-auto max-w-[22.5rem] [&_.qsheet]:grid-cols-[46px_minmax(0,1fr)] [&_.qsheet>div]:px-4 [&_.qsheet>.mg]:px-0 ${narrowMargin}`,
@@ -35,12 +36,11 @@ const paper = {
 } as CSSProperties;
 
 interface QuestionPreviewProps {
-  number: number;
   lang?: string | undefined;
 }
 
 /** The question as the student will meet it, a moment behind the typing. */
-export function QuestionPreview({ number, lang }: QuestionPreviewProps) {
+export function QuestionPreview({ lang }: QuestionPreviewProps) {
   const [view, setView] = useState<View>('screen');
   const { control } = useFormContext<QuestionForm>();
   const stem = useWatch({ control, name: 'stem' });
@@ -59,7 +59,7 @@ export function QuestionPreview({ number, lang }: QuestionPreviewProps) {
         <Segmented label="Preview for" options={views} value={view} onChange={setView} />
       </div>
       <div className={frames[view]} style={view === 'print' ? paper : undefined}>
-        <QuestionSheet body={body} kind={shown.kind} number={number} lang={lang} />
+        <QuestionSheet body={body} kind={shown.kind} number={1} lang={lang} />
       </div>
     </>
   );

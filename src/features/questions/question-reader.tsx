@@ -4,6 +4,7 @@ import { useNavigate } from 'react-router-dom';
 import type { SubjectDto } from '#shared/schemas/curriculum.ts';
 import type { QuestionDto } from '#shared/schemas/question.ts';
 import { secondsWords } from '#src/lib/figures.ts';
+import { subjectLang, subjectWords } from '#src/lib/subject-words.ts';
 import { useMe } from '#src/queries/me.ts';
 import { questionQuery } from '#src/queries/questions.ts';
 import { LiveStatistics } from './live-statistics.tsx';
@@ -33,7 +34,7 @@ export function QuestionReader({ question, subject }: QuestionReaderProps) {
   const [isTrying, setIsTrying] = useState(false);
   const { current, can } = question;
   const isReview = current.status === 'inReview';
-  const lang = subject.strand === 'fr' ? 'fr' : undefined;
+  const lang = subjectLang(subject);
   const facts: [string, string][] = [
     ...question.topics.map((topic): [string, string] => [topic.specification, `${topic.number} ${topic.title}`]),
     ['Kind', kindWords[current.kind]],
@@ -63,8 +64,8 @@ export function QuestionReader({ question, subject }: QuestionReaderProps) {
       </QuestionHeader>
       {isReview && !can.putLive && current.author.id === me.id ? (
         <p className="note mb-6 max-w-[44rem]">
-          <b>You wrote this, so you cannot put it live.</b> Another teacher of {subject.name} or the head of department
-          does.
+          <b>You wrote this, so you cannot put it live.</b> Another {subjectWords(subject.name)} teacher or the head of
+          department does.
         </p>
       ) : null}
       <div className="grid grid-cols-1 gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_20rem]">

@@ -4,7 +4,7 @@ import { ExamQuestion, partLetter } from '#src/components/exam-question.tsx';
 import { MarkScheme } from '#src/components/mark-scheme.tsx';
 import { Markdown } from '#src/components/markdown.tsx';
 import { Sheet, SheetRow } from '#src/components/sheet.tsx';
-import { toAskedQuestion, toSchemePoints } from './asked-question.ts';
+import { specWords, toAskedQuestion, toSchemePoints } from './asked-question.ts';
 
 interface QuestionSheetProps {
   body: DraftBody;
@@ -32,6 +32,7 @@ export function QuestionSheet({ body, kind, number, lang, hasModelAnswers = fals
                 <div className="mt-3">
                   <p className="hint">Model answer</p>
                   <p className="pen whitespace-pre-wrap [overflow-wrap:anywhere]">{part.modelAnswer || 'None yet'}</p>
+                  {kind === 'shortAnswer' ? <SpecLine part={part} /> : null}
                 </div>
               ) : null}
             </div>
@@ -45,5 +46,16 @@ export function QuestionSheet({ body, kind, number, lang, hasModelAnswers = fals
         </div>
       </SheetRow>
     </Sheet>
+  );
+}
+
+function SpecLine({ part }: { part: DraftBody['parts'][number] }) {
+  const words = specWords(part);
+  if (words === null) return <p className="hint mt-2">The student marks this against the scheme.</p>;
+  return (
+    <div className="mt-3">
+      <p className="hint">Marked by Plait</p>
+      <p className="[overflow-wrap:anywhere]">{words}</p>
+    </div>
   );
 }

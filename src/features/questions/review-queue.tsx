@@ -1,8 +1,10 @@
 import { Link } from 'react-router-dom';
+import { dayWords } from '#shared/domain/time/words.ts';
 import type { ReviewRowDto } from '#shared/schemas/question.ts';
 import { Markdown } from '#src/components/markdown.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
-import { dayOf, dayWords } from '#src/lib/dates.ts';
+import { dayOf } from '#src/lib/dates.ts';
+import { subjectLang, subjectWords } from '#src/lib/subject-words.ts';
 
 interface ReviewQueueProps {
   rows: ReviewRowDto[];
@@ -55,8 +57,8 @@ export function ReviewQueue({ rows, zone, hasSubjects }: ReviewQueueProps) {
               >
                 <Opening row={row} hasSubjects={hasSubjects} isLink />
                 <p className="text-sm text-ink-2 max-lg:col-start-2">
-                  Sent {dayWords(dayOf(row.sentAt, zone))}. You wrote it, so another teacher of {row.subject.name} puts
-                  it live.
+                  Sent {dayWords(dayOf(row.sentAt, zone))}. You wrote it, so another {subjectWords(row.subject.name)}{' '}
+                  teacher puts it live.
                 </p>
               </li>
             ))}
@@ -68,7 +70,7 @@ export function ReviewQueue({ rows, zone, hasSubjects }: ReviewQueueProps) {
 }
 
 function Opening({ row, hasSubjects, isLink = false }: { row: ReviewRowDto; hasSubjects: boolean; isLink?: boolean }) {
-  const lang = row.subject.strand === 'fr' ? 'fr' : undefined;
+  const lang = subjectLang(row.subject);
   const excerpt = <Markdown isInline source={row.excerpt} lang={lang} />;
   return (
     <>

@@ -21,12 +21,12 @@ export function VersionList({ question, zone }: VersionListProps) {
           .map((version) => (
             <li
               key={version.id}
-              className="grid grid-cols-[1.5rem_6rem_minmax(0,1fr)_auto] gap-x-3 border-b border-rule-soft py-2"
+              className="grid grid-cols-[1.5rem_minmax(0,1fr)_auto] gap-x-2 border-b border-rule-soft py-2"
             >
               <span className="num font-bold">{version.version}</span>
-              <span className="text-ink-2">{versionStatusWords[version.status]}</span>
-              <span className="min-w-0 [overflow-wrap:anywhere]">{version.author}</span>
+              <span>{versionStatusWords[version.status]}</span>
               <span className="num text-ink-2">{instantWords(version.at, zone)}</span>
+              <span className="col-start-2 col-end-4 text-ink-2 [overflow-wrap:anywhere]">{version.author}</span>
             </li>
           ))}
       </ul>

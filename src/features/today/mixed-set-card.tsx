@@ -37,7 +37,14 @@ function Strands({ set }: { set: TodaySetDto }) {
         <Ribbon items={items} size={ribbonSizes.today} name="Mixed set" surface="sheet" tint={34} room={730} />
       </div>
       <div className="mt-4 md:hidden">
-        <Ribbon items={items} size={ribbonSizes.todayPhone} name="Mixed set" surface="sheet" tint={34} hasLabels={false} />
+        <Ribbon
+          items={items}
+          size={ribbonSizes.todayPhone}
+          name="Mixed set"
+          surface="sheet"
+          tint={34}
+          hasLabels={false}
+        />
         <ul className="flex flex-wrap gap-x-4 gap-y-1.5 mt-3" aria-label="Questions by subject">
           {countBySubject(set).map(({ subject, count }) => (
             <li key={subject.id} className="flex items-center gap-1.5 num text-sm">
@@ -100,7 +107,9 @@ export function MixedSetCard({ set, zone, aside }: CardProps) {
         <p className="text-ink-2 mt-1 max-w-[35rem]">
           {leadWords(set)} {set.sentence}
         </p>
-        {set.status === 'done' && set.maxMarks !== null ? <MarksBadge marks={set.marks} maxMarks={set.maxMarks} /> : null}
+        {set.status === 'done' && set.maxMarks !== null ? (
+          <MarksBadge marks={set.marks} maxMarks={set.maxMarks} />
+        ) : null}
       </div>
       <Strands set={set} />
       <div className="flex flex-wrap items-center gap-x-5 gap-y-3 mt-5">

@@ -39,7 +39,9 @@ export function NextPapers({ papers }: { papers: Sitting[] }) {
                   <span className="sr-only">{sitting.subject.name} </span>
                   <span className="font-semibold">{sitting.paperTitle}</span>
                   <span className="text-ink-2 num">, {durationWords(sitting.minutes)}</span>
-                  <span className="block text-sm text-ink-2 num mt-0.5">{dayTimeWords(sitting.on, sitting.startsAt)}</span>
+                  <span className="block text-sm text-ink-2 num mt-0.5">
+                    {dayTimeWords(sitting.on, sitting.startsAt)}
+                  </span>
                 </span>
                 <span className="text-right whitespace-nowrap">
                   <Countdown sitting={sitting} />

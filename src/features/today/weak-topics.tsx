@@ -11,14 +11,19 @@ export function WeakTopics({ topics, hasPapers }: { topics: TodayDto['weakTopics
         {hasPapers ? 'Weak for those papers' : 'Weak topics'}
       </h2>
       {topics.length === 0 ? (
-        <p className="text-ink-2 mt-3">Nothing is weak so far. Topics appear here once you have answered some questions.</p>
+        <p className="text-ink-2 mt-3">
+          Nothing is weak so far. Topics appear here once you have answered some questions.
+        </p>
       ) : (
         <>
           <ul>
             {topics.map(({ subject, topic, recall, standing }) => (
               <li key={topic.id} className="flex items-center gap-3 min-h-11 py-2 border-b border-rule">
                 <StrandLabel subject={subject} />
-                <Link className="hover:underline flex-1 min-w-0 [overflow-wrap:anywhere]" to={`/topics?subject=${subject.id}`}>
+                <Link
+                  className="hover:underline flex-1 min-w-0 [overflow-wrap:anywhere]"
+                  to={`/topics?subject=${subject.id}`}
+                >
                   <span className="sr-only">{subject.name}, </span>
                   {topic.title}
                 </Link>

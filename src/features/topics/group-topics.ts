@@ -26,4 +26,3 @@ export function subjectsAmong(topics: MyTopicDto[]): MyTopicDto['subject'][] {
   const subjects = new Map(topics.map(({ subject }) => [subject.id, subject]));
   return [...subjects.values()].sort((a, b) => a.name.localeCompare(b.name, 'en-GB'));
 }
-

@@ -15,7 +15,8 @@ export function RecallFigure({ topic }: { topic: MyTopicDto }) {
 /** When it comes back; what is due stands out. */
 export function ComesBack({ topic, today }: { topic: MyTopicDto; today: string }) {
   if (!topic.isTaught) return <span className="text-ink-2">Not taught yet</span>;
-  if (!topic.returnsOn) return <span className="text-ink-2">{topic.questions === 0 ? 'No questions yet' : 'In a coming set'}</span>;
+  if (!topic.returnsOn)
+    return <span className="text-ink-2">{topic.questions === 0 ? 'No questions yet' : 'In a coming set'}</span>;
   const words = returnWords(topic.returnsOn, today);
   return words === 'Today' ? <span className="font-semibold text-accent">{words}</span> : <span>{words}</span>;
 }

@@ -1,0 +1,114 @@
+import { select } from '#server/db/scope.ts';
+import { earnedMarks } from '#shared/domain/marking/earned-marks.ts';
+import type { MarkedPart } from '#shared/schemas/marked-part.ts';
+import { bodyMarks, type QuestionBody } from '#shared/schemas/question-body.ts';
+import { type FoldedState, foldAnswers, type LoggedAnswer } from './rebuild-memory.ts';
+
+/** Something in the database that the log does not bear out. Ids only. */
+export interface LogFault {
+  userId: string;
+  questionId: string;
+  fault: 'state differs from the log' | 'state without a log' | 'log without a state' | 'marks differ from the scheme';
+}
+
+export interface LogReport {
+  students: number;
+  answers: number;
+  states: number;
+  faults: LogFault[];
+}
+
+interface StateRow extends FoldedState {
+  question_id: string;
+}
+
+interface MarkRow {
+  question_id: string;
+  parts: MarkedPart[];
+  marks: number;
+  max_marks: number;
+  body: QuestionBody;
+}
+
+const studentsWithAnswers = () =>
+  select<{ user_id: string }>('SELECT user_id FROM answers UNION SELECT user_id FROM memory_states ORDER BY user_id');
+
+const wholeLog = (userId: string) =>
+  select<LoggedAnswer>(
+    `SELECT a.id, a.user_id, a.question_id, i.set_id, a.given_at, to_char(a.given_on, 'YYYY-MM-DD') AS given_on,
+       a.how_sure, m.marks, m.max_marks
+     FROM answers a
+     JOIN set_items i ON i.id = a.set_item_id
+     LEFT JOIN LATERAL (SELECT e.marks, e.max_marks FROM mark_events e WHERE e.answer_id = a.id
+                        ORDER BY e.sequence DESC LIMIT 1) m ON true
+     WHERE a.user_id = $1 ORDER BY a.given_at, a.id`,
+    [userId],
+  );
+
+const storedStates = (userId: string) =>
+  select<StateRow>(
+    `SELECT question_id, stability, difficulty, to_char(last_on, 'YYYY-MM-DD') AS "lastOn", attempts,
+       last_grade AS "lastGrade", last_share AS "lastShare"
+     FROM memory_states WHERE user_id = $1`,
+    [userId],
+  );
+
+const markedAnswers = (userId: string) =>
+  select<MarkRow>(
+    `SELECT a.question_id, e.parts, e.marks, e.max_marks, v.body
+     FROM answers a JOIN mark_events e ON e.answer_id = a.id JOIN question_versions v ON v.id = a.question_version_id
+     WHERE a.user_id = $1`,
+    [userId],
+  );
+
+const isSame = (a: FoldedState, b: FoldedState): boolean =>
+  a.stability === b.stability &&
+  a.difficulty === b.difficulty &&
+  a.lastOn === b.lastOn &&
+  a.attempts === b.attempts &&
+  a.lastGrade === b.lastGrade &&
+  a.lastShare === b.lastShare;
+
+function compareStates(userId: string, log: readonly LoggedAnswer[], states: readonly StateRow[]): LogFault[] {
+  const byQuestion = new Map<string, LoggedAnswer[]>();
+  for (const answer of log) {
+    const answers = byQuestion.get(answer.question_id);
+    if (answers) answers.push(answer);
+    else byQuestion.set(answer.question_id, [answer]);
+  }
+  const stored = new Map(states.map((state) => [state.question_id, state]));
+  const faults: LogFault[] = [];
+  for (const questionId of new Set([...byQuestion.keys(), ...stored.keys()])) {
+    const folded = foldAnswers(byQuestion.get(questionId) ?? []);
+    const state = stored.get(questionId);
+    if (folded && !state) faults.push({ userId, questionId, fault: 'log without a state' });
+    else if (!folded && state) faults.push({ userId, questionId, fault: 'state without a log' });
+    else if (folded && state && !isSame(folded, state)) {
+      faults.push({ userId, questionId, fault: 'state differs from the log' });
+    }
+  }
+  return faults;
+}
+
+const compareMarks = (userId: string, rows: readonly MarkRow[]): LogFault[] =>
+  rows.flatMap((row): LogFault[] => {
+    const isRight = earnedMarks(row.body, row.parts) === row.marks && bodyMarks(row.body) === row.max_marks;
+    return isRight ? [] : [{ userId, questionId: row.question_id, fault: 'marks differ from the scheme' }];
+  });
+
+/**
+ * Proves of one school that every memory state is the fold of the answer log, and that every mark is the sum of the
+ * mark points earned. Reads only; runs inside withSchool.
+ */
+export async function verifyLog(): Promise<LogReport> {
+  const report: LogReport = { students: 0, answers: 0, states: 0, faults: [] };
+  for (const { user_id: userId } of await studentsWithAnswers()) {
+    const log = await wholeLog(userId);
+    const states = await storedStates(userId);
+    report.students += 1;
+    report.answers += log.length;
+    report.states += states.length;
+    report.faults.push(...compareStates(userId, log, states), ...compareMarks(userId, await markedAnswers(userId)));
+  }
+  return report;
+}
