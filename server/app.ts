@@ -12,8 +12,9 @@ import { createPassport } from './http/passport.ts';
 import { problemHandler } from './http/problem-handler.ts';
 import { RequestLimits, SignInLimits } from './http/rate-limits.ts';
 import { requestLog } from './http/request-log.ts';
-import { sameOriginOnly } from './http/same-origin.ts';
+import { dataOnly, sameOriginOnly } from './http/same-origin.ts';
 import { cookieName, expireSessions, sessions } from './http/session.ts';
+import { storableText } from './http/storable-text.ts';
 import type { AccountDeps } from './routes/account.ts';
 import { allRoutes } from './routes/index.ts';
 import { verifySignIn } from './services/people/sign-in.ts';
@@ -49,8 +50,8 @@ export function createApp({ config, log, pool, clock = Date.now, isServing = () 
 
   const passport = createPassport(verifySignIn);
   const api = express.Router();
-  api.use(sameOriginOnly(config.PUBLIC_ORIGIN));
-  api.use(express.json({ limit: BODY_LIMIT, strict: true }));
+  api.use(dataOnly(config.PUBLIC_ORIGIN), sameOriginOnly(config.PUBLIC_ORIGIN));
+  api.use(express.json({ limit: BODY_LIMIT, strict: true, reviver: storableText }));
   api.use(sessions(config, pool), expireSessions(clock), passport.session());
   const account: AccountDeps = {
     passport,

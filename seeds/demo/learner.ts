@@ -18,8 +18,8 @@ interface Trace {
 const logistic = (x: number): number => 1 / (1 + Math.exp(-x));
 
 /** Half-lives after a first attempt, right and wrong, of an average student; and the bounds of a later one, in days. */
-const FIRST = { right: 14, wrong: 2.5 };
-const AFTER_A_MISS = { floor: 1.5, cap: 20 };
+const FIRST = { right: 25, wrong: 6 };
+const AFTER_A_MISS = { floor: 4, cap: 20 };
 /** Days after which half of what fades without practice has faded. */
 const FADING_DAYS = 150;
 const FADING_SHARE = 0.35;

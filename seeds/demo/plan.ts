@@ -3,10 +3,11 @@ import { type BankQuestion, bankRows, planBank } from './bank.ts';
 import { type ClassPlan, classRows, planClasses, practisedStudents, TEACHING_FROM_DAYS } from './classes.ts';
 import { confusablePairs, curriculumRows } from './curriculum.ts';
 import { peopleRows, planStudents, type Student } from './people.ts';
+import type { PracticeRows } from './practice-rows.ts';
 import type { Rows } from './rows.ts';
 import { SCHOOL, schoolYearStart } from './school.ts';
 import { simulatePractice } from './simulate.ts';
-import type { PracticeRows, SetRules } from './student-practice.ts';
+import type { SetRules } from './student-practice.ts';
 import { nextPapers, type StudyItem, studyItems } from './study.ts';
 import { planSubjects, type SubjectPlan } from './subjects.ts';
 import { lastSitting, planSeasons, type Season, timetableRows } from './timetable.ts';
@@ -68,13 +69,17 @@ export function allBankRows(plan: DemoPlan): Rows {
 }
 
 /** Eight weeks of practice of two mathematics classes, in all their subjects. */
-export function planPractice(plan: DemoPlan, budgetSeconds: SetRules['budgetSeconds']): PracticeRows {
+export function planPractice(
+  plan: DemoPlan,
+  budgetSeconds: SetRules['budgetSeconds'],
+  students: readonly Student[] = practisedStudents(plan.classes),
+): PracticeRows {
   const papersOn = nextPapers(plan.seasons);
   const itemsByClass = new Map(
     plan.classes.map((one): [ClassPlan, StudyItem[]] => [one, studyItems(one, bankOf(plan, one.subjectId), papersOn)]),
   );
   return simulatePractice({
-    students: practisedStudents(plan.classes),
+    students,
     itemsOf: (student) =>
       [...itemsByClass].flatMap(([{ students }, items]) => (students.includes(student) ? items : [])),
     today: plan.today,

@@ -1,8 +1,9 @@
 import { addDays } from '#shared/domain/time/calendar.ts';
 import { sessionsOf } from './habits.ts';
 import type { Student } from './people.ts';
+import type { PracticeRows } from './practice-rows.ts';
 import { PRACTICE_WEEKS } from './school.ts';
-import { type PracticeRows, type SetRules, StudentPractice } from './student-practice.ts';
+import { type SetRules, StudentPractice } from './student-practice.ts';
 import type { StudyItem } from './study.ts';
 
 export interface Practice extends SetRules {

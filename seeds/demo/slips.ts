@@ -2,14 +2,18 @@ import { markPart } from '#shared/domain/marking/mark-part.ts';
 import type { QuestionPart, TextSpec } from '#shared/schemas/question-body.ts';
 import type { Random } from './random.ts';
 
+/** LaTeX commands that are one character when typed. */
+const SIGNS: Record<string, string> = { times: '×', div: '÷', pi: 'π', pm: '±', equiv: '≡', circ: '°', sqrt: '√' };
+
 /** Markdown and LaTeX as a student would type it on one line. */
 export const asTyped = (markdown: string): string =>
   markdown
+    .replace(/\^\\circ/g, '°')
+    .replace(/\\sqrt\{([^{}]*)\}/g, '√$1')
     .replace(/\\d?frac\{([^{}]*)\}\{([^{}]*)\}/g, '$1/$2')
     .replace(/\\(?:text|mathrm|mathbf|overrightarrow)\{([^{}]*)\}/g, '$1')
-    .replace(/\\times/g, '×')
-    .replace(/\\(?:pi)\b/g, 'π')
-    .replace(/\\[a-zA-Z]+/g, ' ')
+    .replace(/\\(sin|cos|tan)/g, '$1')
+    .replace(/\\([a-zA-Z]+)/g, (_, name: string) => SIGNS[name] ?? ' ')
     .replace(/[$*{}\\]/g, '')
     .replace(/\s+/g, ' ')
     .trim();

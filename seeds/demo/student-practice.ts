@@ -10,19 +10,10 @@ import type { Session } from './habits.ts';
 import { idFor } from './ids.ts';
 import { Learner } from './learner.ts';
 import type { Student } from './people.ts';
+import { addAnswer, instant, type PracticeRows } from './practice-rows.ts';
 import { type Random, randomFor } from './random.ts';
-import type { Row } from './rows.ts';
 import { SCHOOL } from './school.ts';
 import type { StudyItem } from './study.ts';
-
-/** The logs that practice leaves, and the memory folded from them. */
-export interface PracticeRows {
-  sets: Row<'sets'>[];
-  set_items: Row<'set_items'>[];
-  answers: Row<'answers'>[];
-  mark_events: Row<'mark_events'>[];
-  memory_states: Row<'memory_states'>[];
-}
 
 /** How the school builds sets. */
 export interface SetRules {
@@ -33,7 +24,7 @@ export interface SetRules {
 /** As the school's setting stands. */
 const SUBJECTS_PER_SET = 4;
 const SUBJECTS_OFFERED = 5;
-const SHARE_OFFERED = 0.25;
+const SHARE_OFFERED = 0.12;
 /** Seconds between handing in and the next question, beside marking it oneself. */
 const READING = { least: 8, most: 30 };
 const SELF_MARKING = { least: 12, most: 45 };
@@ -41,8 +32,6 @@ const ARRIVAL_MS = 180;
 
 const between = ({ least, most }: { least: number; most: number }, random: Random): number =>
   least + random.below(most - least);
-
-const instant = (ms: number): string => new Date(ms).toISOString();
 
 /** What a student has behind them, question by question. */
 interface History {
@@ -156,45 +145,25 @@ export class StudentPractice {
     const known = { questionId, topicId: facts.topicId, subjectId: facts.subjectId, difficulty };
     const day = dayNumber(date);
     const chance = this.#learner.chance(known, day, taughtDay);
-    const { responses, parts, marks, howSure, seconds } = attempt(
-      question.content,
-      chance,
-      this.#learner,
-      related,
-      random,
-    );
+    const done = attempt(question.content, chance, this.#learner, related, random);
+    const { marks, howSure } = done;
     this.#learner.learn(known, day, marks === facts.marks, chance);
 
-    const givenAt = shownAt + seconds * 1000;
-    const isSelfMarked = parts.some(({ markedBy }) => markedBy === 'student');
+    const givenAt = shownAt + done.seconds * 1000;
+    const isSelfMarked = done.parts.some(({ markedBy }) => markedBy === 'student');
     const receivedAt = givenAt + ARRIVAL_MS;
     const markedAt = isSelfMarked ? receivedAt + between(SELF_MARKING, random) * 1000 : receivedAt;
-    const answerId = idFor(setItemId, 'answer');
-    this.#rows.answers.push({
-      id: answerId,
-      set_item_id: setItemId,
-      user_id: this.#student.id,
-      question_id: questionId,
-      question_version_id: question.versionId,
-      topic_id: facts.topicId,
-      responses,
-      how_sure: howSure,
-      seconds,
-      given_at: instant(givenAt),
-      given_on: date,
-      received_at: instant(receivedAt),
-      is_late: false,
-    });
-    this.#rows.mark_events.push({
-      id: idFor(answerId, 'mark', 1),
-      answer_id: answerId,
-      sequence: 1,
-      source: isSelfMarked ? 'student' : 'plait',
-      marked_by: isSelfMarked ? this.#student.id : null,
-      parts,
-      marks,
-      max_marks: facts.marks,
-      marked_at: instant(markedAt),
+    addAnswer(this.#rows, {
+      setItemId,
+      studentId: this.#student.id,
+      question,
+      topicId: facts.topicId,
+      attempt: done,
+      maxMarks: facts.marks,
+      givenOn: date,
+      givenAt,
+      receivedAt,
+      markedAt,
     });
     this.#remember(questionId, date, { marks, maxMarks: facts.marks, howSure });
     return markedAt + between(READING, random) * 1000;

@@ -19,15 +19,38 @@ interface ParserError {
 const isParserError = (error: unknown): error is ParserError =>
   error instanceof Error && 'type' in error && 'status' in error && typeof error.status === 'number';
 
+const malformed = () => new Problem(400, 'malformed', 'The request could not be read.');
+
 /** Database conditions that pass by themselves: cut statements, shutdown, too many connections, a full disk. */
-const PASSING = new Set(['57014', '55P03', '57P01', '57P02', '57P03', '53100', '53300', '40001', '40P01', '25P03']);
+const PASSING = new Set([
+  '57014',
+  '55P03',
+  '57P01',
+  '57P02',
+  '57P03',
+  '53100',
+  '53300',
+  '40001',
+  '40P01',
+  '25P03',
+  'ECONNREFUSED',
+  'ECONNRESET',
+]);
+
+/** A null character that came in an address: no text column can hold it. */
+const UNSTORABLE = '22021';
+
+/** The code of a database error: Sequelize wraps it, the session store and the rate limiter send it bare. */
+const codeOf = (error: unknown): unknown => {
+  const bare = error instanceof DatabaseError ? error.original : error;
+  return bare instanceof Error && 'code' in bare ? bare.code : undefined;
+};
 
 /** True where the database was lost under the statement: it passes, or no server said anything at all. */
 const isPassing = (error: unknown): boolean => {
   if (error instanceof ConnectionAcquireTimeoutError || error instanceof ConnectionError) return true;
-  if (!(error instanceof DatabaseError)) return false;
-  const { code } = error.original as { code?: string };
-  return code === undefined || PASSING.has(code);
+  const code = codeOf(error);
+  return (error instanceof DatabaseError && code === undefined) || PASSING.has(String(code));
 };
 
 function known(error: unknown): Problem | null {
@@ -35,9 +58,10 @@ function known(error: unknown): Problem | null {
   if (error instanceof OptimisticLockError) return stale();
   if (error instanceof UniqueConstraintError) return new Problem(409, 'duplicate', 'That is already there.');
   if (isPassing(error)) return busy();
+  if (codeOf(error) === UNSTORABLE) return malformed();
   if (isParserError(error)) {
     if (error.type === 'entity.too.large') return new Problem(413, 'too-large', 'That is larger than Plait takes.');
-    return new Problem(400, 'malformed', 'The request could not be read.');
+    return malformed();
   }
   if (error instanceof URIError) return new Problem(400, 'malformed', 'The address could not be read.');
   return null;
@@ -54,6 +78,7 @@ export function sendProblem(response: Response, problem: Problem): void {
     ...(problem.retryAfterSeconds !== undefined && { retryAfterSeconds: problem.retryAfterSeconds }),
   };
   if (problem.retryAfterSeconds !== undefined) response.setHeader('Retry-After', String(problem.retryAfterSeconds));
+  response.setHeader('Cache-Control', 'no-store');
   response.status(problem.status).type('application/problem+json').send(JSON.stringify(body));
 }
 

@@ -1,7 +1,10 @@
+import { createHash } from 'node:crypto';
 import type { Pool } from 'pg';
 import { RateLimiterMemory, RateLimiterPostgres, RateLimiterRes } from 'rate-limiter-flexible';
 import { Problem } from '#server/errors.ts';
+import { networkOf } from './network-of.ts';
 import type { LimitName } from './registry.ts';
+import { Turns } from './turns.ts';
 
 const seconds = (result: RateLimiterRes): number => Math.max(1, Math.ceil(result.msBeforeNext / 1000));
 
@@ -27,6 +30,9 @@ export class RequestLimits {
 }
 
 const MINUTE = 60;
+/** Names and addresses are counted and never kept: the table holds no personal data, and no key is too long. */
+const digest = (text: string): string => createHash('sha256').update(text).digest('base64url');
+
 /** Failures from one address with one account, and the wait that follows the last of them. */
 const LADDER = [
   { failures: 5, wait: MINUTE },
@@ -44,6 +50,7 @@ export class SignInLimits {
   readonly #account: RateLimiterPostgres;
   readonly #slow: RateLimiterPostgres;
   readonly #address: RateLimiterPostgres;
+  readonly #turns = new Turns();
 
   constructor(pool: Pool) {
     const limiter = (keyPrefix: string, points: number, duration: number) =>
@@ -64,8 +71,24 @@ export class SignInLimits {
     this.#address = limiter('address', 100, 15 * MINUTE);
   }
 
-  /** Before a password is looked at. @throws Problem 429 with the seconds to wait */
-  async check(account: string, address: string): Promise<void> {
+  /**
+   * One try to sign in. Tries at one account come one after the other, so that many at once cannot all pass before
+   * the first has failed. @param name account, as typed @param verify answers null for a wrong password
+   * @throws Problem 429 with the seconds to wait
+   */
+  attempt<User>(name: string, from: string, verify: () => Promise<User | null>): Promise<User | null> {
+    const account = digest(name);
+    const address = digest(networkOf(from));
+    return this.#turns.take(account, async () => {
+      await this.#check(account, address);
+      const user = await verify();
+      await (user === null ? this.#failed(account, address) : this.#succeeded(account, address));
+      return user;
+    });
+  }
+
+  /** Before a password is looked at. */
+  async #check(account: string, address: string): Promise<void> {
     const [wait, byAccount, byAddress] = await Promise.all([
       this.#wait.get(`${account}|${address}`),
       this.#account.get(account),
@@ -80,7 +103,7 @@ export class SignInLimits {
     }
   }
 
-  async failed(account: string, address: string): Promise<void> {
+  async #failed(account: string, address: string): Promise<void> {
     const pair = await this.#pair.penalty(`${account}|${address}`, 1);
     await Promise.all([this.#account.penalty(account, 1), this.#address.penalty(address, 1)]);
     const step = LADDER.findLast(({ failures }) => pair.consumedPoints >= failures);
@@ -89,7 +112,7 @@ export class SignInLimits {
     }
   }
 
-  async succeeded(account: string, address: string): Promise<void> {
+  async #succeeded(account: string, address: string): Promise<void> {
     await Promise.all([this.#pair.delete(`${account}|${address}`), this.#account.delete(account)]);
   }
 

@@ -17,3 +17,20 @@ export function sameOriginOnly(publicOrigin: string): RequestHandler {
     next();
   };
 }
+
+/** Where a browser would show a response as a page of its own. The API answers scripts of ours, never a window. */
+const WINDOWS = new Set(['document', 'embed', 'frame', 'iframe', 'object']);
+
+/** Keeps the API out of windows and, where people reach Plait by https, off plain http. */
+export function dataOnly(publicOrigin: string): RequestHandler {
+  const isHttps = publicOrigin.startsWith('https:');
+  return (request, _response, next) => {
+    if (isHttps && !request.secure) {
+      throw new Problem(403, 'not-secure', 'Plait answers over https only. See README, Deploying: TRUST_PROXY.');
+    }
+    if (WINDOWS.has(request.get('sec-fetch-dest') ?? '')) {
+      throw new Problem(403, 'not-a-page', 'This address is not a page.');
+    }
+    next();
+  };
+}

@@ -43,6 +43,8 @@ const TOUCH_EVERY = MINUTE;
 
 export const cookieName = (origin: string): string => (origin.startsWith('https:') ? '__Host-plait' : 'plait');
 
+const cookieAttributes = { httpOnly: true, sameSite: 'lax', path: '/' } as const;
+
 /** express-session on PostgreSQL. Sets no cookie until somebody signs in. */
 export function sessions(config: Config, pool: Pool): RequestHandler {
   const Store = connectPgSimple(session);
@@ -52,7 +54,7 @@ export function sessions(config: Config, pool: Pool): RequestHandler {
     resave: false,
     saveUninitialized: false,
     store: new Store({ pool, tableName: 'session', disableTouch: true, ttl: OWN_DEVICE.absolute / 1000 }),
-    cookie: { httpOnly: true, sameSite: 'lax', path: '/', secure: config.PUBLIC_ORIGIN.startsWith('https:') },
+    cookie: { ...cookieAttributes, secure: config.PUBLIC_ORIGIN.startsWith('https:') },
   });
   // The only thing that can go wrong in the store is the database being away.
   return (request, response, next) => handle(request, response, (error) => (error ? next(busy()) : next()));
@@ -65,21 +67,28 @@ export const isAlive = (data: Pick<session.SessionData, 'startedAt' | 'seenAt' |
 const destroy = (request: Request) =>
   new Promise<void>((done, fail) => request.session.destroy((error) => (error ? fail(error) : done())));
 
+/** Leaves an empty session in the place of a dead one; being empty it is never stored. */
+const discard = (request: Request) =>
+  new Promise<void>((done, fail) => request.session.regenerate((error) => (error ? fail(error) : done())));
+
 /** Ends sessions past their time and notes activity; heartbeats alone count for two hours at most. */
 export function expireSessions(clock: () => number): RequestHandler {
   return async (request, _response, next) => {
     const data = request.session;
-    if (data?.lifetime === undefined || data.seenAt === undefined || data.startedAt === undefined) return next();
+    // Only a sign-in is ever stored: what comes without its times is one that was cut short.
+    if (!data || (data.startedAt === undefined && !('passport' in data))) return next();
     const now = clock();
-    if (!isAlive({ startedAt: data.startedAt, seenAt: data.seenAt, lifetime: data.lifetime }, now)) {
-      await destroy(request);
+    const { startedAt, seenAt, lifetime } = data;
+    const isWhole = startedAt !== undefined && seenAt !== undefined && lifetime !== undefined;
+    if (!isWhole || !isAlive({ startedAt, seenAt, lifetime }, now)) {
+      await discard(request);
       return next();
     }
     const isBeat = request.path === '/me/heartbeat';
     if (isBeat) data.beatingSince ??= now;
     else if (data.beatingSince !== undefined) data.beatingSince = undefined;
     const counts = !isBeat || now - (data.beatingSince ?? now) <= HEARTBEAT_LIMIT;
-    if (counts && now - data.seenAt >= TOUCH_EVERY) data.seenAt = now;
+    if (counts && now - seenAt >= TOUCH_EVERY) data.seenAt = now;
     next();
   };
 }
@@ -102,7 +111,8 @@ export async function startSession(
 /** Ends the session on the server and tells the browser to forget what it kept. */
 export async function endSession(request: Request, response: Response, cookie: string): Promise<void> {
   if (request.session) await destroy(request);
-  response.clearCookie(cookie, { path: '/' });
+  // A browser takes a __Host- cookie away only with the attributes that it was set with.
+  response.clearCookie(cookie, { ...cookieAttributes, secure: cookie.startsWith('__Host-') });
   response.setHeader('Clear-Site-Data', '"cache", "storage"');
 }
 

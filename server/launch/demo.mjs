@@ -39,12 +39,13 @@ export async function seedOnce({ stateDir, env, lifecycle }, progress) {
   return 'seeded';
 }
 
+/** @param {string} role such as "headOfDepartment" */
+const inWords = (role) => role.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+
 /** @param {Demo} demo @param {string} origin @returns {string} lines for the terminal */
 export function describeDemo({ signInPath, people, password }, origin) {
-  const widest = (/** @type {'name' | 'role'} */ key) => Math.max(...people.map((person) => person[key].length), 0);
-  const [name, role] = [widest('name'), widest('role')];
-  const lines = people.map(
-    (person) => `    ${person.name.padEnd(name)}  ${person.role.padEnd(role)}  ${person.username}`,
-  );
+  const rows = people.map(({ name, role, username }) => [name, inWords(role), username]);
+  const widths = [0, 1].map((column) => Math.max(0, ...rows.map((row) => row[column]?.length ?? 0)));
+  const lines = rows.map((row) => `    ${row.map((cell, column) => cell.padEnd(widths[column] ?? 0)).join('  ')}`);
   return [`  Sign in at ${origin}${signInPath}`, `  as one of these, password ${password}`, ...lines].join('\n');
 }

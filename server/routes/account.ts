@@ -42,8 +42,8 @@ export interface AccountDeps {
 async function lifetimeFor(user: SessionUser, isOwnDevice: boolean): Promise<Lifetime> {
   const roles = await rolesOf(user.schoolId, user.userId);
   if (roles.includes('schoolAdmin')) return ADMIN_DEVICE;
-  const isStaff = roles.some((role) => role !== 'student' && role !== 'carer');
-  return isOwnDevice && !isStaff ? OWN_DEVICE : SHARED_DEVICE;
+  const mayStay = roles.length > 0 && roles.every((role) => role === 'student' || role === 'carer');
+  return isOwnDevice && mayStay ? OWN_DEVICE : SHARED_DEVICE;
 }
 
 const authenticate = (passport: PassportStatic, request: Request): Promise<SessionUser | null> =>
@@ -63,21 +63,17 @@ export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: A
     });
   };
   const signIn = async (body: SignIn, request: Request) => {
-    const account = `${body.schoolCode}/${body.name.toLowerCase()}`;
-    const address = request.ip ?? '';
-    await limits.check(account, address);
     // The strategy reads the request's body: give it the parsed one.
     request.body = body;
-    const user = await authenticate(passport, request);
+    const account = `${body.schoolCode}/${body.name.toLowerCase()}`;
+    const user = await limits.attempt(account, request.ip ?? '', () => authenticate(passport, request));
     if (!user) {
-      await limits.failed(account, address);
       throw new Problem(
         401,
         'sign-in-failed',
         'That name and password do not match. Your school can give you a new password.',
       );
     }
-    await limits.succeeded(account, address);
     return open(request, user, body.isOwnDevice);
   };
   return [
@@ -102,7 +98,7 @@ export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: A
       body: demoSignInSchema,
       run: async ({ body }, request) => {
         if (!demo) throw notFound();
-        return open(request, await demo.find(body.schoolCode, body.username), false);
+        return open(request, await demo.find(body.schoolCode, body.username, String(request.id)), false);
       },
     }),
     openRoute({
@@ -118,11 +114,11 @@ export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: A
       access: 'session',
       body: changePasswordSchema,
       run: async ({ body }, request, user) => {
-        await changePassword(user, body);
+        await changePassword(user, body, String(request.id));
         await endOtherSessions(pool, user.userId, request.sessionID);
       },
     }),
     // The session's own clock is wound on by the middleware that every request passes.
-    sessionRoute({ method: 'post', path: '/me/heartbeat', access: 'session', run: async () => undefined }),
+    route({ method: 'post', path: '/me/heartbeat', access: 'signedIn', run: async () => undefined }),
   ];
 }

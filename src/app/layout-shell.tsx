@@ -1,8 +1,7 @@
 import { lazy, Suspense, useEffect, useRef, useState } from 'react';
-import { Link, Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
+import { Link, Outlet, useLocation, useNavigation, useNavigationType } from 'react-router-dom';
 import { PageSkeleton } from '#src/components/skeleton.tsx';
 import { countUnsent } from '#src/lib/unsent.ts';
-import { useDisclosure } from '#src/lib/use-disclosure.ts';
 import { useMe } from '#src/queries/me.ts';
 import { Brand } from './brand.tsx';
 import { NameMenu } from './name-menu.tsx';
@@ -11,6 +10,9 @@ import { isCurrent, type Place, placesOf } from './navigation.ts';
 const UnsentAnswers = lazy(() =>
   import('#src/features/practice/unsent-answers.tsx').then((module) => ({ default: module.UnsentAnswers })),
 );
+
+/** Staff only: students have the tab bar. */
+const PhoneMenu = lazy(() => import('./phone-menu.tsx').then((module) => ({ default: module.PhoneMenu })));
 
 function useIsSlow(isWaiting: boolean): boolean {
   const [isLate, setIsLate] = useState(false);
@@ -25,61 +27,27 @@ function useIsSlow(isWaiting: boolean): boolean {
   return isWaiting && isLate;
 }
 
-/** Moves the focus to the new page, as a page load would. */
-function useFocusOnArrival(pathname: string) {
+/** Moves to the top of a new page and gives it the focus, as a page load would. Going back keeps the place. */
+function useArrival(pathname: string) {
   const main = useRef<HTMLElement>(null);
   const last = useRef(pathname);
+  const isBack = useNavigationType() === 'POP';
   useEffect(() => {
     if (last.current === pathname) return;
     last.current = pathname;
     main.current?.focus({ preventScroll: true });
-  }, [pathname]);
+    if (!isBack) window.scrollTo(0, 0);
+  }, [pathname, isBack]);
   return main;
 }
 
 function PlaceLinks({ places, pathname }: { places: Place[]; pathname: string }) {
   return places.map((place) => (
     <Link key={place.to} to={place.to} aria-current={isCurrent(place, pathname) ? 'page' : undefined}>
-      {place.icon ? <place.icon aria-hidden="true" size={21} strokeWidth={1.75} className="md:hidden" /> : null}
+      {place.icon ? <place.icon /> : null}
       <span>{place.label}</span>
     </Link>
   ));
-}
-
-function PhoneMenu({ places, pathname }: { places: Place[]; pathname: string }) {
-  const { isOpen, frame, button, toggle, close } = useDisclosure();
-  return (
-    <div ref={frame} className="relative md:hidden">
-      <button
-        ref={button}
-        type="button"
-        className="btn quiet"
-        aria-expanded={isOpen}
-        aria-controls="menu"
-        onClick={toggle}
-      >
-        Menu
-      </button>
-      <ul
-        id="menu"
-        hidden={!isOpen}
-        className="absolute left-0 top-full z-30 mt-2 w-56 rounded-lg border border-rule bg-raise p-2 shadow-lift"
-      >
-        {places.map((place) => (
-          <li key={place.to}>
-            <Link
-              to={place.to}
-              onClick={close}
-              aria-current={isCurrent(place, pathname) ? 'page' : undefined}
-              className="flex min-h-11 items-center border-l-[3px] border-transparent px-3 aria-[current]:border-accent aria-[current]:font-semibold"
-            >
-              {place.label}
-            </Link>
-          </li>
-        ))}
-      </ul>
-    </div>
-  );
 }
 
 /** The frame of every page behind the sign-in but a running set. */
@@ -88,7 +56,7 @@ export function LayoutShell() {
   const { pathname } = useLocation();
   const { state, location } = useNavigation();
   const isSlow = useIsSlow(state === 'loading' && location.pathname !== pathname);
-  const main = useFocusOnArrival(pathname);
+  const main = useArrival(pathname);
   const places = placesOf(me);
   // Asked once: answers are only left behind by leaving the runner, which brings this frame back.
   const [hasUnsent] = useState(() => countUnsent(me.id) > 0);
@@ -98,12 +66,16 @@ export function LayoutShell() {
       <a className="btn skip" href="#main">
         Skip to the page
       </a>
-      <header className="bar">
+      <header className="bar max-md:!gap-3">
         <Brand />
         <nav aria-label="Main">
           <PlaceLinks places={places} pathname={pathname} />
         </nav>
-        {hasTabBar ? null : <PhoneMenu places={places} pathname={pathname} />}
+        {hasTabBar ? null : (
+          <Suspense fallback={null}>
+            <PhoneMenu places={places} pathname={pathname} />
+          </Suspense>
+        )}
         <NameMenu />
       </header>
       {hasUnsent ? (
@@ -119,7 +91,6 @@ export function LayoutShell() {
           <PlaceLinks places={places.filter((place) => place.icon)} pathname={pathname} />
         </nav>
       ) : null}
-      <ScrollRestoration />
     </div>
   );
 }

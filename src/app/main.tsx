@@ -1,10 +1,7 @@
 import './app.css';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
-import { chooseTheme, chosenTheme } from '#src/lib/theme.ts';
 import { Providers } from './providers.tsx';
-
-chooseTheme(chosenTheme());
 
 const root = document.getElementById('root');
 if (!root) throw new Error('index.html has no #root.');

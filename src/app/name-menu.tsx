@@ -1,73 +1,40 @@
-import { useState } from 'react';
-import { Link, useNavigate } from 'react-router-dom';
-import { ConfirmDialog } from '#src/components/dialog.tsx';
-import { Segmented } from '#src/components/segmented.tsx';
-import { queryClient } from '#src/lib/query-client.ts';
-import { problemWords } from '#src/lib/show-problem.ts';
-import { chooseTheme, chosenTheme, type ThemeChoice } from '#src/lib/theme.ts';
-import { countUnsent } from '#src/lib/unsent.ts';
+import { lazy, Suspense, useEffect, useState } from 'react';
 import { useDisclosure } from '#src/lib/use-disclosure.ts';
-import { useMe, useSignOut } from '#src/queries/me.ts';
+import { useMe } from '#src/queries/me.ts';
 
-const themes = [
-  { value: 'system', label: 'As the device' },
-  { value: 'light', label: 'Light' },
-  { value: 'dark', label: 'Dark' },
-] as const satisfies { value: ThemeChoice; label: string }[];
+const loadPanel = () => import('./name-panel.tsx');
+const NamePanel = lazy(() => loadPanel().then((module) => ({ default: module.NamePanel })));
 
-function ThemeSetting() {
-  const [theme, setTheme] = useState(chosenTheme);
-  return (
-    <Segmented
-      label="Colours"
-      options={themes}
-      value={theme}
-      onChange={(choice) => {
-        chooseTheme(choice);
-        setTheme(choice);
-      }}
-    />
-  );
-}
+/** Once the page has settled, what the menu needs is fetched, so that it also opens offline. */
+const PRELOAD_AFTER_MS = 3000;
 
-function useLeave() {
-  const me = useMe();
-  const navigate = useNavigate();
-  const signOut = useSignOut();
-  const [isAsking, setIsAsking] = useState(false);
-  const leave = () => {
-    // Signing out clears this site's storage; how the page looks is worth keeping.
-    const theme = chosenTheme();
-    signOut.mutate(undefined, {
-      onSuccess: async () => {
-        chooseTheme(theme);
-        await navigate(`/sign-in/${me.school.code}`);
-        queryClient.clear();
-      },
-    });
-  };
-  const unsent = countUnsent(me.id);
-  return { isAsking, setIsAsking, leave, unsent, signOut, ask: () => (unsent > 0 ? setIsAsking(true) : leave()) };
-}
-
-/** The name at the top right: password, colours, sign out. */
+/** The name at the top right, with the person's own settings under it. */
 export function NameMenu() {
   const me = useMe();
   const { isOpen, frame, button, toggle, close } = useDisclosure();
-  const { isAsking, setIsAsking, leave, unsent, signOut, ask } = useLeave();
+  const [wasOpened, setWasOpened] = useState(false);
   const scope = me.memberships.find((membership) => membership.scope)?.scope;
+  useEffect(() => {
+    const timer = setTimeout(() => void loadPanel().catch(() => undefined), PRELOAD_AFTER_MS);
+    return () => clearTimeout(timer);
+  }, []);
   return (
-    <div ref={frame} className="relative ml-auto">
+    <div ref={frame} className="relative ml-auto min-w-0">
       <button
         ref={button}
         type="button"
         aria-expanded={isOpen}
         aria-controls="name-menu"
-        onClick={toggle}
-        className="min-h-11 rounded px-2 -mr-2 text-right text-sm leading-tight hover:bg-sunk"
+        onClick={() => {
+          setWasOpened(true);
+          toggle();
+        }}
+        className="min-h-11 max-w-full rounded px-2 -mr-2 text-right text-sm leading-tight hover:bg-sunk"
       >
-        <span className={scope ? 'block font-semibold max-sm:sr-only' : 'block font-semibold'}>{me.name}</span>
-        {scope ? <span className="text-ink-2">{scope}</span> : null}
+        <span className={scope ? 'block truncate font-semibold max-sm:sr-only' : 'block truncate font-semibold'}>
+          {me.name}
+        </span>
+        {scope ? <span className="block truncate text-ink-2">{scope}</span> : null}
         <span className="sr-only">, your settings</span>
       </button>
       <div
@@ -75,42 +42,12 @@ export function NameMenu() {
         hidden={!isOpen}
         className="absolute right-0 top-full z-30 mt-2 w-[18.5rem] max-w-[calc(100vw-2.5rem)] rounded-lg border border-rule bg-raise p-5 shadow-lift"
       >
-        <p className="font-semibold [overflow-wrap:anywhere]">{me.name}</p>
-        <p className="hint [overflow-wrap:anywhere]">
-          {me.username}, {me.school.name}
-        </p>
-        <p className="mt-4 mb-1.5 text-sm font-semibold" aria-hidden="true">
-          Colours
-        </p>
-        <ThemeSetting />
-        <div className="mt-4 grid justify-items-start border-t border-rule pt-2">
-          <Link className="link inline-flex items-center min-h-11" to="/password" onClick={close}>
-            Change password
-          </Link>
-          <button type="button" className="link min-h-11" disabled={signOut.isPending} onClick={ask}>
-            Sign out
-          </button>
-        </div>
-        {signOut.isError ? (
-          <p role="alert" className="err mt-1">
-            {problemWords(signOut.error)}
-          </p>
+        {wasOpened ? (
+          <Suspense fallback={null}>
+            <NamePanel onClose={close} />
+          </Suspense>
         ) : null}
       </div>
-      {isAsking ? (
-        <ConfirmDialog
-          title="Sign out and lose what is not sent?"
-          confirm="Sign out"
-          cancel="Stay signed in"
-          isBusy={signOut.isPending}
-          error={signOut.isError ? problemWords(signOut.error) : undefined}
-          onConfirm={leave}
-          onClose={() => setIsAsking(false)}
-        >
-          {unsent === 1 ? 'One answer is' : `${unsent} answers are`} kept on this device and not sent yet. Signing out
-          removes {unsent === 1 ? 'it' : 'them'}.
-        </ConfirmDialog>
-      ) : null}
     </div>
   );
 }

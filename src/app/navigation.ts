@@ -1,5 +1,6 @@
-import { ListChecks, type LucideIcon, Spline, Sun } from 'lucide-react';
+import type { ComponentType } from 'react';
 import type { MeDto } from '#shared/schemas/auth.ts';
+import { ListIcon, StrandIcon, SunIcon } from '#src/components/place-icons.tsx';
 
 export interface Place {
   to: string;
@@ -7,13 +8,13 @@ export interface Place {
   /** Other addresses at which this place is the current one. */
   isAlso?: RegExp;
   /** Drawn in the tab bar of a phone. */
-  icon?: LucideIcon;
+  icon?: ComponentType;
 }
 
 const studentPlaces: Place[] = [
-  { to: '/today', label: 'Today', icon: Sun },
-  { to: '/set/mixed', label: 'Mixed set', icon: Spline, isAlso: /^\/sets?\// },
-  { to: '/topics', label: 'Topics', icon: ListChecks },
+  { to: '/today', label: 'Today', icon: SunIcon },
+  { to: '/set/mixed', label: 'Mixed set', icon: StrandIcon, isAlso: /^\/sets?\// },
+  { to: '/topics', label: 'Topics', icon: ListIcon },
 ];
 
 /** Where a person can go: only pages that exist and are theirs. */

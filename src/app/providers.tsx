@@ -1,7 +1,6 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { RouterProvider } from 'react-router-dom';
 import type { MeDto } from '#shared/schemas/auth.ts';
-import { ToastProvider } from '#src/components/toast.tsx';
 import { onSignedOut, queryClient } from '#src/lib/query-client.ts';
 import { signInPath } from '#src/lib/sign-in-path.ts';
 import { meKeys } from '#src/queries/me.ts';
@@ -19,9 +18,7 @@ onSignedOut(() => {
 export function Providers() {
   return (
     <QueryClientProvider client={queryClient}>
-      <ToastProvider>
-        <RouterProvider router={router} />
-      </ToastProvider>
+      <RouterProvider router={router} />
     </QueryClientProvider>
   );
 }

@@ -17,10 +17,15 @@ const words = ['one thing', 'two things', 'three things', 'four things', 'five t
 /** What stands in the way, at the top of a form. Takes the focus when a submit fails. */
 export function ErrorSummary({ problems, attempt }: ErrorSummaryProps) {
   const box = useRef<HTMLDivElement>(null);
+  const seen = useRef(0);
+  const hasProblems = problems.length > 0;
   useEffect(() => {
-    if (attempt > 0) box.current?.focus();
-  }, [attempt]);
-  if (problems.length === 0) return null;
+    // The faults may reach the page a render after the attempt that found them.
+    if (!hasProblems || attempt === seen.current) return;
+    seen.current = attempt;
+    box.current?.focus();
+  }, [attempt, hasProblems]);
+  if (!hasProblems) return null;
   const count = words[problems.length - 1] ?? `${problems.length} things`;
   return (
     <div ref={box} role="alert" tabIndex={-1} className="esum mb-6 max-w-[44rem]">

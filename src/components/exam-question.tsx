@@ -71,7 +71,7 @@ export function ExamQuestion({ question, number, renderAnswer, renderMarks, lang
                 <Markdown source={part.prompt} lang={lang} />
               </div>
             )}
-            <p className="marks mt-1">{marksWords(part.marks)}</p>
+            <p className="marks mt-1 mb-2">{marksWords(part.marks)}</p>
             {renderAnswer ? renderAnswer(part, index) : <BlankAnswer part={part} />}
           </div>
         </SheetRow>

@@ -68,14 +68,17 @@ export function Field(props: FieldShape & ComponentPropsWithRef<'input'>) {
 
 /** A field of several lines; it grows with its text where the browser can. */
 export function TextArea(props: FieldShape & ComponentPropsWithRef<'textarea'>) {
-  const { label, hint, error, isLabelHidden, isSmall, frameClass, className, ...input } = props;
+  const { label, hint, error, isLabelHidden, isSmall, frameClass, className, rows = 2, ...input } = props;
   const ownId = useId();
   const id = input.id ?? ownId;
+  // A field that grows with its text forgets its rows, so they become its least height.
+  const minHeight = rows > 1 ? `${rows * (isSmall ? 1.125 : 1.375) + 1}rem` : undefined;
   return (
     <FieldFrame {...{ id, label, hint, error, isLabelHidden, isSmall, frameClass }}>
       <textarea
-        rows={2}
         {...input}
+        rows={rows}
+        style={{ minHeight, ...input.style }}
         id={id}
         className={inputClass(props, join('block [field-sizing:content]', className))}
         aria-invalid={error ? true : undefined}

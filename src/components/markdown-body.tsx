@@ -3,7 +3,7 @@ import ReactMarkdown, { type Components } from 'react-markdown';
 import rehypeKatex from 'rehype-katex';
 import rehypeSanitize, { defaultSchema } from 'rehype-sanitize';
 import remarkMath from 'remark-math';
-import { rehypeFormulaErrors, rehypeRefuseFormulas } from './markdown-plugins.ts';
+import { rehypeFormulaErrors, rehypeRefuseFormulas, remarkOneLineDisplay } from './markdown-plugins.ts';
 
 const schema = {
   ...defaultSchema,
@@ -41,7 +41,7 @@ const inlineParts: Components = { ...blockParts, p: ({ children }) => children }
 export function MarkdownBody({ source, isInline }: { source: string; isInline: boolean }) {
   return (
     <ReactMarkdown
-      remarkPlugins={[remarkMath]}
+      remarkPlugins={[remarkMath, remarkOneLineDisplay]}
       rehypePlugins={[[rehypeSanitize, schema], rehypeRefuseFormulas, [rehypeKatex, katexOptions], rehypeFormulaErrors]}
       urlTransform={allowedUrl}
       components={isInline ? inlineParts : blockParts}

@@ -1,4 +1,6 @@
 import type { ElementContent, Root, RootContent } from 'hast';
+import type { Root as MarkdownRoot } from 'mdast';
+import type { VFile } from 'vfile';
 import { refuseFormula } from '#src/lib/maths-commands.ts';
 
 type Node = Root | RootContent | ElementContent;
@@ -37,6 +39,18 @@ function replaceWhere(node: Node, replace: (child: Node) => ElementContent | nul
     else replaceWhere(child, replace);
   });
 }
+
+/** Makes `$$…$$` a display formula also where it stands on one line of its own. */
+export const remarkOneLineDisplay = () => (tree: MarkdownRoot, file: VFile) => {
+  const source = String(file);
+  for (const block of tree.children) {
+    if (block.type !== 'paragraph' || block.children.length !== 1) continue;
+    const [only] = block.children;
+    const start = only?.position?.start.offset;
+    if (!only || String(only.type) !== 'inlineMath' || start === undefined || !source.startsWith('$$', start)) continue;
+    only.data = { ...only.data, hProperties: { className: ['language-math', 'math-display'] } };
+  }
+};
 
 /** Runs before KaTeX: takes out every formula with a command off the allow-list. */
 export const rehypeRefuseFormulas = () => (tree: Root) =>

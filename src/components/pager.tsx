@@ -1,15 +1,45 @@
 import { Link, type To } from 'react-router-dom';
 
+interface PageTarget {
+  to: To;
+  state?: unknown;
+  /** True while it is not known yet where this leads: the link keeps its place and the focus, and does nothing. */
+  isWaiting?: boolean;
+}
+
 interface PagerProps {
   /** "26 to 50 of 197". */
   words: string;
   /** Null on the first page. */
-  previous: { to: To; state?: unknown } | null;
+  previous: PageTarget | null;
   /** Null on the last page. */
-  next: { to: To; state?: unknown } | null;
+  next: PageTarget | null;
 }
 
 const shape = 'btn quiet sm max-md:!min-h-11';
+
+function PageLink({ label, target }: { label: string; target: PageTarget | null }) {
+  if (!target) {
+    return (
+      <button type="button" className={shape} disabled>
+        {label}
+      </button>
+    );
+  }
+  return (
+    <Link
+      className={shape}
+      to={target.to}
+      state={target.state}
+      aria-disabled={target.isWaiting || undefined}
+      onClick={(event) => {
+        if (target.isWaiting) event.preventDefault();
+      }}
+    >
+      {label}
+    </Link>
+  );
+}
 
 /** Previous and Next as links, so that Back and opening in a tab work. */
 export function Pager({ words, previous, next }: PagerProps) {
@@ -18,24 +48,8 @@ export function Pager({ words, previous, next }: PagerProps) {
       <p className="num text-sm text-ink-2">{words}</p>
       {previous || next ? (
         <div className="flex gap-2">
-          {previous ? (
-            <Link className={shape} to={previous.to} state={previous.state}>
-              Previous
-            </Link>
-          ) : (
-            <button type="button" className={shape} disabled>
-              Previous
-            </button>
-          )}
-          {next ? (
-            <Link className={shape} to={next.to} state={next.state}>
-              Next
-            </Link>
-          ) : (
-            <button type="button" className={shape} disabled>
-              Next
-            </button>
-          )}
+          <PageLink label="Previous" target={previous} />
+          <PageLink label="Next" target={next} />
         </div>
       ) : null}
     </nav>

@@ -11,8 +11,7 @@ import { SubjectChoice } from '#src/components/subject-choice.tsx';
 import { ItemTable } from '#src/features/statistics/item-table.tsx';
 import { readStatisticsSearch, toStatisticsFilter } from '#src/features/statistics/statistics-search.ts';
 import { chooseSubject } from '#src/lib/choose-subject.ts';
-import { readPage, usePageLinks } from '#src/lib/cursor-pages.ts';
-import { rangeWords } from '#src/lib/figures.ts';
+import { usePages } from '#src/lib/cursor-pages.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { subjectLang } from '#src/lib/subject-words.ts';
@@ -55,9 +54,8 @@ function SubjectStatistics({ subject, subjects }: { subject: SubjectDto; subject
   const { data: topics } = useSuspenseQuery(topicsQuery(subject.id));
   const list = useQuery(itemStatisticsQuery(toStatisticsFilter(subject.id, search)));
   const page = list.data;
-  const links = usePageLinks(search, page?.items.length ?? 0, page?.nextCursor ?? null);
+  const pages = usePages(search, page, list.isPlaceholderData);
   const { topic, sort } = readStatisticsSearch(search);
-  const words = page ? rangeWords(readPage(search).from, page.items.length, page.total) : '';
   const change = (name: 'topic' | 'sort', value: string) => {
     const next = new URLSearchParams(search);
     for (const old of ['cursor', 'from', name]) next.delete(old);
@@ -102,7 +100,7 @@ function SubjectStatistics({ subject, subjects }: { subject: SubjectDto; subject
           <option value="number">By number</option>
         </Select>
         <p role="status" className="num ml-auto pb-2 text-sm text-ink-2">
-          {words}
+          {pages.words}
         </p>
       </div>
       {list.isPending ? <Skeleton label="item statistics" rows={10} /> : null}
@@ -118,7 +116,7 @@ function SubjectStatistics({ subject, subjects }: { subject: SubjectDto; subject
       {page && page.items.length > 0 ? (
         <>
           <ItemTable rows={page.items} lang={subjectLang(subject)} isBusy={list.isPlaceholderData} />
-          <Pager words={words} {...links} />
+          <Pager {...pages} />
         </>
       ) : null}
       {page && page.items.length === 0 ? (

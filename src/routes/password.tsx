@@ -4,7 +4,8 @@ import { useForm } from 'react-hook-form';
 import { changePasswordSchema } from '#shared/schemas/auth.ts';
 import { PasswordField } from '#src/features/sign-in/password-field.tsx';
 import { showProblem } from '#src/lib/show-problem.ts';
-import { useChangePassword, useMe } from '#src/queries/me.ts';
+import { useMe } from '#src/queries/me.ts';
+import { useChangePassword } from '#src/queries/session.ts';
 
 /** Change password. */
 export function Component() {

@@ -5,8 +5,7 @@ import { ErrorState } from '#src/components/error-state.tsx';
 import { Pager } from '#src/components/pager.tsx';
 import { Skeleton } from '#src/components/skeleton.tsx';
 import { ReviewQueue } from '#src/features/questions/review-queue.tsx';
-import { readPage, usePageLinks } from '#src/lib/cursor-pages.ts';
-import { rangeWords } from '#src/lib/figures.ts';
+import { readPage, usePages } from '#src/lib/cursor-pages.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { subjectsQuery } from '#src/queries/curriculum.ts';
@@ -23,10 +22,10 @@ export function Component() {
   const [search] = useSearchParams();
   const { zone } = useMe().school;
   const { data: subjects } = useSuspenseQuery(subjectsQuery());
-  const { cursor, from } = readPage(search);
+  const { cursor } = readPage(search);
   const queue = useQuery(reviewQueueQuery(cursor));
   const page = queue.data;
-  const links = usePageLinks(search, page?.items.length ?? 0, page?.nextCursor ?? null);
+  const pages = usePages(search, page, queue.isPlaceholderData);
   return (
     <div className="page !max-w-[84rem]">
       <title>Review – Plait</title>
@@ -64,9 +63,7 @@ export function Component() {
       {page && page.items.length > 0 ? (
         <>
           <ReviewQueue rows={page.items} zone={zone} hasSubjects={subjects.length > 1} />
-          {links.previous || links.next ? (
-            <Pager words={rangeWords(from, page.items.length, page.total)} {...links} />
-          ) : null}
+          {pages.previous || pages.next ? <Pager {...pages} /> : null}
         </>
       ) : null}
     </div>

@@ -13,7 +13,7 @@ import { SignInFrame } from '#src/features/sign-in/sign-in-frame.tsx';
 import { ProblemError } from '#src/lib/api.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { safeNext } from '#src/lib/sign-in-path.ts';
-import { schoolQuery } from '#src/queries/me.ts';
+import { schoolQuery } from '#src/queries/session.ts';
 
 export async function loader({ params }: LoaderFunctionArgs): Promise<null> {
   await queryClient.ensureQueryData(schoolQuery(params.code ?? ''));

@@ -5,7 +5,7 @@ import type TestAgent from 'supertest/lib/agent.js';
 import { afterAll } from 'vitest';
 import { FACTORY_PASSWORD } from '#seeds/factories/password.ts';
 import { createApp } from '#server/app.ts';
-import { readConfig } from '#server/config.ts';
+import { type Config, readConfig } from '#server/config.ts';
 import { sequelize } from '#server/db/sequelize.ts';
 import { createLogger } from '#server/http/request-log.ts';
 import type { DemoPeople } from '#server/services/people/sign-in-page.ts';
@@ -44,12 +44,23 @@ afterAll(async () => {
   await sequelize.close();
 });
 
-/** The app over the worker's database, without a port. */
-export function testApp(options: { clock?: () => number; demo?: DemoPeople } = {}): Express {
+/** A pool of the worker's database for sessions and rate limits; closed when the file's tests are done. */
+export function testPool(): pg.Pool {
   const pool = new pg.Pool({ connectionString: process.env.DATABASE_URL, max: 4 });
   pools.push(pool);
-  return createApp({ config: testConfig(), log: createLogger('silent'), pool, ...options });
+  return pool;
 }
+
+interface TestAppOptions {
+  clock?: () => number;
+  demo?: DemoPeople;
+  /** What differs from the tests' own configuration. */
+  config?: Partial<Config>;
+}
+
+/** The app over the worker's database, without a port. */
+export const testApp = ({ config, ...options }: TestAppOptions = {}): Express =>
+  createApp({ config: { ...testConfig(), ...config }, log: createLogger('silent'), pool: testPool(), ...options });
 
 /** A browser-like client: keeps its cookie and says that its requests come from our own pages. */
 export function browser(app: Express): TestAgent {

@@ -48,7 +48,7 @@ interface VisitorOptions {
 }
 
 /** One Chromium for a test file; each visitor gets a context of their own. */
-export function useChromium() {
+export function withChromium() {
   let browser: Browser;
   beforeAll(async () => {
     browser = await chromium.launch({

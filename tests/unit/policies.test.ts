@@ -137,6 +137,7 @@ const table: Row[] = [
   ...ofClass('set 1', { classId: 'maths 1', ...maths }, { read: inMaths, setTaught: ['teacher', 'head'] }),
   ...ofQuestion('new in maths', draft, { create: inMaths, read: inMaths }),
   ...ofQuestion('the teacher’s draft', draft, {
+    read: inMaths,
     edit: ['teacher', 'head'],
     send: ['teacher', 'head'],
     discardDraft: ['teacher', 'head'],
@@ -146,6 +147,7 @@ const table: Row[] = [
     retire: [],
   }),
   ...ofQuestion('the teacher’s, in review', inReview, {
+    read: inMaths,
     edit: [],
     send: [],
     discardDraft: [],
@@ -154,7 +156,11 @@ const table: Row[] = [
     startVersion: [],
     retire: [],
   }),
-  ...ofQuestion('the head’s own, in review', headsOwn, { putLive: ['teacher', 'colleague'], returnToAuthor: inMaths }),
+  ...ofQuestion('the head’s own, in review', headsOwn, {
+    read: inMaths,
+    putLive: ['teacher', 'colleague'],
+    returnToAuthor: inMaths,
+  }),
   ...ofQuestion('the teacher’s, live', live, {
     read: inMaths,
     edit: [],
@@ -163,6 +169,7 @@ const table: Row[] = [
     retire: ['teacher', 'head'],
   }),
   ...ofQuestion('live, with a colleague’s draft', liveWithDraft, {
+    read: inMaths,
     edit: ['colleague', 'head'],
     startVersion: [],
     retire: ['teacher', 'head'],

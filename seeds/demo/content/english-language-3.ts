@@ -118,7 +118,7 @@ const viewpointWriting: TopicContent = {
         point('Is accurate in spelling, punctuation and sentence structure', { allow: ['one minor slip'] }),
       ],
       model:
-        'Councillors, where did you learn to ride a bicycle? My own daughter learned last spring on the path you now plan to bury under concrete. This park is used by toddlers, by runners and by neighbours who have no other garden. Please do not build on it.',
+        'Councillors, where did you learn to ride a bicycle? My own daughter learned last spring on the path you now plan to cover with concrete. This park is used by toddlers, by runners and by neighbours who have no other garden. Please do not build on it.',
       guidance:
         'Techniques earn marks when they serve the argument. Decide what the listener should feel, then choose the technique that does it.',
     }),

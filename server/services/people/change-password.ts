@@ -23,6 +23,7 @@ interface Found {
 export async function changePassword(
   user: { userId: string; schoolId: string },
   { current, next }: ChangePassword,
+  requestId?: string,
 ): Promise<void> {
   const [found] = await withSchool(user.schoolId, () =>
     select<Found>(
@@ -42,8 +43,9 @@ export async function changePassword(
   });
   if (fault) throw unprocessable([{ pointer: '#/next', detail: fault }]);
   const passwordHash = await hashPassword(next);
-  await withSchool(user.schoolId, async () => {
+  const change = async () => {
     await User.update({ passwordHash }, { where: { id: user.userId } });
     await recordAudit(user, 'change-password', 'user', user.userId, 'done', ['password_hash']);
-  });
+  };
+  await withSchool(user.schoolId, change, { requestId });
 }

@@ -3,6 +3,7 @@ import { z } from 'zod';
 import { findSchoolId } from '#server/db/directory.ts';
 import { select, withSchool } from '#server/db/scope.ts';
 import { notFound } from '#server/errors.ts';
+import { recordAudit } from '#server/services/audit/record-audit.ts';
 import { signInPageSchema } from '#shared/schemas/auth.ts';
 import type { DemoPeople } from './sign-in-page.ts';
 
@@ -21,15 +22,18 @@ export async function readDemoPeople(file: string): Promise<DemoPeople> {
   return {
     people,
     /** @throws Problem 404 for anybody who is not on the list of a demo school */
-    async find(schoolCode, username) {
+    async find(schoolCode, username, requestId) {
       const schoolId = await findSchoolId(schoolCode);
       if (!schoolId || !people.some((person) => person.username === username)) throw notFound();
-      const [row] = await withSchool(schoolId, () =>
-        select<{ id: string }>(
-          `SELECT u.id FROM users u, schools s WHERE s.is_demo AND u.username = $1 AND u.disabled_at IS NULL`,
+      const work = async () => {
+        const [found] = await select<{ id: string }>(
+          'SELECT u.id FROM users u, schools s WHERE s.is_demo AND u.username = $1 AND u.disabled_at IS NULL',
           [username],
-        ),
-      );
+        );
+        if (found) await recordAudit({ userId: found.id }, 'sign-in', 'user', found.id, 'done');
+        return found;
+      };
+      const row = await withSchool(schoolId, work, { requestId });
       if (!row) throw notFound();
       return { userId: row.id, schoolId };
     },

@@ -7,7 +7,7 @@ import type { SignInPageDto } from '#shared/schemas/auth.ts';
 /** The demo school's people: offered on its sign-in page, and signed in by one click. */
 export interface DemoPeople {
   people: SignInPageDto['demoPeople'];
-  find: (schoolCode: string, username: string) => Promise<{ userId: string; schoolId: string }>;
+  find: (schoolCode: string, username: string, requestId?: string) => Promise<{ userId: string; schoolId: string }>;
 }
 
 /** The school's name for its sign-in page. @throws Problem 404 where no school has the code */

@@ -26,20 +26,25 @@ const findByName = async (name: string): Promise<Found | undefined> =>
  * Checks a name and password. The school is known before the person is looked up; hashing happens outside any
  * transaction; an unknown, a disabled and a wrong-password account take the same path.
  */
-export async function verifySignIn(credentials: SignIn): Promise<{ userId: string; schoolId: string } | null> {
+export async function verifySignIn(
+  credentials: SignIn,
+  requestId?: string,
+): Promise<{ userId: string; schoolId: string } | null> {
   const schoolId = await findSchoolId(credentials.schoolCode);
   const found = schoolId ? await withSchool(schoolId, () => findByName(credentials.name)) : undefined;
   const hash = found && !found.disabled_at ? found.password_hash : null;
   const matches = await verifyPassword(hash, credentials.password);
   if (!schoolId || !found || !matches) {
-    if (schoolId) await withSchool(schoolId, () => recordAudit(null, 'sign-in', 'user', found?.id ?? null, 'refused'));
+    const refused = () => recordAudit(null, 'sign-in', 'user', found?.id ?? null, 'refused');
+    if (schoolId) await withSchool(schoolId, refused, { requestId });
     return null;
   }
   const renewed = hash && needsRehash(hash) ? await hashPassword(credentials.password) : null;
-  await withSchool(schoolId, async () => {
+  const signedIn = async () => {
     if (renewed) await User.update({ passwordHash: renewed }, { where: { id: found.id } });
     await recordAudit({ userId: found.id }, 'sign-in', 'user', found.id, 'done');
-  });
+  };
+  await withSchool(schoolId, signedIn, { requestId });
   return { userId: found.id, schoolId };
 }
 

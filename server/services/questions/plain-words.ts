@@ -32,7 +32,7 @@ export function plainWords(markdown: string): string {
     })
     .replace(/^\s{0,3}(?:#{1,6}\s|>\s?|[-+*]\s)/gm, '')
     .replace(/^[\s|:-]+$/gm, '')
-    .replace(/\\([\\`*_{}[\]()#+.!$|-])/g, '$1')
+    .replace(/\\([!-/:-@[-`{-~])/g, '$1')
     .replace(/[*`|]/g, ' ')
     .replace(/(?<!\w)_+|_+(?!\w)/g, ' ');
   return foldText([words, ...sources].join(' '));

@@ -8,6 +8,8 @@ export interface ValueContext {
   /** The student's local date, in whole days since 1970-01-01. */
   todayNumber: number;
   topics: ReadonlyMap<string, TopicRecall>;
+  /** Live questions by subject. */
+  itemsInSubject: ReadonlyMap<string, number>;
   /** The lowest third, by exam-day recall, of the topics with anything attempted. */
   weakerTopicIds: ReadonlySet<string>;
 }
@@ -15,11 +17,14 @@ export interface ValueContext {
 /** Reads the topics' figures from all of a student's live questions, those not to be asked today included. */
 export function contextOf(candidates: readonly Candidate[], today: string): ValueContext {
   const topics = new Map<string, TopicRecall>();
+  const itemsInSubject = new Map<string, number>();
   for (const [topicId, items] of byTopic(candidates)) topics.set(topicId, topicRecall(items, today));
+  for (const { subjectId } of candidates) itemsInSubject.set(subjectId, (itemsInSubject.get(subjectId) ?? 0) + 1);
   const known = [...topics].flatMap(([topicId, { onExamDay }]) => (onExamDay === null ? [] : [{ topicId, onExamDay }]));
   known.sort((a, b) => a.onExamDay - b.onExamDay || compareText(a.topicId, b.topicId));
   const weaker = known.slice(0, Math.floor(known.length / 3));
-  return { todayNumber: dayNumber(today), topics, weakerTopicIds: new Set(weaker.map(({ topicId }) => topicId)) };
+  const weakerTopicIds = new Set(weaker.map(({ topicId }) => topicId));
+  return { todayNumber: dayNumber(today), topics, itemsInSubject, weakerTopicIds };
 }
 
 function byTopic(candidates: readonly Candidate[]): Map<string, Candidate[]> {

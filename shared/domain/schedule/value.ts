@@ -28,8 +28,10 @@ const SOON_DAYS = 7;
 const BARELY_FORMED = 1;
 
 /**
- * Questions due or new, worth the marks per second that rest on them, more where the topic is weak for its paper and
- * where the paper is near: (share of marks ÷ seconds) × (1 − topic's exam-day recall) × 5 ÷ (days + 5).
+ * Questions due or new, worth the marks per second they ask for, more where the topic carries much of its subject, is
+ * weak for its paper and where the paper is near: (marks ÷ seconds) × (share of marks relative to the subject's average
+ * question) × (1 − topic's exam-day recall) × 5 ÷ (days + 5). Relative to the average, so that a subject with many
+ * questions in the bank, or with long ones, is not put last for it.
  */
 export const dueWeakNearest: ValueFunction = (candidate, context) => {
   const { memory } = candidate;
@@ -37,12 +39,13 @@ export const dueWeakNearest: ValueFunction = (candidate, context) => {
   const elapsed = memory === null ? 0 : context.todayNumber - dayNumber(memory.lastOn);
   if (memory !== null && elapsed < memory.stability) return null;
   const weakness = 1 - recallWithUnseen(context.topics.get(candidate.topicId));
-  const marksPerSecond = itemWeight(candidate) / secondsOf(candidate);
+  const share = itemWeight(candidate) * (context.itemsInSubject.get(candidate.subjectId) ?? 1);
+  const worth = (share * candidate.marks) / secondsOf(candidate);
   const isBarelyFormed = memory !== null && memory.stability < BARELY_FORMED;
   const recallToday = memory === null ? UNSEEN_RECALL : recall(elapsed, memory.stability);
   return {
     tier: days === 1 || isBarelyFormed ? 1 : 2,
-    score: (marksPerSecond * weakness * NEARNESS_DAYS) / (days + NEARNESS_DAYS),
+    score: (worth * weakness * NEARNESS_DAYS) / (days + NEARNESS_DAYS),
     recall: recallToday,
     reason: reasonFor(candidate, context, { days, isBarelyFormed, recallToday }),
   };

@@ -32,8 +32,8 @@ const isFull = (part: ResultPart): boolean => part.points.every((point) => point
 
 function PartScheme({ part, letter }: { part: ResultPart; letter: string | null }) {
   return (
-    <div className="[&:not(:first-child)]:mt-4">
-      {letter ? <h4 className="text-sm font-semibold text-ink-2">{letter}</h4> : null}
+    <div>
+      {letter ? <h3 className="!text-sm font-semibold text-ink-2 !font-text !tracking-normal">{letter}</h3> : null}
       <MarkScheme points={part.points} isDrawn />
       {isFull(part) ? null : (
         <p className="mt-2 text-sm text-ink-2">
@@ -132,13 +132,15 @@ export function MarkedView({ item, number, result, steps, isFresh }: MarkedViewP
               <h2 ref={heading} tabIndex={-1} className="!text-[1.125rem] !leading-6">
                 Mark scheme
               </h2>
-              {result.parts.map((part, index) => (
-                <PartScheme
-                  key={partLetter(index)}
-                  part={part}
-                  letter={result.parts.length > 1 ? partLetter(index) : null}
-                />
-              ))}
+              <div className="grid gap-4">
+                {result.parts.map((part, index) => (
+                  <PartScheme
+                    key={partLetter(index)}
+                    part={part}
+                    letter={result.parts.length > 1 ? partLetter(index) : null}
+                  />
+                ))}
+              </div>
             </section>
             <Explanation result={result} />
           </div>

@@ -22,12 +22,11 @@ const marksOf = (result: AnswerResultDto, ticks: Ticks): number =>
     .reduce((sum, marks) => sum + marks, 0);
 
 /** Arrow keys move between the tick boxes of the whole question. */
-function moveFocus(event: KeyboardEvent<HTMLElement>): void {
+function moveFocus(event: KeyboardEvent<HTMLInputElement>): void {
   const step = event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0;
   if (step === 0) return;
-  const boxes = [...event.currentTarget.querySelectorAll<HTMLInputElement>('input[type=checkbox]')];
-  const at = boxes.indexOf(event.target as HTMLInputElement);
-  if (at < 0) return;
+  const boxes = [...document.querySelectorAll<HTMLInputElement>('[data-ticks] input')];
+  const at = boxes.indexOf(event.currentTarget);
   event.preventDefault();
   boxes[Math.min(Math.max(at + step, 0), boxes.length - 1)]?.focus();
 }
@@ -41,6 +40,7 @@ function TickRow({ point, isOn, onChange }: { point: SchemePoint; isOn: boolean;
             type="checkbox"
             className="sr-only"
             checked={isOn}
+            onKeyDown={moveFocus}
             onChange={(event) => onChange(event.target.checked)}
           />
           {isOn ? <Tick isDrawn /> : null}
@@ -68,7 +68,7 @@ interface PartTicksProps {
 
 function PartTicks({ part, letter, ticks, onTick }: PartTicksProps) {
   return (
-    <div className="[&:not(:first-child)]:mt-5">
+    <div>
       {letter ? <h3 className="!text-base !leading-6">{letter}</h3> : null}
       {part.markedBy === 'plait' ? (
         <>
@@ -79,7 +79,7 @@ function PartTicks({ part, letter, ticks, onTick }: PartTicksProps) {
         </>
       ) : (
         <>
-          <ul className="border-b border-rule">
+          <ul className="border-b border-rule" data-ticks="">
             {keyed(part.points, (point) => point.text).map(({ key, item: point, index }) => (
               <TickRow key={key} point={point} isOn={ticks[index] ?? false} onChange={(isOn) => onTick(index, isOn)} />
             ))}
@@ -128,20 +128,22 @@ export function SelfMarkView({ item, number, result, kept, isSending, onTicks, o
           </div>
         </SheetRow>
         <SheetRow hasRule marks={<div className="flex items-end justify-center h-full pb-5">{badge}</div>}>
-          <section className="py-5" onKeyDown={moveFocus} aria-labelledby="self-mark">
+          <section className="py-5" aria-labelledby="self-mark">
             <h2 ref={heading} id="self-mark" tabIndex={-1} className="!text-[1.125rem] !leading-6">
               Tick each point you earned
             </h2>
             <p className="hint mb-3">Same meaning counts. Same words are not needed.</p>
-            {result.parts.map((part, at) => (
-              <PartTicks
-                key={partLetter(at)}
-                part={part}
-                letter={result.parts.length > 1 ? partLetter(at) : null}
-                ticks={ticks[at] ?? []}
-                onTick={(index, isOn) => change(at, index, isOn)}
-              />
-            ))}
+            <div className="grid gap-5">
+              {result.parts.map((part, at) => (
+                <PartTicks
+                  key={partLetter(at)}
+                  part={part}
+                  letter={result.parts.length > 1 ? partLetter(at) : null}
+                  ticks={ticks[at] ?? []}
+                  onTick={(index, isOn) => change(at, index, isOn)}
+                />
+              ))}
+            </div>
             <div className="md:hidden flex items-center justify-between mt-4">
               <span className="text-sm text-ink-2">Your mark</span>
               {badge}

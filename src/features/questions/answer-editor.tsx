@@ -78,7 +78,7 @@ function TextAnswer({ part }: { part: number }) {
       <TextArea
         isSmall
         label="Accepted answers"
-        hint="One a line. Capitals and small slips of spelling are let through."
+        hint="One a line. Capitals, hyphens and “the” do not matter."
         id={fieldId(`${name}.accept`)}
         rows={3}
         error={errorAt(formState.errors, `${name}.accept`)}

@@ -80,6 +80,23 @@ export const errorAt = (errors: FieldErrors<QuestionForm>, path: string): string
   return typeof found === 'string' ? found : undefined;
 };
 
+/** Where a field stands on the page, for fields of one level; list items keep their own order. */
+const PLACES = [
+  'root',
+  'topicIds',
+  'kind',
+  'tier',
+  'expectedSeconds',
+  'stem',
+  'parts',
+  'prompt',
+  'points',
+  'answer',
+  'modelAnswer',
+  'guidance',
+];
+const placeOf = (key: string) => (/^\d+$/.test(key) ? Number(key) : PLACES.indexOf(key));
+
 /** The lines of the error summary, from the form's present errors. */
 export function problemsOf(errors: FieldErrors<QuestionForm>): FieldProblem[] {
   const problems: FieldProblem[] = [];
@@ -89,9 +106,9 @@ export function problemsOf(errors: FieldErrors<QuestionForm>): FieldProblem[] {
       problems.push({ fieldId: fieldId(path.replace(/\.root$/, '')), message: node.message });
       return;
     }
-    for (const [key, child] of Object.entries(node)) {
-      if (key !== 'ref') walk(child, path ? `${path}.${key}` : key);
-    }
+    const entries = Object.entries(node).filter(([key]) => key !== 'ref');
+    entries.sort(([a], [b]) => placeOf(a) - placeOf(b));
+    for (const [key, child] of entries) walk(child, path ? `${path}.${key}` : key);
   };
   walk(errors, '');
   return problems;

@@ -23,6 +23,9 @@ const buttons: { act: MarkdownAct; label: string; face: ReactNode; key?: string 
   { act: 'subscript', label: 'Subscript, as in H₂O', face: 'H₂O' },
 ];
 
+/** Height of a line of source: a field that grows with its text forgets its rows. */
+const LINE_REM = 1.55;
+
 /** Replaces text as typing would, so that Undo still works. */
 function applyEdit(area: HTMLTextAreaElement, act: MarkdownAct) {
   const edit = editMarkdown(act, area.value, area.selectionStart, area.selectionEnd);
@@ -92,6 +95,7 @@ export function MarkdownEditor({ control, name, label, hint, rows = 5 }: Markdow
             }}
             id={id}
             rows={rows}
+            style={{ minHeight: `${rows * LINE_REM + 1.25}rem` }}
             spellCheck
             className="block w-full resize-y bg-transparent px-3 py-2.5 [field-sizing:content] [overflow-wrap:anywhere]"
             aria-invalid={error ? true : undefined}

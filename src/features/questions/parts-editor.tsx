@@ -4,9 +4,10 @@ import { useFieldArray, useFormContext } from 'react-hook-form';
 import { partLetter } from '#src/components/exam-question.tsx';
 import { useToast } from '#src/components/toast.tsx';
 import { fieldId } from './check-question.ts';
+import { emptyPart } from './empty-question.ts';
 import { focusSoon } from './focus-soon.ts';
 import { PartEditor } from './part-editor.tsx';
-import { emptyPart, type QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-form.ts';
 
 const MOST_PARTS = 8;
 const addId = fieldId('parts.add');

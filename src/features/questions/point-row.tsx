@@ -40,7 +40,7 @@ export function PointRow({ part, index, count, hasCodes, onMove, onRemove }: Poi
           className="!min-h-9"
           {...register(`${name}.code`)}
         >
-          <option value="">none</option>
+          <option value="">–</option>
           <option value="M">M</option>
           <option value="A">A</option>
           <option value="B">B</option>

@@ -3,9 +3,10 @@ import { useState } from 'react';
 import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 import { useToast } from '#src/components/toast.tsx';
 import { errorAt, fieldId } from './check-question.ts';
+import { emptyPoint } from './empty-question.ts';
 import { focusSoon } from './focus-soon.ts';
 import { PointRow } from './point-row.tsx';
-import { emptyPoint, type QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-form.ts';
 
 interface PointsEditorProps {
   part: number;

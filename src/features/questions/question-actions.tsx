@@ -151,7 +151,9 @@ function useSteps(
     );
   };
   const discard = async () => {
-    await discarding.mutateAsync(current.revision).then(
+    // A save on its way would make the revision old, so it goes first.
+    const revision = (await settle()) ?? current.revision;
+    await discarding.mutateAsync(revision).then(
       () => {
         onDone();
         toast(`The draft of question ${number} is gone.`);

@@ -18,13 +18,13 @@ import { QuestionActions } from './question-actions.tsx';
 import { type QuestionForm, toDraftBody } from './question-form.ts';
 import { QuestionHeader } from './question-header.tsx';
 import { QuestionPreview } from './question-preview.tsx';
-import { questionText } from './question-text.ts';
 import { SaveTrouble } from './save-trouble.tsx';
 import { saveWords, statusWords } from './status-words.ts';
 import { TryAnswers } from './try-answers.tsx';
 import { useDraftSaving } from './use-draft-saving.ts';
 import { useNow } from './use-now.ts';
 import { useSend } from './use-send.ts';
+import { useTrouble } from './use-trouble.ts';
 import { VersionList } from './version-list.tsx';
 
 interface QuestionEditorProps {
@@ -50,7 +50,7 @@ export function QuestionEditor(props: QuestionEditorProps) {
   const toast = useToast();
   const navigate = useNavigate();
   const form = useForm<QuestionForm>({ defaultValues: initial, resolver: reviewResolver, shouldFocusError: false });
-  const { errors, isSubmitted } = form.formState;
+  const { errors } = form.formState;
   const { state, saver } = useDraftSaving({ id, subjectId: subject.id, question, form, onMade });
   const [isTrying, setIsTrying] = useState(false);
   const { send, attempt } = useSend({
@@ -63,8 +63,8 @@ export function QuestionEditor(props: QuestionEditorProps) {
 
   // A fault may lie in two fields at once, so after a refused send each save checks the whole form again.
   useEffect(() => {
-    if (isSubmitted && state.kind === 'saved') void form.trigger();
-  }, [isSubmitted, state.kind, form]);
+    if (state.kind === 'saved' && form.formState.isSubmitted) void form.trigger();
+  }, [state, form]);
 
   const lang = subjectLang(subject);
   const savedAt = question ? clockWords(question.current.savedAt, zone) : '';
@@ -72,7 +72,11 @@ export function QuestionEditor(props: QuestionEditorProps) {
     <FormProvider {...form}>
       <QuestionHeader
         title={question ? `Question ${question.number}` : 'New question'}
-        status={question ? statusWords(question, now, zone) : 'Saved as a draft once you start typing.'}
+        status={
+          question
+            ? statusWords(question, now, zone, state.kind !== 'clean')
+            : 'Saved as a draft once you start typing.'
+        }
         saving={saveWords(state, savedAt)}
         back={{ to: `/questions?subject=${subject.id}`, label: 'Questions' }}
       >
@@ -146,48 +150,4 @@ function ReviewComment({ question }: { question: QuestionDto }) {
       </p>
     </div>
   );
-}
-
-type TroubleInput = Pick<QuestionEditorProps, 'id' | 'onReload'> &
-  Pick<ReturnType<typeof useDraftSaving>, 'saver'> & { form: ReturnType<typeof useForm<QuestionForm>> };
-
-/** The ways on from a save that failed. */
-function useTrouble({ id, saver, form, onReload }: TroubleInput) {
-  const client = useQueryClient();
-  const toast = useToast();
-  const [isBusy, setIsBusy] = useState(false);
-  const fetchNewer = async () => {
-    setIsBusy(true);
-    try {
-      return await client.fetchQuery({ ...questionQuery(id), staleTime: 0 });
-    } catch {
-      toast('The newer draft could not be read. Yours is still here.');
-      return null;
-    } finally {
-      setIsBusy(false);
-    }
-  };
-  const copyMine = async () => {
-    await navigator.clipboard.writeText(questionText(form.getValues())).then(
-      () => toast('Copied. Paste it anywhere to keep it.'),
-      () => toast('The browser did not allow copying. Select the text and copy it by hand.'),
-    );
-  };
-  return {
-    isBusy,
-    onCopyMine: () => void copyMine(),
-    onTryAgain: () => void saver.flush(),
-    onLoadNewer: () =>
-      void fetchNewer().then((newer) => {
-        if (!newer) return;
-        saver.rebase(newer.current.revision, true);
-        onReload();
-      }),
-    onSaveMine: () =>
-      void fetchNewer().then((newer) => {
-        if (!newer) return;
-        saver.rebase(newer.current.revision, false);
-        void saver.flush();
-      }),
-  };
 }

@@ -2,6 +2,7 @@ import { readNumber } from '#shared/domain/marking/read-number.ts';
 import type { Tier } from '#shared/schemas/common.ts';
 import type { DraftBody, QuestionVersionDto, SaveDraft } from '#shared/schemas/question.ts';
 import type { QuestionKind } from '#shared/schemas/question-body.ts';
+import { emptyAnswer } from './empty-question.ts';
 
 export type DraftFields = Omit<SaveDraft, 'revision'>;
 type DraftPart = DraftBody['parts'][number];
@@ -54,41 +55,6 @@ export interface QuestionForm {
   guidance: string;
   parts: PartForm[];
 }
-
-export const emptyPoint = (): PointForm => ({ code: '', text: '', marks: 1, notes: [] });
-
-const emptyAnswer = (kind: AnswerForm['kind']): AnswerForm => ({
-  kind,
-  value: '',
-  accuracy: 'tolerance',
-  tolerance: '',
-  min: '',
-  max: '',
-  unit: '',
-  isUnitRequired: false,
-  accept: '',
-  reject: '',
-  unlisted: 'selfMark',
-});
-
-export const emptyPart = (): PartForm => ({
-  prompt: '',
-  lines: 2,
-  answerLabel: '',
-  answer: emptyAnswer('text'),
-  points: [emptyPoint()],
-  modelAnswer: '',
-});
-
-export const emptyQuestion = (topicIds: string[] = []): QuestionForm => ({
-  kind: 'shortAnswer',
-  tier: '',
-  expectedSeconds: 90,
-  topicIds,
-  stem: '',
-  guidance: '',
-  parts: [emptyPart()],
-});
 
 /** Reads a typed number, "−3", "6.02×10^23" and "1,200" included. Null where it is not one, or has a unit. */
 export function readTyped(text: string): number | null {

@@ -5,8 +5,7 @@ import { EmptyState } from '#src/components/empty-state.tsx';
 import { ErrorState } from '#src/components/error-state.tsx';
 import { Pager } from '#src/components/pager.tsx';
 import { Skeleton } from '#src/components/skeleton.tsx';
-import { readPage, usePageLinks } from '#src/lib/cursor-pages.ts';
-import { rangeWords } from '#src/lib/figures.ts';
+import { usePages } from '#src/lib/cursor-pages.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { subjectLang, subjectWords } from '#src/lib/subject-words.ts';
 import { questionListQuery } from '#src/queries/questions.ts';
@@ -27,10 +26,9 @@ export function QuestionList({ subject, topics, search, onSearch }: QuestionList
   const list = useQuery(questionListQuery(toFilter(subject.id, search)));
   const asked = readListSearch(search);
   const page = list.data;
-  const links = usePageLinks(search, page?.items.length ?? 0, page?.nextCursor ?? null);
+  const pages = usePages(search, page, list.isPlaceholderData);
   const counts = page?.counts;
   const all = counts && counts.draft + counts.inReview + counts.live + counts.retired;
-  const words = page ? rangeWords(readPage(search).from, page.items.length, page.total) : '';
   const lang = subjectLang(subject);
   return (
     <div className="grid grid-cols-1 gap-x-9 lg:grid-cols-[13.5rem_minmax(0,1fr)]">
@@ -44,7 +42,7 @@ export function QuestionList({ subject, topics, search, onSearch }: QuestionList
             onChange={(change, isTyping = false) => onSearch(withSearch(search, change), isTyping)}
           />
           <p role="status" className="num ml-auto pb-2 text-sm text-ink-2">
-            {page && page.items.length === 0 ? 'None' : words}
+            {page && page.items.length === 0 ? 'None' : pages.words}
           </p>
         </div>
         {list.isError && !page ? (
@@ -60,7 +58,7 @@ export function QuestionList({ subject, topics, search, onSearch }: QuestionList
         {page && page.items.length > 0 ? (
           <>
             <QuestionTable rows={page.items} lang={lang} isBusy={list.isPlaceholderData} />
-            <Pager words={words} {...links} />
+            <Pager {...pages} />
           </>
         ) : null}
         {page && page.items.length === 0 ? <NothingListed subject={subject} isNarrowed={isNarrowed(asked)} /> : null}

@@ -12,16 +12,17 @@ const views = [
 ] as const;
 type View = (typeof views)[number]['value'];
 
-const narrowMargin =
-  '[&_.answer-line]:w-20 sm:[&_.answer-line]:w-36 [&_.rm]:hidden [&_.qtext]:text-[1.0625rem] [&_.qtext]:leading-7 [&_.qnum]:text-[1.75rem]';
+const narrowMargin = '[&_.rm]:hidden [&_.qtext]:text-[1.0625rem] [&_.qtext]:leading-7 [&_.qnum]:text-[1.75rem]';
 const frames: Record<View, string> = {
-  screen: `[&_.qsheet]:grid-cols-[clamp(40px,6vw,58px)_minmax(0,1fr)] md:[&_.qsheet>div]:px-6 md:[&_.qsheet>.mg]:px-0 ${narrowMargin}`,
-  phone: `mx-auto max-w-[22.5rem] [&_.qsheet]:grid-cols-[46px_minmax(0,1fr)] [&_.qsheet>div]:px-4 [&_.qsheet>.mg]:px-0 ${narrowMargin}`,
-  print: `mx-auto max-w-[37rem] bg-white p-5 sm:p-9 text-black [&_.qsheet]:grid-cols-[48px_minmax(0,1fr)] [&_.qsheet>div]:px-5 [&_.qsheet>.mg]:px-0 [&_.qsheet>div:nth-child(3n+2)]:pr-0 [&_.qsheet]:shadow-none ${narrowMargin}`,
+  screen: `[&_.answer-line]:w-20 sm:[&_.answer-line]:w-36 [&_.qsheet]:grid-cols-[clamp(40px,6vw,58px)_minmax(0,1fr)] md:[&_.qsheet>div]:px-6 md:[&_.qsheet>.mg]:px-0 ${narrowMargin}`,
+  phone: `[&_.answer-line]:w-20 mx-auto max-w-[22.5rem] [&_.qsheet]:grid-cols-[46px_minmax(0,1fr)] [&_.qsheet>div]:px-4 [&_.qsheet>.mg]:px-0 ${narrowMargin}`,
+  print: `mx-auto max-w-[37rem] p-5 sm:p-9 [&_.answer-line]:w-20 sm:[&_.answer-line]:w-36 [&_.qsheet]:grid-cols-[48px_minmax(0,1fr)] [&_.qsheet>div]:px-5 [&_.qsheet>.mg]:px-0 [&_.qsheet>div:nth-child(3n+2)]:pr-0 [&_.qsheet]:shadow-none ${narrowMargin}`,
 };
 
 /** Paper is white in every theme: the tokens of look.md, section 11. */
 const paper = {
+  color: '#000',
+  background: '#fff',
   '--sheet': '#fff',
   '--ink': '#000',
   '--ink-2': '#222',

@@ -1,8 +1,9 @@
 import { type ReactNode, useState } from 'react';
 import type { SubjectDto, TopicDto } from '#shared/schemas/curriculum.ts';
 import type { QuestionDto } from '#shared/schemas/question.ts';
+import { emptyQuestion } from './empty-question.ts';
 import { QuestionEditor } from './question-editor.tsx';
-import { emptyQuestion, type QuestionForm, toQuestionForm } from './question-form.ts';
+import { type QuestionForm, toQuestionForm } from './question-form.ts';
 import { QuestionReader } from './question-reader.tsx';
 
 interface QuestionWorkspaceProps {

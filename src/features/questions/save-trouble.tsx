@@ -19,7 +19,7 @@ export function SaveTrouble({ why, isBusy, onLoadNewer, onSaveMine, onCopyMine, 
           load the newer draft, or save yours in its place.
         </p>
         <div className="mt-3 flex flex-wrap gap-2">
-          <button type="button" className="btn sm max-md:!min-h-11" disabled={isBusy} onClick={onCopyMine}>
+          <button type="button" className="btn quiet sm max-md:!min-h-11" disabled={isBusy} onClick={onCopyMine}>
             Copy mine
           </button>
           <button type="button" className="btn quiet sm max-md:!min-h-11" disabled={isBusy} onClick={onLoadNewer}>

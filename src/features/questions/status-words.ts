@@ -42,8 +42,11 @@ export function saveWords(state: SaveState, savedAt: string): string | null {
   }
 }
 
-/** "Version 3, draft, saved 2 minutes ago. Version 2 is live." */
-export function statusWords(question: QuestionDto, now: number, zone: string): string {
+/**
+ * "Version 3, draft, saved 2 minutes ago. Version 2 is live."
+ * @param hasSaving true where the state of saving is said beside it, so that the time is not said twice
+ */
+export function statusWords(question: QuestionDto, now: number, zone: string, hasSaving = false): string {
   const { current, live } = question;
   const first = `Version ${current.version}, ${statusInSentence[current.status]}`;
   const when =
@@ -51,7 +54,9 @@ export function statusWords(question: QuestionDto, now: number, zone: string): s
       ? `, by ${current.author.name}, sent ${agoWords(current.sentAt, now, zone)}`
       : current.status === 'live' && current.liveAt
         ? ` since ${dayMonthWords(dayOf(current.liveAt, zone))}`
-        : `, saved ${agoWords(current.savedAt, now, zone)}`;
+        : hasSaving
+          ? ''
+          : `, saved ${agoWords(current.savedAt, now, zone)}`;
   const also = live && live.id !== current.id ? ` Version ${live.version} is live.` : '';
   return `${first}${when}.${also}`;
 }

@@ -1,7 +1,7 @@
 import type { SignInPageDto } from '#shared/schemas/auth.ts';
 import { roleWords } from '#shared/schemas/role.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
-import { useDemoSignIn } from '#src/queries/me.ts';
+import { useDemoSignIn } from '#src/queries/session.ts';
 
 interface DemoPeopleProps {
   school: SignInPageDto;

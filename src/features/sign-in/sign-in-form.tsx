@@ -1,9 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { useId, useRef } from 'react';
+import { useId } from 'react';
 import { useForm } from 'react-hook-form';
 import { signInSchema } from '#shared/schemas/auth.ts';
 import { Field } from '#src/components/field.tsx';
-import { useSignIn } from '#src/queries/me.ts';
+import { useSignIn } from '#src/queries/session.ts';
 import { PasswordField } from './password-field.tsx';
 import { signInWords } from './sign-in-words.ts';
 
@@ -15,7 +15,6 @@ interface SignInFormProps {
 /** Name and password of one school. */
 export function SignInForm({ schoolCode, onSignedIn }: SignInFormProps) {
   const signIn = useSignIn();
-  const fault = useRef<HTMLParagraphElement>(null);
   const hintId = useId();
   const { register, handleSubmit, setError, formState } = useForm({
     resolver: zodResolver(signInSchema),
@@ -25,17 +24,11 @@ export function SignInForm({ schoolCode, onSignedIn }: SignInFormProps) {
   const submit = handleSubmit((input) =>
     signIn.mutateAsync(input).then(onSignedIn, (error: unknown) => {
       setError('root', { type: 'server', message: signInWords(error) });
-      fault.current?.focus();
     }),
   );
   return (
     <form className="grid gap-5" onSubmit={(event) => void submit(event)} noValidate aria-label="Sign in">
-      <p
-        ref={fault}
-        role="alert"
-        tabIndex={-1}
-        className={errors.root ? 'note gap text-md focus:outline-none' : 'hidden'}
-      >
+      <p role="alert" className={errors.root ? 'note gap text-md' : 'hidden'}>
         {errors.root?.message}
       </p>
       <Field

@@ -29,7 +29,10 @@ export function SignInFrame({ children, foot }: { children: ReactNode; foot?: Re
         <div className="my-auto py-10 w-full max-w-[25rem]">{children}</div>
         {foot ? <div className="text-sm text-ink-2">{foot}</div> : null}
       </div>
-      <div className="hidden lg:block relative overflow-hidden border-l border-rule bg-sheet" aria-hidden="true">
+      <div
+        className="hidden lg:block sticky top-0 h-screen overflow-hidden border-l border-rule bg-sheet"
+        aria-hidden="true"
+      >
         <div className="absolute inset-0 grid grid-cols-[88px_1fr_96px]">
           <div className="border-r border-rule" />
           <div />

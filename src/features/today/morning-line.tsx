@@ -25,14 +25,14 @@ export function MorningLine({ set, zone }: { set: TodaySetDto; zone: string }) {
   }
   const isOpen = set.status === 'open';
   return (
-    <p className="text-sm text-ink-2">
+    <p className="flex flex-wrap items-center gap-x-3 text-sm text-ink-2">
       <Link className="link text-base inline-flex items-center min-h-11" to="/set/morning">
         {isOpen ? 'Continue morning set' : 'Start morning set'}
       </Link>
       <span className="num">
         {isOpen
-          ? `, ${set.answered} of ${set.questions} answered`
-          : `, ${set.questions} questions, hardest first, about ${durationWords(set.minutes)}`}
+          ? `${set.answered} of ${set.questions} answered`
+          : `${set.questions} questions, hardest first, about ${durationWords(set.minutes)}`}
       </span>
     </p>
   );

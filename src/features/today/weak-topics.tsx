@@ -21,7 +21,7 @@ export function WeakTopics({ topics, hasPapers }: { topics: TodayDto['weakTopics
               <li key={topic.id} className="flex items-center gap-3 min-h-11 py-2 border-b border-rule">
                 <StrandLabel subject={subject} />
                 <Link
-                  className="hover:underline flex-1 min-w-0 [overflow-wrap:anywhere]"
+                  className="hover:underline flex-1 min-w-0 min-h-11 -my-2 py-2.5 [overflow-wrap:anywhere]"
                   to={`/topics?subject=${subject.id}`}
                 >
                   <span className="sr-only">{subject.name}, </span>

@@ -11,7 +11,7 @@ interface SubjectTabsProps {
 /** Chooses one subject or all; kept in the address. */
 export function SubjectTabs({ subjects, chosenId }: SubjectTabsProps) {
   return (
-    <nav className="tabs lg:!gap-x-[1.1rem]" aria-label="Subject">
+    <nav className="tabs lg:!gap-x-3.5 lg:text-sm" aria-label="Subject">
       <Link to="/topics" replace preventScrollReset aria-current={chosenId === null ? 'page' : undefined}>
         All {subjects.length}
         <span className="max-lg:sr-only"> subjects</span>

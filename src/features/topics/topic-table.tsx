@@ -27,7 +27,9 @@ export function TopicTable({ groups, today }: TopicTableProps) {
             Expected recall now
           </th>
           <th scope="col">Comes back</th>
-          <th scope="col">Next paper</th>
+          <th scope="col" className="whitespace-nowrap">
+            Next paper
+          </th>
         </tr>
       </thead>
       {groups.map((group) => (
@@ -52,7 +54,7 @@ function GroupRows({ group, today }: { group: TopicGroup; today: string }) {
               {range ? `, ${range}` : null}
             </span>
             {hiddenCount > 0 ? (
-              <button type="button" className="link ml-auto font-normal" onClick={showAll}>
+              <button type="button" className="link ml-auto -my-2 min-h-9 font-normal" onClick={showAll}>
                 Show the other {hiddenCount}
                 <span className="sr-only"> {standingWords[group.standing].toLowerCase()} topics</span>
               </button>

@@ -41,6 +41,17 @@ describe('what counts more', () => {
     expect(score({ examOn: '2027-04-25' })).toBeCloseTo((score({}) * 35) / 10, 12);
   });
 
+  test('the same per second whether a question is short or long, and whether the bank is small or large', () => {
+    expect(score({ marks: 4, expectedSeconds: 180 })).toBeCloseTo(score({ marks: 1, expectedSeconds: 45 }), 12);
+    const bank = (size: number) =>
+      Array.from({ length: size }, (_, index) => aCandidate({ questionId: `q${index}`, itemsInTopic: size }));
+    const scoreIn = (size: number) => {
+      const [first, ...others] = bank(size);
+      return (first && worthOf(first, others)?.score) ?? 0;
+    };
+    expect(scoreIn(50)).toBeCloseTo(scoreIn(5), 12);
+  });
+
   test('a topic that is weak for its paper', () => {
     const due = aCandidate({ questionId: 'due', memory: memory(5, '2027-04-15') });
     const firm = aCandidate({ questionId: 'firm', memory: memory(200, '2027-04-19') });

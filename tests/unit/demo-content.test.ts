@@ -1,0 +1,148 @@
+import katex from 'katex';
+import { describe, expect, test } from 'vitest';
+import { bodyOf, type PartContent, type QuestionContent } from '#seeds/demo/content/build.ts';
+import { planSubjects, SUBJECTS } from '#seeds/demo/subjects.ts';
+import { markPart } from '#shared/domain/marking/mark-part.ts';
+import { type NumberSpec, partMarks, questionBodySchema } from '#shared/schemas/question-body.ts';
+
+interface Listed {
+  /** "MA topic 3, question 2", for messages. */
+  where: string;
+  question: QuestionContent;
+}
+
+const ALL: Listed[] = SUBJECTS.flatMap(({ code, topics }) =>
+  topics.flatMap((topic) =>
+    topic.questions.map((question, index) => ({
+      where: `${code} topic ${topic.number}, question ${index + 1}`,
+      question,
+    })),
+  ),
+);
+
+/** Faults over the whole bank, so that one run lists them all. */
+const faults = (check: (question: QuestionContent) => (string | null)[]): string[] =>
+  ALL.flatMap(({ where, question }) =>
+    check(question).flatMap((fault) => (fault === null ? [] : [`${where}: ${fault}`])),
+  );
+
+function recomputeFault({ answer, recompute }: PartContent): string | null {
+  if (!recompute) return null;
+  const value = recompute();
+  if (answer.kind !== 'number') return 'recomputes an answer that is no number';
+  return isWithin(answer, value) ? null : `recomputed as ${value}, the scheme asks for ${answer.value}`;
+}
+
+function isWithin({ value, tolerance, range }: NumberSpec, recomputed: number): boolean {
+  const slack = 1e-6 * Math.max(Math.abs(value), Math.abs(recomputed));
+  if (range) return recomputed >= range.min - slack && recomputed <= range.max + slack;
+  return Math.abs(recomputed - value) <= (tolerance ?? 0) + slack;
+}
+
+function modelAnswerFault(part: PartContent): string | null {
+  const { outcome, marks, words } = markPart(part, part.modelAnswer);
+  if (part.answer.kind === 'selfMarked')
+    return outcome === 'undecided' ? null : 'is self-marked, yet the marker decides it';
+  return outcome === 'full' && marks === partMarks(part)
+    ? null
+    : `the model answer “${part.modelAnswer}” is marked ${outcome}: ${words}`;
+}
+
+const markdownOf = ({ stem, guidance, parts }: QuestionContent): string[] => [
+  stem,
+  guidance ?? '',
+  ...parts.flatMap(({ prompt, modelAnswer, points, answer }) => [
+    prompt,
+    // Of a self-marked part it is shown as Markdown; elsewhere it is typed text.
+    ...(answer.kind === 'selfMarked' ? [modelAnswer] : []),
+    ...points.map(({ text }) => text),
+  ]),
+];
+
+function formulaFaults(markdown: string): (string | null)[] {
+  const formulas = [...markdown.matchAll(/\$\$([\s\S]+?)\$\$|(?<!\\)\$((?:\\.|[^$\\])+)\$/g)];
+  return formulas.map(([, display, inline]) => {
+    try {
+      katex.renderToString(display ?? inline ?? '', {
+        throwOnError: true,
+        strict: 'ignore',
+        displayMode: display !== undefined,
+      });
+      return null;
+    } catch (error) {
+      return String(error);
+    }
+  });
+}
+
+/** A dollar sign that opens or closes nothing. */
+const strayDollar = (markdown: string): string | null =>
+  (markdown.replaceAll('\\$', '').match(/\$/g)?.length ?? 0) % 2 === 0
+    ? null
+    : `an odd number of $ in “${markdown.slice(0, 60)}”`;
+
+describe('the demo bank', () => {
+  test('has nine subjects, eight topics or more in each, and 400 questions or more', () => {
+    expect(SUBJECTS.map(({ code }) => code).sort()).toEqual(['BI', 'CH', 'EL', 'EN', 'FR', 'GE', 'HI', 'MA', 'PH']);
+    for (const { topics } of SUBJECTS) expect(topics.length).toBeGreaterThanOrEqual(8);
+    expect(ALL.length).toBeGreaterThanOrEqual(400);
+  });
+
+  test('holds only questions that may be sent for review', () => {
+    expect(
+      faults((question) => {
+        const parsed = questionBodySchema.safeParse(bodyOf(question));
+        const isAsked = question.stem.trim() !== '' || question.parts.every(({ prompt }) => prompt.trim() !== '');
+        const isSelfMarked = question.parts.some(({ answer }) => answer.kind === 'selfMarked');
+        return [
+          parsed.success ? null : parsed.error.message,
+          isAsked ? null : 'asks nothing',
+          question.seconds >= 20 && question.seconds <= 1800 ? null : `${question.seconds} expected seconds`,
+          isSelfMarked === (question.kind === 'recallCard')
+            ? null
+            : 'is self-marked but no recall card, or the reverse',
+        ];
+      }),
+    ).toEqual([]);
+  });
+
+  test('gives every model answer full marks', () => {
+    expect(faults(({ parts }) => parts.map(modelAnswerFault))).toEqual([]);
+  });
+
+  test('asks for the numbers that follow from its questions', () => {
+    expect(faults(({ parts }) => parts.map(recomputeFault))).toEqual([]);
+    const recomputed = ALL.flatMap(({ question }) => question.parts.filter(({ recompute }) => recompute));
+    expect(recomputed.length).toBeGreaterThan(100);
+  });
+
+  test('has formulas that KaTeX renders', () => {
+    expect(faults((question) => markdownOf(question).flatMap(formulaFaults))).toEqual([]);
+    expect(faults((question) => markdownOf(question).map(strayDollar))).toEqual([]);
+  });
+
+  test('asks no question twice', () => {
+    const seen = new Map<string, string>();
+    const twice = ALL.flatMap(({ where, question: { stem, parts } }) => {
+      const wording = [stem, ...parts.map(({ prompt }) => prompt)].join(' ').replace(/\s+/g, ' ').trim().toLowerCase();
+      const earlier = seen.get(wording);
+      seen.set(wording, where);
+      return earlier === undefined ? [] : [`${where} asks the same as ${earlier}`];
+    });
+    expect(twice).toEqual([]);
+  });
+});
+
+describe('every specification of the demo', () => {
+  test.each(planSubjects().flatMap(({ specifications }) => specifications))(
+    '$name weighs its papers whole',
+    ({ papers, topics }) => {
+      for (const { number, marks } of papers) {
+        expect(topics.reduce((sum, { weights }) => sum + (weights[number] ?? 0), 0)).toBe(marks);
+      }
+      const numbers = topics.map(({ number }) => number);
+      expect(new Set(numbers).size).toBe(numbers.length);
+      for (const { weights } of topics) expect(Object.values(weights).some((marks) => marks > 0)).toBe(true);
+    },
+  );
+});
