@@ -28,7 +28,6 @@ export const securityHeaders = (): RequestHandler =>
     referrerPolicy: { policy: 'same-origin' },
     crossOriginOpenerPolicy: { policy: 'same-origin' },
     crossOriginResourcePolicy: { policy: 'same-origin' },
-    xPoweredBy: false,
   });
 
 const DENIED = ['camera', 'geolocation', 'microphone', 'payment', 'usb', 'display-capture', 'browsing-topics'];

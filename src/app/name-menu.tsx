@@ -19,7 +19,7 @@ export function NameMenu() {
     return () => clearTimeout(timer);
   }, []);
   return (
-    <div ref={frame} className="relative ml-auto min-w-0">
+    <div ref={frame} className="relative ml-auto -mr-2 min-w-0">
       <button
         ref={button}
         type="button"
@@ -29,7 +29,7 @@ export function NameMenu() {
           setWasOpened(true);
           toggle();
         }}
-        className="min-h-11 max-w-full rounded px-2 -mr-2 text-right text-sm leading-tight hover:bg-sunk"
+        className="block min-h-11 w-full rounded px-2 text-right text-sm leading-tight hover:bg-sunk"
       >
         <span className={scope ? 'block truncate font-semibold max-sm:sr-only' : 'block truncate font-semibold'}>
           {me.name}

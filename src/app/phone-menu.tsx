@@ -20,7 +20,7 @@ export function PhoneMenu({ places, pathname }: { places: Place[]; pathname: str
       <ul
         id="menu"
         hidden={!isOpen}
-        className="absolute left-0 top-full z-30 mt-2 w-56 rounded-lg border border-rule bg-raise p-2 shadow-lift"
+        className="absolute left-0 max-sm:-left-16 top-full z-30 mt-2 w-56 rounded-lg border border-rule bg-raise p-2 shadow-lift"
       >
         {places.map((place) => (
           <li key={place.to}>

@@ -54,6 +54,7 @@ export function testPool(): pg.Pool {
 interface TestAppOptions {
   clock?: () => number;
   demo?: DemoPeople;
+  isServing?: () => boolean;
   /** What differs from the tests' own configuration. */
   config?: Partial<Config>;
 }

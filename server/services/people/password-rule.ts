@@ -22,11 +22,7 @@ async function loadCommon(): Promise<Set<string>> {
   return new Set(list.split('\n').filter((word) => word.length >= SHORTEST.others));
 }
 
-const plain = (text: string) =>
-  text
-    .normalize('NFKD')
-    .toLowerCase()
-    .replace(/[^a-z]/g, '');
+const plain = (text: string) => text.normalize('NFKD').toLowerCase().replace(/\P{L}/gu, '');
 
 /**
  * What is wrong with a new password, in a sentence, or null. Any characters are fine, no composition is asked for;
@@ -42,7 +38,6 @@ export async function passwordFault(password: string, context: PasswordContext):
   if ((await common).has(candidate.toLowerCase())) return 'That password is used by many people. Choose another.';
   const letters = plain(candidate);
   const own = ['plait', ...context.words.flatMap((word) => [word, ...word.split(/\s+/)])].map(plain);
-  if (letters.length === 0) return 'Use some letters as well as digits.';
   const isOwnWord = own.some(
     (word) => word.length >= 3 && letters.replaceAll(word, '').length < 3 && letters.includes(word),
   );

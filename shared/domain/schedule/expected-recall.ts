@@ -17,6 +17,13 @@ export interface TopicRecall {
   items: number;
 }
 
+/** Recall of something never attempted, with nothing known about it. */
+export const UNSEEN_RECALL = 0.5;
+
+/** Expected recall of one item today, 0 to 1. @param todayNumber whole days since 1970-01-01 */
+export const recallNow = (memory: MemoryState | null, todayNumber: number): number =>
+  memory === null ? UNSEEN_RECALL : recall(todayNumber - dayNumber(memory.lastOn), memory.stability);
+
 /** Expected recall of a topic today, and on its exam day if practice stopped now. Its items weigh the same. */
 export function topicRecall(items: Iterable<TopicItem>, today: string): TopicRecall {
   const todayNumber = dayNumber(today);

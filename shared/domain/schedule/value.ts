@@ -1,9 +1,8 @@
 import { dayNumber } from '#shared/domain/time/calendar.ts';
 import type { Reason } from '#shared/schemas/reason.ts';
-import { type Candidate, itemWeight, secondsOf } from './candidate.ts';
+import { type Candidate, itemWeight } from './candidate.ts';
 import type { ValueContext } from './context.ts';
-import { recallPercent, type TopicRecall } from './expected-recall.ts';
-import { recall } from './memory.ts';
+import { recallNow, recallPercent, type TopicRecall, UNSEEN_RECALL } from './expected-recall.ts';
 
 /** What one go at a question is worth today. */
 export interface Value {
@@ -19,8 +18,6 @@ export interface Value {
 /** The scheduler's policy. Null where the question should not be asked today. */
 export type ValueFunction = (candidate: Candidate, context: ValueContext) => Value | null;
 
-/** Recall of something never attempted, with nothing known about it. */
-const UNSEEN_RECALL = 0.5;
 /** Days to a paper at which its pull has fallen to half. */
 const NEARNESS_DAYS = 5;
 const SOON_DAYS = 7;
@@ -28,10 +25,11 @@ const SOON_DAYS = 7;
 const BARELY_FORMED = 1;
 
 /**
- * Questions due or new, worth the marks per second they ask for, more where the topic carries much of its subject, is
- * weak for its paper and where the paper is near: (marks ÷ seconds) × (share of marks relative to the subject's average
- * question) × (1 − topic's exam-day recall) × 5 ÷ (days + 5). Relative to the average, so that a subject with many
- * questions in the bank, or with long ones, is not put last for it.
+ * Questions due or new, worth more where the topic carries much of its subject, is weak for its paper, and where the
+ * paper is near: share of marks relative to the subject's average question × (1 − topic's exam-day recall) ×
+ * 5 ÷ (days + 5), shared out among the topic's questions by turn: the first counts whole, the second half, and so on,
+ * so that a set takes short turns on many topics. Seconds only fill the budget, and the share is relative, so that a
+ * subject with long questions or a large bank is not put last for it.
  */
 export const dueWeakNearest: ValueFunction = (candidate, context) => {
   const { memory } = candidate;
@@ -40,12 +38,12 @@ export const dueWeakNearest: ValueFunction = (candidate, context) => {
   if (memory !== null && elapsed < memory.stability) return null;
   const weakness = 1 - recallWithUnseen(context.topics.get(candidate.topicId));
   const share = itemWeight(candidate) * (context.itemsInSubject.get(candidate.subjectId) ?? 1);
-  const worth = (share * candidate.marks) / secondsOf(candidate);
+  const turn = context.turnInTopic.get(candidate.questionId) ?? 1;
   const isBarelyFormed = memory !== null && memory.stability < BARELY_FORMED;
-  const recallToday = memory === null ? UNSEEN_RECALL : recall(elapsed, memory.stability);
+  const recallToday = recallNow(memory, context.todayNumber);
   return {
     tier: days === 1 || isBarelyFormed ? 1 : 2,
-    score: (worth * weakness * NEARNESS_DAYS) / (days + NEARNESS_DAYS),
+    score: (share * weakness * NEARNESS_DAYS) / (days + NEARNESS_DAYS) / turn,
     recall: recallToday,
     reason: reasonFor(candidate, context, { days, isBarelyFormed, recallToday }),
   };

@@ -33,23 +33,34 @@ describe('what is asked', () => {
 describe('what counts more', () => {
   const score = (given: Partial<Candidate>) => worthOf(aCandidate({ questionId: 'q', ...given }))?.score ?? 0;
 
-  test('marks per second on a nearer paper', () => {
-    expect(score({})).toBeCloseTo(((0.01 / 45) * 0.5 * 5) / 35, 12);
+  test('the share of marks on a nearer paper', () => {
+    expect(score({})).toBeCloseTo((0.01 * 0.5 * 5) / 35, 12);
     expect(score({ topicWeight: 0.2 })).toBeCloseTo(2 * score({}), 12);
-    expect(score({ expectedSeconds: 90 })).toBeCloseTo(score({}) / 2, 12);
     expect(score({ examOn: '2027-04-30' })).toBeGreaterThan(score({}));
     expect(score({ examOn: '2027-04-25' })).toBeCloseTo((score({}) * 35) / 10, 12);
   });
 
-  test('the same per second whether a question is short or long, and whether the bank is small or large', () => {
-    expect(score({ marks: 4, expectedSeconds: 180 })).toBeCloseTo(score({ marks: 1, expectedSeconds: 45 }), 12);
-    const bank = (size: number) =>
-      Array.from({ length: size }, (_, index) => aCandidate({ questionId: `q${index}`, itemsInTopic: size }));
+  test('the same whether a question is short or long, and whether the bank is small or large', () => {
+    expect(score({ marks: 4, expectedSeconds: 180 })).toBe(score({}));
     const scoreIn = (size: number) => {
-      const [first, ...others] = bank(size);
+      const [first, ...others] = Array.from({ length: size }, (_, index) =>
+        aCandidate({ questionId: `q${String(index).padStart(3, '0')}`, itemsInTopic: size }),
+      );
       return (first && worthOf(first, others)?.score) ?? 0;
     };
     expect(scoreIn(50)).toBeCloseTo(scoreIn(5), 12);
+  });
+
+  test('the first turns of a topic: the least recalled question whole, the next half', () => {
+    const [first, second] = [aCandidate({ questionId: 'a' }), aCandidate({ questionId: 'b' })];
+    expect(worthOf(second, [first])?.score).toBeCloseTo((worthOf(first, [second])?.score ?? 0) / 2, 12);
+    const forgotten = aCandidate({ questionId: 'c', memory: memory(0.5, '2026-01-01') });
+    const context = contextOf([first, second, forgotten], TODAY);
+    expect([...context.turnInTopic]).toEqual([
+      ['c', 1],
+      ['a', 2],
+      ['b', 3],
+    ]);
   });
 
   test('a topic that is weak for its paper', () => {
@@ -57,12 +68,6 @@ describe('what counts more', () => {
     const firm = aCandidate({ questionId: 'firm', memory: memory(200, '2027-04-19') });
     const lost = aCandidate({ questionId: 'lost', memory: memory(0.3, '2027-01-01') });
     expect(worthOf(due, [lost])?.score ?? 0).toBeGreaterThan(worthOf(due, [firm])?.score ?? 0);
-  });
-
-  test('seconds are bounded by the marks', () => {
-    expect(score({ expectedSeconds: 1 })).toBe(score({ expectedSeconds: 20 }));
-    expect(score({ expectedSeconds: 1000 })).toBe(score({ expectedSeconds: 120 }));
-    expect(score({ expectedSeconds: 1000, marks: 4 })).toBe(score({ expectedSeconds: 300, marks: 4 }));
   });
 });
 
