@@ -3,6 +3,7 @@ import pg from 'pg';
 import { createApp } from './app.ts';
 import { readConfig } from './config.ts';
 import { checkDatabase } from './db/check-database.ts';
+import { PatientClient } from './db/patient-client.ts';
 import { sequelize } from './db/sequelize.ts';
 import { createLogger } from './http/request-log.ts';
 
@@ -11,7 +12,12 @@ const DRAIN_MS = 15_000;
 
 const config = readConfig(process.env);
 const log = createLogger(config.LOG_LEVEL);
-const pool = new pg.Pool({ connectionString: config.DATABASE_URL, max: 5, application_name: 'plait-sessions' });
+const pool = new pg.Pool({
+  connectionString: config.DATABASE_URL,
+  max: 5,
+  application_name: 'plait-sessions',
+  Client: PatientClient,
+});
 // A dropped idle connection is replaced at the next use; without a listener it would end the process.
 pool.on('error', (error) => log.warn({ err: error }, 'idle session connection lost'));
 

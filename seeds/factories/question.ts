@@ -50,6 +50,8 @@ interface QuestionValues {
   tier?: Tier;
   body?: QuestionBody;
   expectedSeconds?: number;
+  /** Its number in the subject; the next free one of this process unless given. */
+  number?: number;
 }
 
 /** A question with one version, live unless said. */
@@ -60,7 +62,11 @@ export async function aQuestion(
 ): Promise<{ id: string; versionId: string; number: number }> {
   const { author, topicId, status = 'live', kind = 'shortAnswer', body = aNumberBody(), expectedSeconds = 60 } = values;
   return withSchool(school.id, async ({ now }) => {
-    const question = await Question.create({ subjectId: subject.id, number: unique(), authorId: author.id });
+    const question = await Question.create({
+      subjectId: subject.id,
+      number: values.number ?? unique(),
+      authorId: author.id,
+    });
     const version = await QuestionVersion.create({
       questionId: question.id,
       version: 1,

@@ -1,5 +1,7 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
+import pg from 'pg';
 import { Sequelize } from 'sequelize';
+import { PatientClient } from './patient-client.ts';
 
 /** Milliseconds a statement, a lock and an idle transaction may take before PostgreSQL ends them. */
 const TIMEOUTS = { statement_timeout: 5000, lock_timeout: 2000, idle_in_transaction_session_timeout: 15_000 };
@@ -23,6 +25,7 @@ if (!address) throw new Error('DATABASE_URL is not set: it is the postgres:// ad
 /** The one connection pool of the app. Used through `withSchool`; see scope.ts. */
 export const sequelize = new Sequelize(address, {
   dialect: 'postgres',
+  dialectModule: { ...pg, Client: PatientClient },
   logging: false,
   pool: { max: Number(process.env.DATABASE_POOL ?? 10), min: 0, acquire: 3000, idle: 10_000 },
   define: { underscored: true, timestamps: false },

@@ -1,7 +1,7 @@
 import { existsSync } from 'node:fs';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { cleanEnvironment, tryCommand } from './commands.mjs';
-import { explainOutput, LaunchError, lastLines } from './messages.mjs';
+import { DISK_FULL, explainOutput, LaunchError, lastLines } from './messages.mjs';
 import { isRoot } from './system-user.mjs';
 
 const APT = '/usr/bin/apt-get';
@@ -45,21 +45,20 @@ async function aptGet(args, progress, lifecycle) {
 }
 
 /**
- * Installs one Debian package, with fresh package lists: old lists fail late and without lists nothing is found.
+ * Installs one Debian package, with fresh package lists: old lists fail late and without lists nothing is found. A list
+ * that cannot be fetched need not matter (another vendor's, say), so only the installation decides.
  * @param {string} name @param {import('./steps.mjs').Progress} progress @param {import('./lifecycle.mjs').Lifecycle} lifecycle
  * @throws {LaunchError} with the line to type
  */
 export async function aptInstall(name, progress, lifecycle) {
-  for (const args of [
-    ['update', '-q'],
-    ['install', '-y', '-q', '--no-install-recommends', name],
-  ]) {
-    const { code, output } = await aptGet(args, progress, lifecycle);
-    if (code === 0) continue;
-    const known = explainOutput(output);
-    const sentence =
-      known ??
-      `Debian's package "${name}" could not be installed: put right what apt says below, then type "${aptLine(name)}".`;
-    throw new LaunchError(sentence, lastLines(output));
-  }
+  const update = await aptGet(['update', '-q'], progress, lifecycle);
+  const install = await aptGet(['install', '-y', '-q', '--no-install-recommends', name], progress, lifecycle);
+  if (install.code === 0) return;
+  const said = `${update.code === 0 ? '' : update.output}\n${install.output}`;
+  const known = explainOutput(said);
+  if (known === DISK_FULL) throw new LaunchError(known);
+  throw new LaunchError(
+    `Debian's package "${name}" could not be installed: put right what apt says below, then type "${aptLine(name)}".`,
+    lastLines(said),
+  );
 }

@@ -1,6 +1,7 @@
 import path from 'node:path';
 import { markOf } from './claim.mjs';
 import { cleanEnvironment, runCommand } from './commands.mjs';
+import { demoFile } from './demo.mjs';
 import { checkGivenDatabase } from './given-database.mjs';
 import { LaunchError } from './messages.mjs';
 import { openOwnCluster } from './own-cluster.mjs';
@@ -92,7 +93,7 @@ export async function runMigrations({ stateDir, steps, lifecycle }, { ownerUrl }
  * @returns {NodeJS.ProcessEnv}
  */
 export function serverEnvironment({ stateDir }, database, { host, port, origin, nodeEnv, isDemo }) {
-  const { DATABASE_OWNER_URL: _owner, DEMO_SIGN_IN: _demo, CLIENT_DIR: _client, ...env } = cleanEnvironment();
+  const { DATABASE_OWNER_URL: _owner, DEMO_FILE: _demo, CLIENT_DIR: _client, ...env } = cleanEnvironment();
   return {
     ...env,
     ...markOf(stateDir),
@@ -102,6 +103,6 @@ export function serverEnvironment({ stateDir }, database, { host, port, origin, 
     PORT: String(port),
     PUBLIC_ORIGIN: origin,
     SESSION_SECRET: process.env.SESSION_SECRET ?? database.sessionSecret,
-    ...(isDemo && { DEMO_SIGN_IN: 'true' }),
+    ...(isDemo && { DEMO_FILE: demoFile(stateDir) }),
   };
 }

@@ -30,7 +30,7 @@ function testEnvironment(extra) {
     HOST: _host,
     PUBLIC_ORIGIN: _origin,
     SESSION_SECRET: _secret,
-    DEMO_SIGN_IN: _demo,
+    DEMO_FILE: _demo,
     CLIENT_DIR: _client,
     NODE_ENV: _node,
     FORCE_COLOR: _colour,

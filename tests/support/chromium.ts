@@ -19,7 +19,7 @@ interface AxeRun {
 
 /** What axe finds on the page as it stands, for WCAG 2.2 A and AA. */
 export async function axe(page: Page): Promise<AxeFinding[]> {
-  await page.evaluate(axeSource);
+  if (!(await page.evaluate(() => 'axe' in window))) await page.evaluate(axeSource);
   const run = await page.evaluate(
     (tags) => (window as unknown as { axe: { run: (o: object) => Promise<AxeRun> } }).axe.run({ runOnly: tags }),
     AXE_TAGS,
@@ -34,11 +34,11 @@ export async function axe(page: Page): Promise<AxeFinding[]> {
 export const PHONE = { width: 390, height: 844 };
 export const DESK = { width: 1280, height: 900 };
 
-/** A person's browser: own cookies, own storage. Collects what the content policy blocked and what went wrong. */
+/** A person's browser: own cookies, own storage. Collects what went wrong in any of its tabs. */
 export interface Visitor {
   context: BrowserContext;
   page: Page;
-  /** Console errors, uncaught errors and blocked content, in order. */
+  /** Console errors, uncaught errors, blocked content and requests to other origins, in order. */
   troubles: string[];
 }
 
@@ -62,18 +62,23 @@ export function withChromium() {
 
   const visit = async ({ viewport = DESK, colorScheme = 'light' }: VisitorOptions = {}): Promise<Visitor> => {
     const context = await browser.newContext({ baseURL: inject('origin'), viewport, colorScheme, locale: 'en-GB' });
-    const page = await context.newPage();
     const troubles: string[] = [];
-    page.on('console', (message) => {
+    context.on('console', (message) => {
       // A refused sign-in and a first visit answer 401: the browser writes those to the console by itself.
       if (message.type() === 'error' && !message.text().includes('401')) troubles.push(message.text());
     });
-    page.on('pageerror', (error) => troubles.push(String(error)));
-    await page.addInitScript(() => {
+    context.on('weberror', (error) => troubles.push(String(error.error())));
+    context.on('request', (request) => {
+      const { origin, protocol } = new URL(request.url());
+      const isLocal = protocol === 'blob:' || protocol === 'data:';
+      if (!isLocal && origin !== inject('origin')) troubles.push(`request to ${request.url()}`);
+    });
+    await context.addInitScript(() => {
       document.addEventListener('securitypolicyviolation', (event) =>
         console.error(`blocked by the content policy: ${event.violatedDirective} ${event.blockedURI}`),
       );
     });
+    const page = await context.newPage();
     return { context, page, troubles };
   };
 

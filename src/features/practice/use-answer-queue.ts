@@ -1,3 +1,4 @@
+import { notifyManager } from '@tanstack/react-query';
 import { useCallback, useEffect, useMemo, useRef, useState, useSyncExternalStore } from 'react';
 import { isTransient, NetworkError, ProblemError } from '#src/lib/api.ts';
 import { isSignedOut, noticeSignedOut } from '#src/lib/query-client.ts';
@@ -19,6 +20,18 @@ const sendOne = (setId: string, entry: Waiting) =>
   entry.kind === 'answer'
     ? handIn(setId, { ...entry.body, ageMs: ageOf(entry.stamp) })
     : saveSelfMark(setId, entry.body);
+
+/**
+ * Takes an entry off the queue after the page has heard of its result. Queries tell their news a moment
+ * later; in between, the question would look as if it had never been answered.
+ */
+const removeOnceShown = (queue: AnswerQueue, id: string): Promise<void> =>
+  new Promise((resolve) => {
+    notifyManager.schedule(() => {
+      queue.remove(id);
+      resolve();
+    });
+  });
 
 const waitAfter = (error: unknown, failures: number): number => {
   const asked = error instanceof ProblemError ? (error.retryAfterSeconds ?? 0) * 1000 : 0;
@@ -57,7 +70,7 @@ export function useAnswerQueue(userId: string, setId: string, onRefused: (refusa
             words: error instanceof ProblemError ? error.detail : 'The server did not take it.',
           });
         }
-        queue.remove(entry.body.id);
+        await removeOnceShown(queue, entry.body.id);
         failures.current = 0;
         setAway(null);
         if (isStopped.current) return;
