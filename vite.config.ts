@@ -8,11 +8,22 @@ const serverEntries = {
   'verify-log': 'server/commands/verify-log.ts',
 };
 
+/** Libraries that every page needs. */
+const BASE_PACKAGES =
+  /node_modules\/(react|react-dom|scheduler|react-router|react-router-dom|@tanstack\/(query-core|react-query)|zod)\//;
+
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: [react(), tailwindcss()],
   build: isSsrBuild
     ? { target: 'node20', sourcemap: true, rollupOptions: { input: serverEntries } }
-    : { target: 'es2022', outDir: 'dist/client', assetsInlineLimit: 0, manifest: true },
+    : {
+        target: 'es2022',
+        outDir: 'dist/client',
+        assetsInlineLimit: 0,
+        manifest: true,
+        // One chunk of what every page needs compresses better than a dozen small ones.
+        rollupOptions: { output: { advancedChunks: { groups: [{ name: 'base', test: BASE_PACKAGES }] } } },
+      },
   server: { proxy: { '/api': process.env.API_ORIGIN ?? 'http://127.0.0.1:3000' } },
   test: {
     projects: [

@@ -1,4 +1,3 @@
-import type { SubjectFact, TopicFact } from '#server/services/practice/study-facts.ts';
 import { nextWords } from '#shared/domain/schedule/next-words.ts';
 import { reasonWords } from '#shared/domain/schedule/reason.ts';
 import type { HowSure } from '#shared/schemas/how-sure.ts';
@@ -23,14 +22,18 @@ export const presentAsked = (number: number, kind: QuestionKind, body: QuestionB
   })),
 });
 
-export const presentSubject = ({ id, code, name, strand }: SubjectFact): SetItemDto['subject'] => ({
+export const presentSubject = ({ id, code, name, strand }: SetItemDto['subject']): SetItemDto['subject'] => ({
   id,
   code,
   name,
   strand,
 });
 
-export const presentTopic = ({ id, number, title }: TopicFact): AnswerResultDto['topic'] => ({ id, number, title });
+export const presentTopic = ({ id, number, title }: AnswerResultDto['topic']): AnswerResultDto['topic'] => ({
+  id,
+  number,
+  title,
+});
 
 /** How one part of an answer stands: decided, or waiting for the student's own ticks. */
 export interface PartStanding extends Pick<MarkedPart, 'words'> {
@@ -45,7 +48,7 @@ export interface ResultFacts {
   howSure: HowSure;
   responses: string[];
   body: QuestionBody;
-  topic: TopicFact;
+  topic: AnswerResultDto['topic'];
   reason: Reason;
   reasonPaper: string | null;
   parts: PartStanding[];

@@ -1,8 +1,7 @@
 import type { Request } from 'express';
 import type { PassportStatic } from 'passport';
 import type { Pool } from 'pg';
-import { withSchool } from '#server/db/scope.ts';
-import { notFound, notSignedIn, Problem } from '#server/errors.ts';
+import { notFound, Problem } from '#server/errors.ts';
 import type { SignInLimits } from '#server/http/rate-limits.ts';
 import { openRoute, type Route, route, sessionRoute } from '#server/http/registry.ts';
 import {
@@ -16,8 +15,7 @@ import {
   startSession,
 } from '#server/http/session.ts';
 import { changePassword } from '#server/services/people/change-password.ts';
-import { loadScope } from '#server/services/people/load-scope.ts';
-import { showMe } from '#server/services/people/show-me.ts';
+import { showMe, showMeTo } from '#server/services/people/show-me.ts';
 import { rolesOf } from '#server/services/people/sign-in.ts';
 import { type DemoPeople, showSignInPage } from '#server/services/people/sign-in-page.ts';
 import {
@@ -56,11 +54,7 @@ const authenticate = (passport: PassportStatic, request: Request): Promise<Sessi
 export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: AccountDeps): Route[] {
   const open = async (request: Request, user: SessionUser, isOwnDevice: boolean) => {
     await startSession(request, user, await lifetimeFor(user, isOwnDevice), clock());
-    return withSchool(user.schoolId, async (school) => {
-      const scope = await loadScope(school, user.userId);
-      if (!scope) throw notSignedIn();
-      return showMe(scope);
-    });
+    return showMeTo(user);
   };
   const signIn = async (body: SignIn, request: Request) => {
     // The strategy reads the request's body: give it the parsed one.

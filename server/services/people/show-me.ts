@@ -1,7 +1,8 @@
-import { select } from '#server/db/scope.ts';
+import { select, withSchool } from '#server/db/scope.ts';
+import { notSignedIn } from '#server/errors.ts';
 import { presentMe } from '#server/presenters/me.ts';
 import type { MeDto } from '#shared/schemas/auth.ts';
-import type { Scope } from './load-scope.ts';
+import { loadScope, type Scope } from './load-scope.ts';
 
 interface Row {
   username: string;
@@ -27,3 +28,11 @@ export async function showMe(scope: Scope): Promise<MeDto> {
   );
   return presentMe(scope, row?.username ?? '', row?.memberships ?? []);
 }
+
+/** The same for somebody who has just signed in, in a scope of its own. @throws Problem 401 */
+export const showMeTo = (user: { userId: string; schoolId: string }): Promise<MeDto> =>
+  withSchool(user.schoolId, async (school) => {
+    const scope = await loadScope(school, user.userId);
+    if (!scope) throw notSignedIn();
+    return showMe(scope);
+  });

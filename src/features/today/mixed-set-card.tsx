@@ -19,9 +19,9 @@ interface CardProps {
 
 const plural = (count: number, word: string) => `${count} ${word}${count === 1 ? '' : 's'}`;
 
-function leadWords(set: TodaySetDto): string {
+function aboutWords(set: TodaySetDto): string {
   if (set.status === 'open') return `${set.answered} of ${plural(set.questions, 'question')} answered.`;
-  return `${plural(set.questions, 'question')} from ${plural(countBySubject(set).length, 'subject')}.`;
+  return set.sentence;
 }
 
 function timeWords(set: TodaySetDto, zone: string): string {
@@ -45,15 +45,15 @@ function Strands({ set }: { set: TodaySetDto }) {
           tint={34}
           hasLabels={false}
         />
-        <ul className="flex flex-wrap gap-x-4 gap-y-1.5 mt-3" aria-label="Questions by subject">
-          {countBySubject(set).map(({ subject, count }) => (
-            <li key={subject.id} className="flex items-center gap-1.5 num text-sm">
-              <StrandLabel subject={subject} />
-              <span className="sr-only">{subject.name}</span> {count}
-            </li>
-          ))}
-        </ul>
       </div>
+      <ul className="flex flex-wrap gap-x-5 gap-y-1.5 mt-3" aria-label="Questions by subject">
+        {countBySubject(set).map(({ subject, count }) => (
+          <li key={subject.id} className="flex items-center gap-1.5 num text-sm">
+            <StrandLabel subject={subject} />
+            <span className="max-sm:sr-only">{subject.name}</span> {count}
+          </li>
+        ))}
+      </ul>
     </>
   );
 }
@@ -104,9 +104,7 @@ export function MixedSetCard({ set, zone, aside }: CardProps) {
         <span className="text-ink-2 text-sm num whitespace-nowrap">{timeWords(set, zone)}</span>
       </div>
       <div className="flex items-start justify-between gap-6">
-        <p className="text-ink-2 mt-1 max-w-[35rem]">
-          {leadWords(set)} {set.sentence}
-        </p>
+        <p className="text-ink-2 mt-1 max-w-[35rem]">{aboutWords(set)}</p>
         {set.status === 'done' && set.maxMarks !== null ? (
           <MarksBadge marks={set.marks} maxMarks={set.maxMarks} />
         ) : null}
