@@ -31,6 +31,9 @@ export async function axe(page: Page): Promise<AxeFinding[]> {
   }));
 }
 
+/** Longest wait for anything on a page. */
+const WAIT_MS = 15_000;
+
 export const PHONE = { width: 390, height: 844 };
 export const DESK = { width: 1280, height: 900 };
 
@@ -62,6 +65,7 @@ export function withChromium() {
 
   const visit = async ({ viewport = DESK, colorScheme = 'light' }: VisitorOptions = {}): Promise<Visitor> => {
     const context = await browser.newContext({ baseURL: inject('origin'), viewport, colorScheme, locale: 'en-GB' });
+    context.setDefaultTimeout(WAIT_MS);
     const troubles: string[] = [];
     context.on('console', (message) => {
       // A refused sign-in and a first visit answer 401: the browser writes those to the console by itself.

@@ -99,11 +99,7 @@ function Answered({ control, item, viewKey }: AnsweredProps) {
   return <MarkedView key={viewKey} item={item} number={number} result={result} steps={steps} isFresh={isFresh} />;
 }
 
-/** A set, one question at a time. */
-export function Runner(props: RunnerProps) {
-  const { set } = props;
-  const control = useRunner(props);
-  useHeartbeat();
+function View({ set, control }: { set: SetDto; control: RunnerControl }) {
   const { item, entry, place, away, answeredIds, secondsBefore, refusal, drafts } = control;
   const state: RunnerState = { set, place: Math.max(place, 0), answeredIds };
   const notes = <Notes set={set} control={control} />;
@@ -138,10 +134,23 @@ export function Runner(props: RunnerProps) {
   }
   return (
     <RunnerFrame state={state} seconds={secondsBefore} notes={notes}>
-      <p role="status" className="sr-only">
-        {item.result && !entry ? marksSaid(item.result) : ''}
-      </p>
       <Answered control={control} item={item} viewKey={viewKey} />
     </RunnerFrame>
+  );
+}
+
+/** A set, one question at a time. */
+export function Runner(props: RunnerProps) {
+  const control = useRunner(props);
+  useHeartbeat();
+  const { item, entry } = control;
+  return (
+    <>
+      {/* Outside the views, which come and go: a region is only heard when it was there before its words. */}
+      <p role="status" className="sr-only">
+        {item?.result && !entry ? marksSaid(item.result) : ''}
+      </p>
+      <View set={props.set} control={control} />
+    </>
   );
 }
