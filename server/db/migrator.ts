@@ -2,12 +2,6 @@ import { Client } from 'pg';
 import { Umzug } from 'umzug';
 import { migrations } from '#server/migrations/index.ts';
 
-/** One dated change to the tables. `run` executes SQL as the owner, inside the migration's own transaction. */
-export interface Migration {
-  name: string;
-  up: (run: (sql: string) => Promise<void>) => Promise<void>;
-}
-
 /** Any number, the same in every process: the lock that lets one process migrate at a time. */
 const MIGRATION_LOCK = 5_214_027;
 

@@ -1,4 +1,4 @@
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 import { tenantWall } from './tenant-table.ts';
 
 /** The tenant wall, the school, and the few tables needed before a school is known. */

@@ -1,4 +1,4 @@
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 import { EDITABLE, tenantWall } from './tenant-table.ts';
 
 /** People, what they are at the school, and who answers for whom. */

@@ -1,4 +1,4 @@
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 import { EDITABLE, tenantWall } from './tenant-table.ts';
 
 const TIER = `text CHECK (tier IN ('foundation', 'higher'))`;

@@ -1,4 +1,4 @@
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 import { EDITABLE, tenantWall } from './tenant-table.ts';
 
 /** Questions and their versions. A version that has left draft can never be reworded. */

@@ -1,4 +1,4 @@
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 import { APPEND_ONLY, EDITABLE, tenantWall } from './tenant-table.ts';
 
 /** Sets, the append-only log of answers and marks, and the memory states folded from it. */

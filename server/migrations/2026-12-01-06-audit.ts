@@ -1,4 +1,4 @@
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 import { APPEND_ONLY, tenantWall } from './tenant-table.ts';
 
 /** Who did what, with ids and field names only: no answer text, no names, no old values. */

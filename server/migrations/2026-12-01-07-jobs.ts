@@ -1,5 +1,5 @@
 import PgBoss from 'pg-boss';
-import type { Migration } from '#server/db/migrator.ts';
+import type { Migration } from './migration.ts';
 
 /** The library's plan without its own BEGIN and COMMIT: every migration already runs in a transaction. */
 const plan = (): string => PgBoss.getConstructionPlans('pgboss').replace(/^\s*(BEGIN|COMMIT);\s*$/gm, '');
