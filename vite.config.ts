@@ -24,7 +24,11 @@ export default defineConfig(({ isSsrBuild }) => ({
         // One chunk of what every page needs compresses better than a dozen small ones.
         rollupOptions: { output: { advancedChunks: { groups: [{ name: 'base', test: BASE_PACKAGES }] } } },
       },
-  server: { proxy: { '/api': process.env.API_ORIGIN ?? 'http://127.0.0.1:3000' } },
+  server: {
+    proxy: { '/api': process.env.API_ORIGIN ?? 'http://127.0.0.1:3000' },
+    // Builds and clusters made beside it are no reason to reload a page.
+    watch: { ignored: ['**/.plait/**', '**/dist/**'] },
+  },
   test: {
     projects: [
       { extends: true, test: { name: 'unit', include: ['tests/unit/**/*.test.{ts,tsx}'], environment: 'node' } },

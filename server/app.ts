@@ -51,7 +51,8 @@ export function createApp({ config, log, pool, clock = Date.now, isServing = () 
   const passport = createPassport(verifySignIn);
   const api = express.Router();
   api.use(dataOnly(config.PUBLIC_ORIGIN), sameOriginOnly(config.PUBLIC_ORIGIN));
-  api.use(express.json({ limit: BODY_LIMIT, strict: true, reviver: storableText }));
+  const type = ['application/json', 'application/csp-report'];
+  api.use(express.json({ type, limit: BODY_LIMIT, strict: true, reviver: storableText }));
   api.use(sessions(config, pool), expireSessions(clock), passport.session());
   const account: AccountDeps = {
     passport,
@@ -61,7 +62,7 @@ export function createApp({ config, log, pool, clock = Date.now, isServing = () 
     clock,
     demo,
   };
-  api.use(mountRoutes(allRoutes(account), new RequestLimits()));
+  api.use(mountRoutes(allRoutes(account, log), new RequestLimits()));
   api.use(() => {
     throw notFound();
   });

@@ -22,6 +22,7 @@ export const securityHeaders = (): RequestHandler =>
         frameAncestors: ["'none'"],
         baseUri: ["'none'"],
         objectSrc: ["'none'"],
+        reportUri: ['/api/csp-report'],
       },
     },
     strictTransportSecurity: { maxAge: 31_536_000, includeSubDomains: true },

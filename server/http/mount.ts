@@ -4,6 +4,7 @@ import { type SchoolScope, withSchool } from '#server/db/scope.ts';
 import { forbidden, notFound, notSignedIn, Problem } from '#server/errors.ts';
 import { hasRole } from '#server/policies/actor.ts';
 import { loadScope } from '#server/services/people/load-scope.ts';
+import { networkOf } from './network-of.ts';
 import type { RequestLimits } from './rate-limits.ts';
 import type { Route } from './registry.ts';
 import type { SessionUser } from './session.ts';
@@ -40,8 +41,21 @@ const inputs = (route: Route, request: Request): Inputs =>
 const isUser = (user: unknown): user is SessionUser =>
   typeof user === 'object' && user !== null && 'userId' in user && 'schoolId' in user;
 
+const JSON_TYPE = 'application/json';
+
+/** Bodies come in the one type the route takes: no form or plain text, which other sites' pages could send. */
+function checkType({ method, accepts = JSON_TYPE }: Route, request: Request): void {
+  if (method !== 'get' && !request.is(accepts)) {
+    throw new Problem(415, 'other-type', `Send the body as ${accepts}.`);
+  }
+}
+
 async function answer(route: Route, request: Request, response: Response, limits: RequestLimits): Promise<unknown> {
-  if (route.access === 'anyone') return route.run(inputs(route, request), request, response);
+  checkType(route, request);
+  if (route.access === 'anyone') {
+    if (route.limit) await limits.count(route.limit, networkOf(request.ip ?? ''));
+    return route.run(inputs(route, request), request, response);
+  }
 
   const user = request.user;
   if (!isUser(user)) throw notSignedIn();

@@ -10,8 +10,8 @@ const seconds = (result: RateLimiterRes): number => Math.max(1, Math.ceil(result
 
 const tooMany = (wait: number, detail: string) => new Problem(429, 'too-many', detail, { retryAfterSeconds: wait });
 
-/** Requests a minute for one person. In memory: a second process only doubles a generous number. */
-const PER_MINUTE: Record<'general' | LimitName, number> = { general: 300, answers: 60 };
+/** Requests a minute for one person or, where nobody is signed in, one network. In memory: a second process only doubles a generous number. */
+const PER_MINUTE: Record<'general' | LimitName, number> = { general: 300, answers: 60, reports: 20 };
 
 /** Counts a signed-in person's requests. @throws Problem 429 over the limit */
 export class RequestLimits {
@@ -19,9 +19,9 @@ export class RequestLimits {
     Object.entries(PER_MINUTE).map(([name, points]) => [name, new RateLimiterMemory({ points, duration: 60 })]),
   );
 
-  async count(name: 'general' | LimitName, userId: string): Promise<void> {
+  async count(name: 'general' | LimitName, who: string): Promise<void> {
     try {
-      await this.#limiters[name]?.consume(userId);
+      await this.#limiters[name]?.consume(who);
     } catch (refusal) {
       if (!(refusal instanceof RateLimiterRes)) throw refusal;
       throw tooMany(seconds(refusal), 'That was a lot of requests in a minute. Wait a moment, then go on.');

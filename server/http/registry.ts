@@ -5,7 +5,7 @@ import type { Role } from '#shared/schemas/role.ts';
 import type { SessionUser } from './session.ts';
 
 /** Named request limits a route may carry beside the general one; see rate-limits.ts. */
-export type LimitName = 'answers';
+export type LimitName = 'answers' | 'reports';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
 
@@ -24,7 +24,10 @@ interface Common<P, Q, B> {
   body?: B;
   /** 200 unless said; 204 where `run` returns nothing. */
   status?: number;
+  /** Counted by person, or by address where nobody is signed in. */
   limit?: LimitName;
+  /** Type of the body; application/json unless said. */
+  accepts?: string;
 }
 
 /** Reachable without a session. */

@@ -5,7 +5,7 @@ const SAFE = new Set(['GET', 'HEAD', 'OPTIONS']);
 
 /**
  * The cross-site rule: a request that may change something must come from our own pages. Browsers say so in
- * Sec-Fetch-Site; older ones in Origin; a request with neither is refused. Bodies are JSON only.
+ * Sec-Fetch-Site; older ones in Origin; a request with neither is refused.
  */
 export function sameOriginOnly(publicOrigin: string): RequestHandler {
   return (request, _response, next) => {
@@ -13,7 +13,6 @@ export function sameOriginOnly(publicOrigin: string): RequestHandler {
     const site = request.get('sec-fetch-site');
     const isOurs = site ? site === 'same-origin' : request.get('origin') === publicOrigin;
     if (!isOurs) throw new Problem(403, 'cross-site', 'This request did not come from a page of Plait.');
-    if (!request.is('application/json')) throw new Problem(415, 'not-json', 'Send the body as application/json.');
     next();
   };
 }

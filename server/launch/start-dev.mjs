@@ -82,7 +82,9 @@ export function startDev() {
         isDemo: database.isOwn,
       });
       if (database.isOwn) {
-        await steps.step('Demo school', (progress) => seedOnce({ stateDir, env, ownerUrl: database.ownerUrl, lifecycle }, progress));
+        await steps.step('Demo school', (progress) =>
+          seedOnce({ stateDir, env, ownerUrl: database.ownerUrl, lifecycle }, progress),
+        );
       }
       const logFile = path.join(stateDir, 'server.log');
       await steps.step('Server', async () => {

@@ -44,7 +44,9 @@ export function start() {
       const isDemo = database.isOwn && origin === local && LOOPBACK.includes(host);
       const env = serverEnvironment(launch, database, { host, port, origin, nodeEnv: 'production', isDemo });
       if (database.isOwn) {
-        await steps.step('Demo school', (progress) => seedOnce({ stateDir, env, ownerUrl: database.ownerUrl, lifecycle }, progress));
+        await steps.step('Demo school', (progress) =>
+          seedOnce({ stateDir, env, ownerUrl: database.ownerUrl, lifecycle }, progress),
+        );
       }
       await steps.step('Server', async () => {
         await keepServer({

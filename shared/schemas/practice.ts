@@ -215,7 +215,7 @@ export const myTopicSchema = z.object({
   subject: subjectRefSchema,
   topic: topicRefSchema,
   standing: standingSchema,
-  /** Expected recall now, 0–100, over the questions attempted; null where none was. */
+  /** Expected recall on the day of its paper, 0–100, over the questions attempted; null where none was. */
   recall: z.int().nullable(),
   attempted: z.int(),
   questions: z.int(),

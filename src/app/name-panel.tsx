@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import { ConfirmDialog } from '#src/components/dialog.tsx';
 import { Segmented } from '#src/components/segmented.tsx';
+import { hideTime, isTimeHidden } from '#src/lib/hidden-time.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { chooseTheme, chosenTheme, type ThemeChoice } from '#src/lib/theme.ts';
@@ -38,9 +39,11 @@ function useLeave() {
   const leave = () => {
     // Signing out clears this site's storage; how the page looks is worth keeping.
     const theme = chosenTheme();
+    const isHidden = isTimeHidden();
     signOut.mutate(undefined, {
       onSuccess: async () => {
         chooseTheme(theme);
+        hideTime(isHidden);
         await navigate(`/sign-in/${me.school.code}`);
         queryClient.clear();
       },

@@ -44,7 +44,8 @@ export function ExamQuestion({ question, number, renderAnswer, renderMarks, lang
   const isSingle = parts.length === 1;
   const hasStem = stem.trim() !== '';
   const figure = (
-    <p className="text-center pt-5 md:pt-6">
+    // Stands on the first line of the question.
+    <p className="text-center pt-[.9375rem] md:pt-2">
       <span className="qnum num">{number}</span>
     </p>
   );
@@ -66,7 +67,7 @@ export function ExamQuestion({ question, number, renderAnswer, renderMarks, lang
         >
           <div className={`${hasStem ? '' : 'pt-4 md:pt-5'} pb-5`}>
             {isSingle && part.prompt.trim() === '' ? null : (
-              <div className={`qtext grid gap-x-3 ${isSingle ? '' : 'grid-cols-[auto_minmax(0,1fr)]'}`}>
+              <div className={`qtext grid gap-x-1.5 ${isSingle ? '' : 'grid-cols-[1.75rem_minmax(0,1fr)]'}`}>
                 {isSingle ? null : <span>{partLetter(index)}</span>}
                 <Markdown source={part.prompt} lang={lang} />
               </div>

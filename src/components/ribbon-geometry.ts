@@ -7,6 +7,10 @@ export interface RibbonItem {
   name: string;
   strand: string;
   state: LobeState;
+  /** The question on the page is answered: its strand is solid. */
+  isAnswered?: boolean;
+  /** Answered just now: the strand fills along its length, once. */
+  isFresh?: boolean;
   /** "2/3", once the set is finished. */
   marks?: string;
   /** Under half the marks. */
@@ -101,7 +105,7 @@ export function layRibbon(items: RibbonItem[], size: RibbonSize, hasMarks = fals
 
 /** The order in words, for those who cannot see the strands. */
 export function ribbonWords(name: string, items: RibbonItem[]): string {
-  const done = items.filter((item) => item.state === 'done').length;
+  const done = items.filter((item) => item.state === 'done' || item.isAnswered).length;
   const order = items.map((item) => (item.marks ? `${item.name} ${item.marks}` : item.name)).join(', ');
   return `${name}: ${items.length} ${items.length === 1 ? 'question' : 'questions'}, ${done} answered. Order: ${order}.`;
 }

@@ -20,18 +20,34 @@ interface RibbonProps {
   hasLabels?: boolean;
 }
 
-function strokesOf(lobe: Lobe, size: RibbonSize, surface: string, tint: number): { stroke: string; width: number }[] {
+interface Stroke {
+  stroke: string;
+  width: number;
+  /** Drawn along the strand, once. */
+  isFilling?: boolean;
+}
+
+/** Strength of the strand on the page before it is answered, in per cent. */
+const NOW_TINT = 46;
+
+function nowStrokes({ item }: Lobe, width: number, surface: string): Stroke[] {
+  const { s, e } = strandColours(item.strand);
+  const open = { stroke: `color-mix(in oklab, ${s} ${NOW_TINT}%, ${surface})`, width: width - 2.8 };
+  const full = { stroke: s, width: width - 2.9, isFilling: item.isFresh === true };
+  return [
+    { stroke: surface, width: width + 7.4 },
+    { stroke: 'var(--ink)', width: width + 5.4 },
+    { stroke: surface, width: width + 1.4 },
+    { stroke: e, width: width - 1 },
+    open,
+    ...(item.isAnswered ? [full] : []),
+  ];
+}
+
+function strokesOf(lobe: Lobe, size: RibbonSize, surface: string, tint: number): Stroke[] {
   const { s, e } = strandColours(lobe.item.strand);
   const { width, gap } = size;
-  if (lobe.item.state === 'now') {
-    return [
-      { stroke: surface, width: width + 7.4 },
-      { stroke: 'var(--ink)', width: width + 5.4 },
-      { stroke: surface, width: width + 1.4 },
-      { stroke: e, width: width - 1 },
-      { stroke: s, width: width - 2.8 },
-    ];
-  }
+  if (lobe.item.state === 'now') return nowStrokes(lobe, width, surface);
   const isDone = lobe.item.state === 'done';
   return [
     { stroke: surface, width: width + 2 * gap },
@@ -55,11 +71,11 @@ function Strand({
 }) {
   return (
     <g mask={mask}>
-      {strokesOf(lobe, size, surface, tint).map(({ stroke, width }) => (
-        <g key={width} style={{ stroke }} strokeWidth={width}>
-          <path d={lobe.body} strokeLinecap="butt" />
+      {strokesOf(lobe, size, surface, tint).map(({ stroke, width, isFilling }) => (
+        <g key={width} style={{ stroke }} strokeWidth={width} className={isFilling ? 'strand-fill' : undefined}>
+          <path d={lobe.body} strokeLinecap="butt" pathLength={isFilling ? 1 : undefined} />
           {lobe.caps.map((cap) => (
-            <path key={cap.slice(0, 16)} d={cap} />
+            <path key={cap.slice(0, 16)} d={cap} pathLength={isFilling ? 1 : undefined} />
           ))}
         </g>
       ))}
@@ -70,6 +86,7 @@ function Strand({
 function LobeText({ lobe, hasLabel, fontSize }: { lobe: Lobe; hasLabel: boolean; fontSize: number }) {
   const { e, l } = strandColours(lobe.item.strand);
   const { item, isUp, labelAt, peak } = lobe;
+  const isSolid = item.state === 'done' || (item.state === 'now' && item.isAnswered);
   return (
     <>
       {hasLabel ? (
@@ -80,7 +97,7 @@ function LobeText({ lobe, hasLabel, fontSize }: { lobe: Lobe; hasLabel: boolean;
           fontSize={fontSize}
           fontWeight="750"
           letterSpacing=".3"
-          style={{ fill: item.state === 'next' ? e : l }}
+          style={{ fill: isSolid ? l : e }}
         >
           {item.code}
         </text>

@@ -2,6 +2,7 @@ import { useSuspenseQuery } from '@tanstack/react-query';
 import { longDayWords } from '#shared/domain/time/words.ts';
 import { MixedSetCard } from '#src/features/today/mixed-set-card.tsx';
 import { MorningLine } from '#src/features/today/morning-line.tsx';
+import { MorningRow } from '#src/features/today/morning-row.tsx';
 import { NextPapers } from '#src/features/today/next-papers.tsx';
 import { WeakTopics } from '#src/features/today/weak-topics.tsx';
 import { loadFresh } from '#src/lib/query-client.ts';
@@ -22,7 +23,7 @@ function daysWords(days: number): string {
 export function Component() {
   const today = useSuspenseQuery(todayQuery()).data;
   const { school } = useMe();
-  const morning = <MorningLine set={today.morning} zone={school.zone} />;
+  const morningDone = <MorningLine set={today.morning} zone={school.zone} />;
   return (
     <div className="page">
       <title>Today – Plait</title>
@@ -34,8 +35,9 @@ export function Component() {
               <p className="text-ink-2 text-md md:pb-1">{daysWords(today.daysToFirst)}</p>
             )}
           </div>
-          <MixedSetCard set={today.mixed} zone={school.zone} aside={morning} />
-          {today.mixed.status === 'nothing' ? <div className="mt-5">{morning}</div> : null}
+          <MixedSetCard set={today.mixed} zone={school.zone} aside={morningDone} />
+          {today.mixed.status === 'nothing' ? <div className="mt-5">{morningDone}</div> : null}
+          <MorningRow set={today.morning} />
         </div>
         <aside className="lg:border-l lg:border-rule lg:pl-8" aria-label="Papers and weak topics">
           <NextPapers papers={today.nextPapers} />

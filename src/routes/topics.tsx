@@ -29,8 +29,8 @@ export function Component() {
         <div>
           <h1>Topics</h1>
           <p className="text-ink-2 text-md mt-1.5 max-w-[37rem]">
-            What you could expect to recall now of the questions you have attempted. An estimate. The weakest come
-            first.
+            What you could expect to recall on the day of each paper if you did nothing more. An estimate, from the
+            questions you have attempted.
           </p>
         </div>
         {items.length > 0 ? (

@@ -29,6 +29,7 @@ const CSP = [
   "frame-ancestors 'none'",
   "base-uri 'none'",
   "object-src 'none'",
+  'report-uri /api/csp-report',
 ].join(';');
 
 const EVERYWHERE = {

@@ -94,6 +94,18 @@ test('every foreign key leads with the school on both sides, and so do the uniqu
   expect(unique.filter(({ lead }) => lead !== 'school_id').map(({ name }) => name)).toEqual(['schools_code_key']);
 });
 
+test('every id of another row is held by such a key', async () => {
+  const loose = await allRows<{ name: string }>(
+    `SELECT c.relname || '.' || a.attname AS name FROM pg_attribute a JOIN pg_class c ON c.oid = a.attrelid
+     WHERE c.relname = ANY($1) AND c.relnamespace = 'public'::regnamespace AND a.atttypid = 'uuid'::regtype
+       AND a.attname NOT IN ('id', 'school_id') AND NOT EXISTS (SELECT 1 FROM pg_constraint k
+         WHERE k.contype = 'f' AND k.conrelid = c.oid AND a.attnum = ANY(k.conkey)) ORDER BY 1`,
+    [tenantTables.map(({ name }) => name)],
+  );
+  // The audit log outlives what it tells of.
+  expect(loose.map(({ name }) => name)).toEqual(['audit.actor_id', 'audit.object_id']);
+});
+
 test('no view, no function and no other schema opens a way round', async () => {
   const schemas = await allRows<{ name: string }>(
     `SELECT nspname AS name FROM pg_namespace WHERE nspname !~ '^pg_' AND nspname <> 'information_schema' ORDER BY 1`,

@@ -62,6 +62,7 @@ export const EXPECTATIONS: Record<string, Expectation> = {
   'POST /sign-in': { isOpen: true },
   'POST /demo-sign-in': { isOpen: true },
   'POST /sign-out': { isOpen: true },
+  'POST /csp-report': { isOpen: true },
   'GET /me': { passes: { own: SIGNED_IN } },
   // A wrong present password: the answer of somebody who was let through.
   'POST /me/password': {

@@ -26,6 +26,9 @@ const faults = (check: (question: QuestionContent) => (string | null)[]): string
     check(question).flatMap((fault) => (fault === null ? [] : [`${where}: ${fault}`])),
   );
 
+/** Those of mathematics and the sciences. */
+const ofScience = (found: string[]): string[] => found.filter((fault) => /^(?:MA|BI|CH|PH) /u.test(fault));
+
 function recomputeFault({ answer, recompute }: PartContent): string | null {
   if (!recompute) return null;
   const value = recompute();
@@ -47,6 +50,38 @@ function modelAnswerFault(part: PartContent): string | null {
     ? null
     : `the model answer “${part.modelAnswer}” is marked ${outcome}: ${words}`;
 }
+
+/** Ordinary ways of typing a model answer in numbers: zeros, label and unit as a keyboard has them. */
+function numberTypings({ answer, answerLabel, modelAnswer }: PartContent): string[] {
+  if (answer.kind !== 'number') return [];
+  const value = String(answer.value);
+  const label = (answerLabel ?? '').replace(/\s*=?\s*[£×]?$/u, '');
+  const plain = [value, `${value}.`, `${value}${value.includes('.') ? '0' : '.0'}`, value.replace(/^(-?)0\./u, '$1.')];
+  const units = answer.unit === undefined ? [] : [answer.unit, answer.unit.normalize('NFKC')];
+  return [
+    modelAnswer,
+    ...(answer.isUnitRequired ? [] : [...plain, `= ${value}`, `${label} = ${value}`]),
+    ...units.flatMap((unit) => [...plain.map((typed) => `${typed} ${unit}`), `${value}${unit}`, `= ${value} ${unit}`]),
+  ];
+}
+
+/** Ordinary ways of typing a listed word. */
+const textTypings = ({ answer }: PartContent): string[] =>
+  answer.kind === 'text'
+    ? answer.accept.flatMap((listed) => [listed.toUpperCase(), `${listed}.`, `It is ${listed}`, `(${listed})`])
+    : [];
+
+const markedWrong = (part: PartContent): (string | null)[] =>
+  [...new Set([...numberTypings(part), ...textTypings(part)])].map((typed) => {
+    const { outcome, words } = markPart(part, typed);
+    return outcome === 'none' ? `“${typed}” is marked wrong: ${words}` : null;
+  });
+
+/** Of a text worth several marks an unlisted answer may still earn some, so the marker must not settle it. */
+const settledTextFault = (part: PartContent): string | null =>
+  part.answer.kind === 'text' && partMarks(part) > 1 && (part.answer.unlisted === 'wrong' || part.answer.reject?.length)
+    ? `an unlisted answer gets 0 of ${partMarks(part)} marks: “${part.modelAnswer}”`
+    : null;
 
 const markdownOf = ({ stem, guidance, parts }: QuestionContent): string[] => [
   stem,
@@ -108,6 +143,15 @@ describe('the demo bank', () => {
 
   test('gives every model answer full marks', () => {
     expect(faults(({ parts }) => parts.map(modelAnswerFault))).toEqual([]);
+  });
+
+  test('marks no right answer wrong for how it is typed', () => {
+    // In languages the marks and endings of a word may be what is asked for.
+    expect(ofScience(faults(({ parts }) => parts.flatMap(markedWrong)))).toEqual([]);
+  });
+
+  test('leaves part marks open in mathematics and the sciences', () => {
+    expect(ofScience(faults(({ parts }) => parts.map(settledTextFault)))).toEqual([]);
   });
 
   test('asks for the numbers that follow from its questions', () => {

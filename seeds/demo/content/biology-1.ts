@@ -1,4 +1,4 @@
-import { num, part, point, r, recall, short, shortParts, type TopicContent, words } from './build.ts';
+import { num, part, point, r, recall, short, shortParts, type TopicContent, wording, words } from './build.ts';
 import { exactly } from './exact-words.ts';
 
 /** Paper 1: cells, enzymes and digestion. */
@@ -25,7 +25,7 @@ export const cellsAndDigestion: TopicContent[] = [
       short({
         stem: r`A red blood cell is drawn at a magnification of $\times 5000$. In the drawing its diameter is 38 mm.
 
-Calculate the real diameter of the cell. Give your answer in micrometres ($\mu\text{m}$).`,
+Calculate the real diameter of the cell. Give your answer in micrometres (μm).`,
         seconds: 120,
         lines: 4,
         answerLabel: 'Diameter =',
@@ -35,21 +35,22 @@ Calculate the real diameter of the cell. Give your answer in micrometres ($\mu\t
         points: [
           r`Rearranges: $\text{real size} = \dfrac{38}{5000}$`,
           r`$= 0.0076$ (mm)`,
-          point(r`7.6 ($\mu\text{m}$)`, { allow: ['their size in millimetres correctly multiplied by 1000'] }),
+          point('7.6 (μm)', { allow: ['their size in millimetres correctly multiplied by 1000'] }),
         ],
-        guidance: r`$1\ \text{mm} = 1000\ \mu\text{m}$. A red blood cell is a few micrometres across, so an answer in the thousands has been converted the wrong way.`,
+        guidance:
+          '1 mm = 1000 μm. A red blood cell is a few micrometres across, so an answer in the thousands has been converted the wrong way.',
       }),
       shortParts({
         stem: 'A mitochondrion is 0.0025 mm long.',
         seconds: 110,
         parts: [
           part({
-            prompt: r`Give this length in micrometres ($\mu\text{m}$).`,
+            prompt: 'Give this length in micrometres (μm).',
             answerLabel: 'Length =',
             answer: num(2.5, { unit: 'μm' }),
             recompute: () => 0.0025 * 1000,
             model: '2.5',
-            points: [r`2.5 ($\mu\text{m}$)`],
+            points: ['2.5 (μm)'],
           }),
           part({
             prompt: r`Calculate the length of the image, in millimetres, at a magnification of $\times 20\,000$.`,
@@ -80,7 +81,7 @@ Calculate the real diameter of the cell. Give your answer in micrometres ($\mu\t
           }),
           part({
             prompt: 'Name the structure that contains the genetic material controlling the activities of the cell.',
-            answer: exactly(['nucleus', 'cell nucleus', 'nuclei'], ['nucleolus', 'chromosome', 'DNA']),
+            answer: words('nucleus', 'cell nucleus', 'nuclei'),
             model: 'Nucleus',
             points: ['Nucleus'],
           }),
@@ -91,7 +92,7 @@ Calculate the real diameter of the cell. Give your answer in micrometres ($\mu\t
       short({
         stem: 'Name the substance that strengthens the cell wall of a plant cell.',
         seconds: 30,
-        answer: exactly(['cellulose'], ['cellulase', 'chitin', 'starch']),
+        answer: exactly(['cellulose'], ['cellulase']),
         model: 'Cellulose',
         points: [point('Cellulose', { reject: ['glucose', 'starch', 'chitin'] })],
       }),
@@ -178,7 +179,13 @@ Calculate the real diameter of the cell. Give your answer in micrometres ($\mu\t
             answer: num(2),
             recompute: () => (6 * 3 ** 2) / 3 ** 3,
             model: '2',
-            points: [point('2', { allow: ['their surface area divided by their volume'] })],
+            lines: 2,
+            points: [
+              point(r`Divides the surface area by the volume: $54 \div 27$`, {
+                allow: ['their surface area divided by their volume'],
+              }),
+              '2',
+            ],
           }),
         ],
         guidance:
@@ -310,10 +317,7 @@ Calculate the mean rate of the reaction.`,
         parts: [
           part({
             prompt: 'Name the enzyme in saliva that breaks down starch.',
-            answer: exactly(
-              ['amylase', 'salivary amylase', 'carbohydrase'],
-              ['amylose', 'carbohydrate', 'protease', 'lipase'],
-            ),
+            answer: exactly(['amylase', 'salivary amylase', 'carbohydrase'], ['amylose', 'carbohydrate']),
             model: 'Amylase',
             points: [point('Amylase', { allow: ['carbohydrase'], reject: ['protease', 'lipase'] })],
           }),
@@ -326,7 +330,7 @@ Calculate the mean rate of the reaction.`,
           part({
             prompt: 'Name **two** substances produced when lipids are digested.',
             lines: 2,
-            answer: words(
+            answer: wording(
               'fatty acids and glycerol',
               'glycerol and fatty acids',
               'fatty acid and glycerol',
@@ -352,7 +356,7 @@ Calculate the mean rate of the reaction.`,
         parts: [
           part({
             prompt: 'Name the reagent that the student should use.',
-            answer: words(
+            answer: wording(
               'biuret',
               'biuret reagent',
               'biuret solution',
@@ -360,6 +364,10 @@ Calculate the mean rate of the reaction.`,
               "biuret's reagent",
               'biurets reagent',
               'Biuret A and Biuret B',
+              'sodium hydroxide and copper sulfate',
+              'copper sulfate and sodium hydroxide',
+              'sodium hydroxide solution and copper sulfate solution',
+              'copper sulfate solution and sodium hydroxide solution',
             ),
             model: 'Biuret reagent',
             points: [
@@ -371,7 +379,17 @@ Calculate the mean rate of the reaction.`,
           }),
           part({
             prompt: 'Give the colour seen if the food contains protein.',
-            answer: words('purple', 'lilac', 'violet', 'mauve', 'blue to purple', 'purple or lilac', 'lilac or purple'),
+            answer: words(
+              'purple',
+              'lilac',
+              'violet',
+              'mauve',
+              'blue to purple',
+              'blue-purple',
+              'pinky-purple',
+              'purple or lilac',
+              'lilac or purple',
+            ),
             model: 'Purple',
             points: [point('Purple', { allow: ['lilac', 'violet', 'mauve'], reject: ['blue', 'red'] })],
           }),
@@ -432,7 +450,7 @@ Calculate the relative rate at 35 °C. Give it in $\text{s}^{-1}$.`,
         guidance: 'Bile contains no enzymes. It has two jobs: one to do with pH, one to do with surface area.',
       }),
       recall({
-        stem: 'State **four** ways the small intestine is adapted to absorb digested food quickly.',
+        stem: 'Explain **four** ways in which the small intestine is adapted to absorb digested food quickly.',
         seconds: 140,
         lines: 7,
         points: [

@@ -216,7 +216,7 @@ Titres within $0.10\ \text{cm}^3$ of each other are concordant. Calculate the me
           }),
           part({
             prompt: 'Name the alkali that forms in the solution.',
-            answer: words('sodium hydroxide', 'NaOH', 'sodium hydroxide solution'),
+            answer: words('sodium hydroxide', 'NaOH', 'sodium hydroxide solution', 'caustic soda'),
             model: 'sodium hydroxide',
             points: [point('sodium hydroxide', { allow: ['NaOH'] })],
           }),

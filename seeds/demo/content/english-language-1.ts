@@ -27,7 +27,7 @@ const retrieval: TopicContent = {
         }),
         part({
           prompt: 'What is Marta waiting for?',
-          answer: words(
+          answer: wording(
             'the ferry',
             'a ferry',
             'ferry',
@@ -196,7 +196,14 @@ Write down one word from the sentence for each part.`,
       seconds: 35,
       stem: 'State the term for the ideas and feelings that a word suggests beyond its dictionary meaning.',
       answer: exactly(
-        ['connotation', 'connotations', 'the connotations of the word', 'its connotations'],
+        [
+          'connotation',
+          'connotations',
+          'the connotations of the word',
+          'its connotations',
+          'connotative meaning',
+          'connotative meanings',
+        ],
         ['denotation', 'denotations'],
       ),
       model: 'connotations',
@@ -217,7 +224,7 @@ Write down one word from the sentence for each part.`,
 > Exhausted, the climbers stumbled into the hut and collapsed beside the cold stove.
 
 Write down the two verbs that show how tired the climbers are.`,
-      answer: words(
+      answer: wording(
         'stumbled and collapsed',
         'stumbled, collapsed',
         'stumbled collapsed',
@@ -281,7 +288,10 @@ const techniques: TopicContent = {
       stem: `Name the technique in this sentence.
 
 > The moon was a coin dropped in a well.`,
-      answer: exactly(['metaphor', 'a metaphor', 'metaphors'], ['simile', 'personification']),
+      answer: exactly(
+        ['metaphor', 'a metaphor', 'metaphors', 'metaphorical', 'metaphorical language'],
+        ['simile', 'personification'],
+      ),
       model: 'metaphor',
       points: [point('Metaphor', { reject: ['simile', 'personification'] })],
       guidance: 'There is no *like* or *as*: the moon *was* a coin. That makes it a metaphor.',
@@ -292,13 +302,23 @@ const techniques: TopicContent = {
       parts: [
         part({
           prompt: 'The bacon hissed and popped in the pan.',
-          answer: words('onomatopoeia', 'onomatopoeic', 'onomatopoeic verbs', 'onomatopoeic words'),
+          answer: words('onomatopoeia', 'onomatopoeic', 'onomatopoeic verbs', 'onomatopoeic words', 'onomatopoeically'),
           model: 'onomatopoeia',
           points: ['Onomatopoeia'],
         }),
         part({
           prompt: 'Her bag weighed more than a planet.',
-          answer: words('hyperbole', 'exaggeration', 'hyperbolic language', 'overstatement'),
+          answer: words(
+            'hyperbole',
+            'exaggeration',
+            'hyperbolic language',
+            'hyperbolic',
+            'overstatement',
+            'exaggerated',
+            'exaggerating',
+            'over-exaggeration',
+            'exaggerated language',
+          ),
           model: 'hyperbole',
           points: [point('Hyperbole', { allow: ['exaggeration'] })],
         }),
@@ -311,6 +331,8 @@ const techniques: TopicContent = {
             'plosive sounds',
             'plosive',
             'alliterative',
+            'alliterating',
+            'alliterates',
           ),
           model: 'alliteration',
           points: [point('Alliteration', { allow: ['plosive sounds'], reject: ['sibilance', 'rhyme'] })],
@@ -323,20 +345,36 @@ const techniques: TopicContent = {
 
 > The fog crept up the stairs and listened at every door.`,
       answer: exactly(
-        ['personification', 'personifying', 'personified', 'the fog is personified'],
+        [
+          'personification',
+          'personifying',
+          'personified',
+          'the fog is personified',
+          'personify',
+          'personifies',
+          'personifying the fog',
+          'anthropomorphism',
+        ],
         ['pathetic fallacy', 'simile'],
       ),
       model: 'personification',
-      points: [point('Personification', { reject: ['pathetic fallacy', 'simile'] })],
+      points: [
+        point('Personification', { allow: ['anthropomorphism'], reject: ['pathetic fallacy', 'simile', 'metaphor'] }),
+      ],
       guidance:
         'Pathetic fallacy is weather or nature reflecting a mood. Here the fog is made to act as a person would, which is personification.',
     }),
     short({
       seconds: 40,
       stem: 'State the term for two words of opposite meaning placed next to each other, as in *a deafening silence*.',
-      answer: exactly(['oxymoron', 'an oxymoron', 'oxymorons', 'oxymoronic'], ['antithesis', 'paradox']),
+      answer: exactly(
+        ['oxymoron', 'an oxymoron', 'oxymorons', 'oxymoronic', 'contradiction in terms'],
+        ['antithesis', 'paradox'],
+      ),
       model: 'oxymoron',
-      points: [point('Oxymoron', { reject: ['antithesis', 'paradox'] })],
+      points: [
+        point('Oxymoron', { allow: ['contradiction in terms'], reject: ['antithesis', 'paradox', 'juxtaposition'] }),
+      ],
     }),
     recall({
       seconds: 140,

@@ -17,6 +17,7 @@ const viewpointWriting: TopicContent = {
         'rhetorical',
         'rhetorical questioning',
         'rhetorical questions',
+        'rhetoric question',
       ),
       model: 'rhetorical question',
       points: [point('Rhetorical question', { reject: ['question, alone'] })],
@@ -26,9 +27,16 @@ const viewpointWriting: TopicContent = {
       stem: 'Name the persuasive technique used in each sentence.',
       parts: [
         part({
-          prompt: 'We want streets that are cleaner, quieter and kinder.',
-          answer: words(
+          prompt: 'The new buses will be cleaner, faster and safer.',
+          answer: wording(
             'rule of three',
+            'rule of 3',
+            'list of 3',
+            'power of 3',
+            'group of 3',
+            'tripling',
+            'triples',
+            'triadic list',
             'the rule of three',
             'triple',
             'triplet',
@@ -46,7 +54,7 @@ const viewpointWriting: TopicContent = {
         }),
         part({
           prompt: 'You know how that crossing feels at eight in the morning.',
-          answer: words(
+          answer: wording(
             'direct address',
             'second person',
             'second-person address',
@@ -62,8 +70,10 @@ const viewpointWriting: TopicContent = {
         }),
         part({
           prompt: 'Last winter I sat in that waiting room for nine hours with a broken wrist.',
-          answer: words(
+          answer: wording(
             'anecdote',
+            'anecdotes',
+            'personal story',
             'personal anecdote',
             'an anecdote',
             'anecdotal evidence',
@@ -78,19 +88,27 @@ const viewpointWriting: TopicContent = {
     short({
       seconds: 45,
       stem: 'In a speech, a writer says: “Some will say that a youth club costs too much. It costs less than the damage done by having none.” State the term for an opposing point that a writer raises in order to answer it.',
-      answer: words(
-        'counter-argument',
-        'counterargument',
-        'counter argument',
-        'counter-arguments',
-        'counterclaim',
-        'counter-claim',
-        'counter claim',
-        'counterpoint',
-        'counter-point',
-      ),
+      answer: {
+        ...wording(
+          'counter-argument',
+          'counterargument',
+          'counter argument',
+          'counter-arguments',
+          'counterclaim',
+          'counter-claim',
+          'counter claim',
+          'counterpoint',
+          'counter-point',
+        ),
+        reject: ['argument', 'rhetorical question', 'rebuttal', 'anecdote'],
+      },
       model: 'counter-argument',
-      points: [point('Counter-argument', { allow: ['counter-claim'], reject: ['argument, alone'] })],
+      points: [
+        point('Counter-argument', {
+          allow: ['counter-claim'],
+          reject: ['argument, alone', 'rebuttal, which is the answer to it'],
+        }),
+      ],
       guidance: 'Raising the objection yourself lets you choose the answer to it. Follow it at once with your reply.',
     }),
     short({
@@ -155,19 +173,30 @@ const creativeWriting: TopicContent = {
       parts: [
         part({
           prompt: 'the sour reek of wet coal',
-          answer: words('smell', 'sense of smell', 'olfactory', 'the nose'),
+          answer: words('smell', 'smells', 'smelling', 'sense of smell', 'olfactory', 'the nose', 'scent', 'odour'),
           model: 'smell',
           points: [point('Smell', { reject: ['taste'] })],
         }),
         part({
           prompt: 'the thin hum of wires overhead',
-          answer: words('hearing', 'sound', 'auditory', 'sense of hearing'),
+          answer: words(
+            'hearing',
+            'sound',
+            'sounds',
+            'auditory',
+            'aural',
+            'sense of hearing',
+            'sense of sound',
+            'hear',
+            'listening',
+            'the ears',
+          ),
           model: 'hearing',
           points: [point('Hearing', { allow: ['sound'], reject: ['sight'] })],
         }),
         part({
           prompt: 'the iron rail, cold and gritty beneath her palm',
-          answer: words('touch', 'sense of touch', 'tactile', 'feel', 'feeling'),
+          answer: words('touch', 'touching', 'sense of touch', 'tactile', 'feel', 'feeling', 'feelings', 'the hands'),
           model: 'touch',
           points: [point('Touch', { allow: ['feeling'] })],
         }),
@@ -177,11 +206,21 @@ const creativeWriting: TopicContent = {
       seconds: 40,
       stem: 'State the term for an expression so overused that it has lost its force, such as *the calm before the storm*.',
       answer: exactly(
-        ['cliché', 'cliche', 'a cliché', 'clichés', 'cliches', 'clichéd'],
+        [
+          'cliché',
+          'cliche',
+          'a cliché',
+          'clichés',
+          'cliches',
+          'clichéd',
+          'hackneyed phrase',
+          'hackneyed expression',
+          'stock phrase',
+        ],
         ['metaphor', 'simile', 'idiom'],
       ),
       model: 'cliché',
-      points: [point('Cliché', { reject: ['metaphor', 'idiom'] })],
+      points: [point('Cliché', { allow: ['hackneyed or stock phrase'], reject: ['metaphor', 'idiom'] })],
     }),
     short({
       seconds: 70,
@@ -297,6 +336,11 @@ const sentences: TopicContent = {
         'directive',
         'instruction',
         'an instruction',
+        'instructional',
+        'instructive',
+        'commanding',
+        'demand',
+        'ordering',
       ),
       model: 'imperative',
       points: [point('Imperative', { allow: ['command'], reject: ['declarative', 'exclamatory'] })],
@@ -449,7 +493,7 @@ const punctuation: TopicContent = {
 
 > He took only three things a map, a torch and his sister’s whistle.`,
       answer: exactly(
-        ['colon', 'a colon', ':', 'dash', 'a dash'],
+        ['colon', 'a colon', 'full colon', ':', 'dash', 'a dash', '–'],
         ['semicolon', 'semi-colon', 'semi colon', ';', 'comma', ','],
       ),
       model: 'colon',

@@ -171,6 +171,11 @@ const macbethThemes: TopicContent = {
             'Gunpowder',
             'Gunpowder Treason',
             'Gunpowder Treason Plot',
+            'Gunpowder Conspiracy',
+            'Powder Treason',
+            'Guy Fawkes plot',
+            "Guy Fawkes' plot",
+            "Guy Fawkes's plot",
           ),
           model: 'Gunpowder Plot',
           points: ['The Gunpowder Plot'],
@@ -385,7 +390,7 @@ const carolPlot: TopicContent = {
     short({
       seconds: 40,
       stem: 'In *A Christmas Carol*, name the young woman who ends her engagement to Scrooge because another idol, a golden one, has displaced her.',
-      answer: exactly(['Belle'], ['Fan', 'Fran', 'Martha', 'Bella']),
+      answer: exactly(['Belle'], ['Fan', 'Fran', 'Martha']),
       model: 'Belle',
       points: [point('Belle', { reject: ['Fan (his sister)'] })],
     }),
@@ -543,11 +548,21 @@ const terms: TopicContent = {
         part({
           prompt: 'A sentence that runs on from one line to the next without a pause',
           answer: exactly(
-            ['enjambment', 'enjambement', 'run-on line', 'run on line', 'run-on lines'],
+            [
+              'enjambment',
+              'enjambement',
+              'enjambed',
+              'enjambed line',
+              'run-on line',
+              'run on line',
+              'run-on lines',
+              'run-on',
+              'run-over line',
+            ],
             ['caesura', 'end-stopped', 'end-stopping'],
           ),
           model: 'enjambment',
-          points: [point('Enjambment', { reject: ['caesura', 'end-stopping'] })],
+          points: [point('Enjambment', { allow: ['run-on line'], reject: ['caesura', 'end-stopping'] })],
         }),
         part({
           prompt: 'A pause within a line, often marked by punctuation',
@@ -560,7 +575,7 @@ const terms: TopicContent = {
         }),
         part({
           prompt: 'A group of lines set apart from the others in a poem',
-          answer: words('stanza', 'a stanza', 'stanzas', 'verse', 'a verse'),
+          answer: words('stanza', 'a stanza', 'stanzas', 'verse', 'a verse', 'verses', 'strophe'),
           model: 'stanza',
           points: [point('Stanza', { allow: ['verse'] })],
         }),
@@ -586,7 +601,7 @@ const terms: TopicContent = {
       stem: 'State the term for a narrative in which characters and events stand throughout for abstract ideas, so that the story carries a second, usually moral, meaning.',
       answer: exactly(
         ['allegory', 'an allegory', 'allegorical', 'allegories', 'an allegorical story'],
-        ['analogy', 'alliteration', 'metaphor'],
+        ['analogy', 'alliteration', 'metaphor', 'symbolism'],
       ),
       model: 'allegory',
       points: [point('Allegory', { reject: ['metaphor', 'analogy'] })],

@@ -179,7 +179,7 @@ const jekyllThemes: TopicContent = {
     }),
     short({
       seconds: 45,
-      stem: 'Name the genre of fiction that uses fear, mystery, the supernatural and dark or isolated settings, and to which *Jekyll and Hyde* is often said to belong.',
+      stem: '*Jekyll and Hyde* is often placed in a genre that uses fear, mystery, the supernatural and dark or isolated settings, and that shares its name with a style of medieval architecture. Name this genre.',
       answer: words(
         'Gothic',
         'Gothic fiction',
@@ -191,7 +191,7 @@ const jekyllThemes: TopicContent = {
         'urban Gothic',
       ),
       model: 'Gothic',
-      points: [point('Gothic (fiction)', { reject: ['science fiction', 'detective fiction'] })],
+      points: [point('Gothic (fiction)', { reject: ['horror, alone', 'science fiction', 'detective fiction'] })],
     }),
     recall({
       seconds: 130,
@@ -277,7 +277,7 @@ const power: TopicContent = {
         }),
         part({
           prompt: '*London*, which begins “I wander thro’ each charter’d street”',
-          answer: exactly(['William Blake', 'Blake'], ['Wordsworth', 'William Wordsworth', 'Black']),
+          answer: exactly(['William Blake', 'Blake'], ['Wordsworth', 'William Wordsworth']),
           model: 'William Blake',
           points: [point('(William) Blake', { reject: ['Wordsworth'] })],
         }),
@@ -311,7 +311,7 @@ const power: TopicContent = {
         ['soliloquy', 'sonnet', 'ballad', 'dramatic dialogue'],
       ),
       model: 'dramatic monologue',
-      points: [point('Dramatic monologue', { reject: ['soliloquy', 'sonnet'] })],
+      points: [point('Dramatic monologue', { reject: ['monologue, alone', 'soliloquy', 'sonnet'] })],
     }),
     short({
       seconds: 50,
@@ -330,6 +330,12 @@ Name the technique by which one word is used again and again in the first three 
         'repetition of every',
         'repetition of the word every',
         'repeated words',
+        'repeated word',
+        'repeated',
+        'repeats',
+        'repetitive',
+        'repetitive language',
+        'anaphoric',
       ),
       model: 'repetition',
       points: [point('Repetition', { allow: ['anaphora'] })],
@@ -450,9 +456,15 @@ const war: TopicContent = {
         'personifying the wind',
         'personification of the wind',
         'personification of the winds',
+        'personifying',
+        'personify',
+        'personifies',
+        'anthropomorphism',
       ),
       model: 'personification',
-      points: [point('Personification', { reject: ['simile', 'onomatopoeia'] })],
+      points: [
+        point('Personification', { allow: ['anthropomorphism'], reject: ['simile', 'onomatopoeia', 'metaphor'] }),
+      ],
       guidance: 'The choice matters: in this poem the weather, rather than an army, is the enemy.',
     }),
     short({
@@ -562,13 +574,10 @@ ${ALLOTMENT}`,
           points: [point('(Rhyming) couplet', { reject: ['quatrain', 'stanza'] })],
         }),
         part({
-          prompt: 'Name the technique in “plain as rain”.',
-          answer: exactly(
-            ['simile', 'a simile', 'internal rhyme', 'simile and internal rhyme'],
-            ['metaphor', 'personification'],
-          ),
+          prompt: 'State the term for the kind of comparison made in “plain as rain”.',
+          answer: exactly(['simile', 'a simile', 'similes'], ['metaphor', 'personification', 'analogy']),
           model: 'simile',
-          points: [point('Simile', { allow: ['internal rhyme'], reject: ['metaphor'] })],
+          points: [point('Simile', { reject: ['metaphor'] })],
         }),
       ],
       guidance:
@@ -583,11 +592,21 @@ ${ALLOTMENT}`,
 
 Name the technique used to describe the weeds.`,
       answer: exactly(
-        ['personification', 'personified', 'the weeds are personified', 'personifying'],
+        [
+          'personification',
+          'personified',
+          'the weeds are personified',
+          'personifying',
+          'personify',
+          'personifies',
+          'anthropomorphism',
+        ],
         ['metaphor', 'simile', 'pathetic fallacy'],
       ),
       model: 'personification',
-      points: [point('Personification', { reject: ['pathetic fallacy', 'simile'] })],
+      points: [
+        point('Personification', { allow: ['anthropomorphism'], reject: ['pathetic fallacy', 'simile', 'metaphor'] }),
+      ],
     }),
     short({
       seconds: 50,

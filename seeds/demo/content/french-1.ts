@@ -1,4 +1,4 @@
-import { part, point, recall, short, shortParts, type TopicContent, words } from './build.ts';
+import { part, point, recall, short, shortParts, type TopicContent, wording, words } from './build.ts';
 import { exactly } from './exact-words.ts';
 
 const family: TopicContent = {
@@ -55,6 +55,11 @@ const family: TopicContent = {
             'to row',
             'to bicker',
             'arguing',
+            'have an argument',
+            'fall out',
+            'have a row',
+            'bicker',
+            'to argue with each other',
           ),
           model: 'to argue',
           points: [point('to argue', { allow: ['to quarrel', 'to fall out'], reject: ['to dispute'] })],
@@ -66,28 +71,18 @@ const family: TopicContent = {
       stem: `Translate into French.
 
 > I get on well with my sister.`,
-      answer: {
-        kind: 'text',
-        accept: [
-          "Je m'entends bien avec ma sœur.",
-          "Je m'entends bien avec ma soeur.",
-          "J'ai de bons rapports avec ma sœur.",
-          "J'ai une bonne relation avec ma sœur.",
-          "J'ai de bonnes relations avec ma sœur.",
-        ],
-        reject: [
-          "Je m'entends bien avec mon sœur.",
-          'Je entends bien avec ma sœur.',
-          "J'entends bien avec ma sœur.",
-          "Je m'entend bien avec ma sœur.",
-        ],
-        unlisted: 'selfMark',
-      },
+      answer: wording(
+        "Je m'entends bien avec ma sœur.",
+        "Je m'entends bien avec ma soeur.",
+        "J'ai de bons rapports avec ma sœur.",
+        "J'ai une bonne relation avec ma sœur.",
+        "J'ai de bonnes relations avec ma sœur.",
+      ),
       model: "Je m'entends bien avec ma sœur.",
       points: [
         point('*Je m’entends bien*', {
           allow: ['*J’ai de bons rapports*'],
-          reject: ['*J’entends bien* (I hear well)'],
+          reject: ['*J’entends bien* (I hear well)', '*Je m’entend*'],
         }),
         point('*avec ma sœur*', { reject: ['*mon sœur*'] }),
       ],
@@ -190,8 +185,8 @@ const school: TopicContent = {
         }),
         part({
           prompt: '*réussir un examen*',
-          answer: exactly(
-            [
+          answer: {
+            ...wording(
               'to pass an exam',
               'pass an exam',
               'to pass a test',
@@ -201,9 +196,17 @@ const school: TopicContent = {
               'to be successful in an exam',
               'to pass an examination',
               'passing an exam',
+              'to pass exams',
+              'to pass your exam',
+            ),
+            reject: [
+              'to take an exam',
+              'to sit an exam',
+              'to fail an exam',
+              'to resit an exam',
+              'to revise for an exam',
             ],
-            ['to take an exam', 'to sit an exam', 'to fail an exam', 'to resit an exam', 'to revise for an exam'],
-          ),
+          },
           model: 'to pass an exam',
           points: [point('to pass an exam', { allow: ['to succeed in'], reject: ['to sit an exam'] })],
         }),
@@ -262,13 +265,14 @@ const school: TopicContent = {
             "because it's useful",
             'they are useful',
             'it is a useful subject',
+            'science is useful',
           ),
           model: 'it is useful',
           points: [point('It is useful', { reject: ['it is interesting', 'it is easy'] })],
         }),
         part({
           prompt: 'Which subject does she find boring?',
-          answer: words('art', 'drawing', 'art lessons'),
+          answer: words('art', 'arts', 'drawing', 'art lessons', 'sketching'),
           model: 'art',
           points: [point('Art', { allow: ['drawing'], reject: ['design'] })],
         }),
@@ -335,37 +339,52 @@ const town: TopicContent = {
             'the outskirts',
             'outskirts',
             'suburbia',
+            'the suburban area',
+            'suburban areas',
+            'the edge of town',
           ),
           model: 'the suburbs',
           points: [point('the suburbs', { allow: ['the outskirts'] })],
         }),
         part({
           prompt: '*un immeuble*',
-          answer: words(
-            'a block of flats',
-            'block of flats',
-            'an apartment block',
-            'apartment block',
-            'an apartment building',
-            'apartment building',
-            'a building',
-            'building',
-            'a block of apartments',
-            'flats',
-            'tower block',
-            'a tower block',
-          ),
+          answer: {
+            ...wording(
+              'a block of flats',
+              'block of flats',
+              'an apartment block',
+              'apartment block',
+              'an apartment building',
+              'apartment building',
+              'a building',
+              'building',
+              'a block of apartments',
+              'flats',
+              'tower block',
+              'a tower block',
+            ),
+            reject: ['a flat', 'an apartment', 'furniture', 'a piece of furniture', 'a house', 'immobile'],
+          },
           model: 'a block of flats',
           points: [point('a block of flats', { allow: ['a building'], reject: ['a flat', 'furniture'] })],
         }),
         part({
           prompt: '*au rez-de-chaussée*',
           answer: exactly(
-            ['on the ground floor', 'ground floor', 'the ground floor', 'at ground level', 'on ground floor'],
+            [
+              'on the ground floor',
+              'ground floor',
+              'the ground floor',
+              'at ground level',
+              'on ground floor',
+              'downstairs',
+              'on the bottom floor',
+              'bottom floor',
+            ],
             ['on the first floor', 'first floor', 'pavement', 'upstairs'],
           ),
           model: 'on the ground floor',
-          points: [point('on the ground floor', { reject: ['on the first floor'] })],
+          points: [point('on the ground floor', { allow: ['downstairs'], reject: ['on the first floor'] })],
         }),
       ],
     }),
@@ -375,29 +394,47 @@ const town: TopicContent = {
       parts: [
         part({
           prompt: 'opposite the station',
-          answer: exactly(['en face de la gare'], ['en face du gare', 'en face la gare', 'en face de gare']),
+          answer: {
+            ...wording('en face de la gare', 'face à la gare'),
+            reject: ['en face du gare', 'en face la gare', 'en face de gare'],
+          },
           model: 'en face de la gare',
-          points: [point('*en face de la gare*', { reject: ['*en face la gare*'] })],
+          points: [point('*en face de la gare*', { allow: ['*face à la gare*'], reject: ['*en face la gare*'] })],
         }),
         part({
           prompt: 'behind the church',
-          answer: exactly(["derrière l'église"], ["derrière de l'église", 'derrière la église', "devant l'église"]),
+          answer: {
+            ...wording("derrière l'église"),
+            reject: ["derrière de l'église", "devant l'église", "à côté de l'église"],
+          },
           model: "derrière l'église",
-          points: [point('*derrière l’église*', { reject: ['*derrière de l’église*'] })],
+          points: [
+            point('*derrière l’église*', { reject: ['*derrière de l’église*', '*derrière la église*', '*devant*'] }),
+          ],
         }),
         part({
           prompt: 'between the park and the river',
-          answer: exactly(
-            ['entre le parc et la rivière', 'entre le parc et le fleuve', 'entre le jardin public et la rivière'],
-            [
+          answer: {
+            ...wording(
+              'entre le parc et la rivière',
+              'entre le parc et le fleuve',
+              'entre le jardin public et la rivière',
+              'entre la rivière et le parc',
+            ),
+            reject: [
               'entre la parc et la rivière',
               'entre le parc et le rivière',
               'entre le parc est la rivière',
               'entre le parc et la fleuve',
             ],
-          ),
+          },
           model: 'entre le parc et la rivière',
-          points: [point('*entre le parc et la rivière*', { allow: ['*le fleuve*'] })],
+          points: [
+            point('*entre le parc et la rivière*', {
+              allow: ['*le fleuve*'],
+              reject: ['a wrong gender', '*est* for *et*'],
+            }),
+          ],
         }),
       ],
       guidance: '*En face de* keeps its *de*; *derrière* and *entre* are followed directly by the noun.',

@@ -1,4 +1,4 @@
-import { part, point, recall, short, shortParts, type TopicContent, words } from './build.ts';
+import { part, point, recall, short, shortParts, type TopicContent, wording } from './build.ts';
 import { exactly } from './exact-words.ts';
 
 const adjectives: TopicContent = {
@@ -101,23 +101,10 @@ const adjectives: TopicContent = {
       stem: `Translate into French.
 
 > My sister is taller than me.`,
-      answer: exactly(
-        ['Ma sœur est plus grande que moi.', 'Ma soeur est plus grande que moi.'],
-        [
-          'Ma sœur est plus grand que moi.',
-          'Ma soeur est plus grand que moi.',
-          'Mon sœur est plus grande que moi.',
-          'Ma sœur est plus grande que me.',
-          'Ma sœur est plus grande que je.',
-          'Ma sœur est plus grande de moi.',
-          'Ma sœur est plus grande qui moi.',
-          'Ma sœur et plus grande que moi.',
-          'Ma sœur est moins grande que moi.',
-        ],
-      ),
+      answer: wording('Ma sœur est plus grande que moi.', 'Ma soeur est plus grande que moi.'),
       model: 'Ma sœur est plus grande que moi.',
       points: [
-        point('*Ma sœur est plus grande*', { reject: ['*plus grand*'] }),
+        point('*Ma sœur est plus grande*', { reject: ['*plus grand*', '*mon sœur*', '*et* for *est*'] }),
         point('*que moi*', { reject: ['*que je*', '*que me*'] }),
       ],
       guidance: 'Comparatives are *plus … que*. The adjective still agrees, and after *que* the pronoun is *moi*.',
@@ -215,17 +202,10 @@ const present: TopicContent = {
           prompt: '*elle* (s’habiller)',
           answer: exactly(
             ["elle s'habille", "s'habille"],
-            [
-              "elle s'habilles",
-              'elle se habille',
-              'elle habille',
-              "elle s'habiller",
-              "elle m'habille",
-              "elle t'habille",
-            ],
+            ["elle s'habilles", "elle s'habiller", "elle m'habille", "elle t'habille"],
           ),
           model: "elle s'habille",
-          points: [point('*elle s’habille*', { reject: ['*elle se habille*'] })],
+          points: [point('*elle s’habille*', { reject: ['*elle se habille*', '*elle habille*'] })],
         }),
         part({
           prompt: '*nous* (se laver)',
@@ -245,27 +225,45 @@ const present: TopicContent = {
       parts: [
         part({
           prompt: '*ne … jamais*',
-          answer: exactly(['never', 'not ever'], ['no longer', 'not yet', 'always', 'nothing']),
+          answer: exactly(
+            ['never', 'not ever', 'not ... ever'],
+            ['ever', 'no longer', 'not yet', 'always', 'nothing', 'nobody'],
+          ),
           model: 'never',
           points: [point('never', { reject: ['ever'] })],
         }),
         part({
           prompt: '*ne … plus*',
-          answer: exactly(['no longer', 'not any more', 'no more', 'not any longer', 'not anymore'], ['most', 'never']),
+          answer: exactly(
+            [
+              'no longer',
+              'not any more',
+              'not ... any more',
+              'no more',
+              'not any longer',
+              'not ... any longer',
+              'not anymore',
+              'any more',
+            ],
+            ['more', 'most', 'never', 'nothing'],
+          ),
           model: 'no longer',
           points: [point('no longer', { allow: ['no more', 'not any more'], reject: ['more'] })],
         }),
         part({
           prompt: '*ne … que*',
-          answer: words('only', 'nothing but', 'just'),
+          answer: {
+            ...wording('only', 'nothing but', 'just', 'nothing except', 'not ... except', 'except', 'merely'),
+            reject: ['that', 'what', 'not that', 'nothing', 'never', 'no longer', 'nobody'],
+          },
           model: 'only',
           points: [point('only', { allow: ['nothing but'] })],
         }),
         part({
           prompt: '*ne … personne*',
           answer: exactly(
-            ['nobody', 'no one', 'no-one', 'not anyone', 'not anybody', 'noone'],
-            ['person', 'no person', 'nothing', 'somebody', 'someone'],
+            ['nobody', 'no one', 'no-one', 'not anyone', 'not anybody', 'noone', 'not ... anyone', 'not ... anybody'],
+            ['person', 'nothing', 'somebody', 'someone', 'anybody', 'anyone'],
           ),
           model: 'nobody',
           points: [point('nobody', { allow: ['no one'], reject: ['person'] })],
@@ -279,7 +277,7 @@ const present: TopicContent = {
         part({
           prompt: '*Je mange de la viande.* (I never eat meat.)',
           answer: exactly(
-            ['Je ne mange jamais de viande.'],
+            ['Je ne mange jamais de viande.', 'Jamais je ne mange de viande.'],
             [
               'Je ne mange jamais de la viande.',
               'Je mange jamais de viande.',
@@ -295,7 +293,7 @@ const present: TopicContent = {
         part({
           prompt: '*Je comprends tout.* (I understand nothing.)',
           answer: exactly(
-            ['Je ne comprends rien.', 'Je ne comprends rien du tout.'],
+            ['Je ne comprends rien.', 'Je ne comprends rien du tout.', "Je n'y comprends rien."],
             [
               'Je comprends rien.',
               'Je ne rien comprends.',

@@ -1,4 +1,4 @@
-import { part, point, recall, shortParts, type TopicContent, words } from './build.ts';
+import { part, point, recall, shortParts, type TopicContent, wording, words } from './build.ts';
 import { exactly } from './exact-words.ts';
 
 const past: TopicContent = {
@@ -14,18 +14,10 @@ const past: TopicContent = {
           prompt: '*je* (regarder)',
           answer: exactly(
             ["j'ai regardé"],
-            [
-              "j'ai regarder",
-              'je regardé',
-              'je suis regardé',
-              "j'ai regarde",
-              "j'ai regardée",
-              'je ai regardé',
-              'je regardais',
-            ],
+            ["j'ai regarder", 'je regardé', 'je suis regardé', "j'ai regarde", "j'ai regardée", 'je regardais'],
           ),
           model: "j'ai regardé",
-          points: [point('*j’ai regardé*', { reject: ['*j’ai regarder*'] })],
+          points: [point('*j’ai regardé*', { reject: ['*j’ai regarder*', '*je ai regardé*'] })],
         }),
         part({
           prompt: '*elle* (aller)',
@@ -122,9 +114,9 @@ const past: TopicContent = {
       parts: [
         part({
           prompt: '*je* (être)',
-          answer: exactly(["j'étais"], ["j'était", 'je étais', "j'ai été", "j'etes", "j'avais", "j'êtais"]),
+          answer: exactly(["j'étais"], ["j'était", "j'ai été", "j'etes", "j'avais"]),
           model: "j'étais",
-          points: [point('*j’étais*', { reject: ['*j’était*'] })],
+          points: [point('*j’étais*', { reject: ['*j’était*', '*je étais*'] })],
         }),
         part({
           prompt: '*il* (faire)',
@@ -193,9 +185,9 @@ const future: TopicContent = {
       parts: [
         part({
           prompt: 'I am going to travel.',
-          answer: exactly(
-            ['Je vais voyager.'],
-            [
+          answer: {
+            ...wording('Je vais voyager.', 'Je vais faire un voyage.', 'Je vais partir en voyage.'),
+            reject: [
               'Je vais voyage.',
               'Je vais voyagé.',
               'Je vas voyager.',
@@ -204,9 +196,9 @@ const future: TopicContent = {
               'Je fais voyager.',
               'Je voyagerai.',
             ],
-          ),
+          },
           model: 'Je vais voyager.',
-          points: [point('*Je vais voyager*', { reject: ['*Je vais voyage*'] })],
+          points: [point('*Je vais voyager*', { allow: ['*Je vais faire un voyage*'], reject: ['*Je vais voyage*'] })],
         }),
         part({
           prompt: 'We are going to eat. (Use *nous*.)',
@@ -363,16 +355,17 @@ const translation: TopicContent = {
               'in a farm near Lyon',
               'a farm near Lyon',
               'on the farm',
+              'at the farm',
             ],
-            ['closed', 'in Lyon'],
+            ['closed', 'a factory'],
           ),
           model: 'on a farm',
           points: ['On a farm (near Lyon)'],
         }),
         part({
           prompt: 'At what time does she get up?',
-          answer: exactly(
-            [
+          answer: {
+            ...wording(
               "five o'clock",
               "5 o'clock",
               '5 am',
@@ -389,16 +382,28 @@ const translation: TopicContent = {
               "at five o'clock",
               "at 5 o'clock",
               'at five',
-            ],
-            ["four o'clock", "six o'clock", '4', '6', '4 am', '6 am', '5 pm'],
-          ),
+              'five oclock',
+              '5 oclock',
+              '5:00 am',
+              '05:00 am',
+              '5.00 am',
+              '0500',
+              'at 5',
+              'at 5 am',
+              'at five am',
+              'at five in the morning',
+              '5h',
+              '5h00',
+            ),
+            reject: ["four o'clock", "six o'clock", '4', '6', '4 am', '6 am', '5 pm', 'five pm', '15', 'fifteen'],
+          },
           model: "five o'clock",
           points: ['At five o’clock'],
         }),
         part({
           prompt: 'What job do her parents think she should do?',
-          answer: exactly(
-            [
+          answer: {
+            ...wording(
               'lawyer',
               'a lawyer',
               'solicitor',
@@ -409,26 +414,32 @@ const translation: TopicContent = {
               'be a lawyer',
               'become a lawyer',
               'to become a lawyer',
-            ],
-            ['vet', 'a vet', 'avocado', 'advocate'],
-          ),
+              'attorney',
+              'an attorney',
+            ),
+            reject: ['vet', 'a vet', 'avocado', 'an avocado', 'nurse', 'farmer', 'doctor'],
+          },
           model: 'lawyer',
           points: [point('Lawyer', { allow: ['solicitor', 'barrister'], reject: ['vet'] })],
         }),
         part({
           prompt: 'What job does she dream of doing?',
-          answer: words(
-            'vet',
-            'a vet',
-            'veterinarian',
-            'veterinary surgeon',
-            'a veterinary surgeon',
-            'to be a vet',
-            'being a vet',
-            'a veterinarian',
-            'becoming a vet',
-            'be a vet',
-          ),
+          answer: {
+            ...wording(
+              'vet',
+              'a vet',
+              'veterinarian',
+              'veterinary surgeon',
+              'a veterinary surgeon',
+              'to be a vet',
+              'being a vet',
+              'a veterinarian',
+              'becoming a vet',
+              'be a vet',
+              'animal doctor',
+            ),
+            reject: ['lawyer', 'a lawyer', 'solicitor', 'barrister', 'farmer', 'a farmer', 'doctor', 'nurse'],
+          },
           model: 'vet',
           points: ['Vet'],
         }),
@@ -442,8 +453,8 @@ const translation: TopicContent = {
       parts: [
         part({
           prompt: '*une librairie*',
-          answer: exactly(
-            [
+          answer: {
+            ...wording(
               'bookshop',
               'a bookshop',
               'book shop',
@@ -452,36 +463,56 @@ const translation: TopicContent = {
               'a bookstore',
               'book store',
               "bookseller's",
-            ],
-            ['library', 'a library'],
-          ),
+              'a shop that sells books',
+            ),
+            reject: ['library', 'a library', 'librarian', 'bookcase'],
+          },
           model: 'a bookshop',
           points: [point('a bookshop', { reject: ['a library'] })],
         }),
         part({
           prompt: '*assister à*',
-          answer: exactly(
-            ['to attend', 'attend', 'to be present at', 'to be at', 'to go to', 'to witness'],
-            ['to assist', 'assist', 'to help', 'to wait'],
-          ),
+          answer: {
+            ...wording(
+              'to attend',
+              'attend',
+              'attending',
+              'to be present at',
+              'to be present',
+              'to be at',
+              'to go to',
+              'to witness',
+            ),
+            reject: ['to assist', 'assist', 'assist at', 'assist with', 'to help', 'help', 'to wait'],
+          },
           model: 'to attend',
           points: [point('to attend', { reject: ['to assist'] })],
         }),
         part({
           prompt: '*actuellement*',
-          answer: exactly(
-            ['currently', 'at the moment', 'at present', 'now', 'presently', 'nowadays', 'right now'],
-            ['actually', 'in fact'],
-          ),
+          answer: {
+            ...wording(
+              'currently',
+              'at the moment',
+              'at this moment',
+              'at the present time',
+              'at present',
+              'now',
+              'presently',
+              'nowadays',
+              'right now',
+            ),
+            reject: ['actually', 'in fact', 'really'],
+          },
           model: 'currently',
           points: [point('currently', { allow: ['at the moment'], reject: ['actually'] })],
         }),
         part({
           prompt: '*la journée*',
-          answer: exactly(
-            ['the day', 'day', 'daytime', 'the daytime', 'day time'],
-            ['journey', 'the journey', 'trip', 'today'],
-          ),
+          answer: {
+            ...wording('the day', 'day', 'daytime', 'the daytime', 'day time', 'the whole day', 'all day'),
+            reject: ['journey', 'the journey', 'trip', 'the trip', 'today'],
+          },
           model: 'the day',
           points: [point('the day', { reject: ['the journey'] })],
         }),
@@ -497,19 +528,27 @@ const translation: TopicContent = {
       parts: [
         part({
           prompt: 'Noé',
-          answer: words('both', 'positive and negative', 'negative and positive', 'p+n', 'positive + negative'),
+          answer: words(
+            'both',
+            'positive and negative',
+            'negative and positive',
+            'p+n',
+            'p/n',
+            'positive + negative',
+            'positive/negative',
+          ),
           model: 'both',
           points: [point('Both', { reject: ['positive only'] })],
         }),
         part({
           prompt: 'Jade',
-          answer: words('negative'),
+          answer: words('negative', 'negatif', 'n'),
           model: 'negative',
           points: ['Negative'],
         }),
         part({
           prompt: 'Sami',
-          answer: words('positive'),
+          answer: words('positive', 'positif', 'p'),
           model: 'positive',
           points: [point('Positive', { reject: ['negative, from *ne … rien* alone'] })],
         }),

@@ -1,4 +1,4 @@
-import { num, part, point, r, recall, short, shortParts, type TopicContent, words } from './build.ts';
+import { num, part, point, r, recall, short, shortParts, type TopicContent, wording } from './build.ts';
 import { algebra } from './mathematics-forms.ts';
 
 /** Number. */
@@ -180,7 +180,7 @@ $$`,
         seconds: 75,
         stem: r`Work out $\dfrac{5}{6} - \dfrac{3}{8}$. Give your answer as a fraction in its simplest form.`,
         lines: 3,
-        answer: words('11/24', '11 / 24'),
+        answer: wording('11/24', '11 / 24'),
         model: '11/24',
         points: [
           point(
@@ -212,7 +212,7 @@ $$`,
         tier: 'higher',
         stem: r`Write the recurring decimal $0.\dot{3}\dot{6}$ as a fraction in its simplest form.`,
         lines: 4,
-        answer: words('4/11', '4 / 11'),
+        answer: wording('4/11', '4 / 11'),
         model: '4/11',
         points: [
           point(
@@ -352,7 +352,7 @@ Work out the value of $k$.`,
         tier: 'higher',
         stem: r`Work out the value of $\left(\dfrac{16}{81}\right)^{\frac{3}{4}}$. Give your answer as a fraction in its simplest form.`,
         lines: 3,
-        answer: words('8/27', '8 / 27'),
+        answer: wording('8/27', '8 / 27'),
         model: '8/27',
         points: [
           point(r`Takes the fourth root: $\frac{2}{3}$`, { code: 'M', allow: ['2³ or 3³ seen'] }),

@@ -367,31 +367,39 @@ Work out the size of angle $XYZ$. Give your answer correct to $1$ decimal place.
     tier: 'higher',
     questions: [
       shortParts({
-        seconds: 80,
+        seconds: 120,
         tier: 'higher',
-        stem: r`Here are three column vectors.
+        stem: r`$PQRS$ is a parallelogram. $M$ is the midpoint of $QR$.
 
 $$
-\mathbf{a} = \begin{pmatrix} 3 \\ -2 \end{pmatrix} \qquad \mathbf{b} = \begin{pmatrix} -1 \\ 4 \end{pmatrix} \qquad 2\mathbf{a} - \mathbf{b} = \begin{pmatrix} p \\ q \end{pmatrix}
+\overrightarrow{PQ} = \begin{pmatrix} 3 \\ -2 \end{pmatrix} \qquad \overrightarrow{PS} = \begin{pmatrix} -4 \\ 10 \end{pmatrix} \qquad \overrightarrow{PM} = \begin{pmatrix} x \\ y \end{pmatrix}
 $$`,
         parts: [
           part({
-            prompt: r`Work out the value of $p$.`,
-            answerLabel: 'p =',
-            answer: num(7),
-            model: '7',
-            recompute: () => 2 * 3 - -1,
-            points: [point(r`$7$`, { code: 'B', reject: ['5, from 6 − 1'] })],
+            prompt: r`Work out the value of $x$.`,
+            lines: 3,
+            answerLabel: 'x =',
+            answer: num(1),
+            model: '1',
+            recompute: () => 3 + -4 / 2,
+            points: [
+              point(
+                r`$\overrightarrow{PM} = \overrightarrow{PQ} + \frac{1}{2}\overrightarrow{PS}$, or $3 + \frac{1}{2} \times (-4)$`,
+                { code: 'M', allow: ['QR = PS stated or used'] },
+              ),
+              point(r`$1$`, { code: 'A', reject: ['5, from subtracting'] }),
+            ],
           }),
           part({
-            prompt: r`Work out the value of $q$.`,
-            answerLabel: 'q =',
-            answer: num(-8),
-            model: '-8',
-            recompute: () => 2 * -2 - 4,
-            points: [point(r`$-8$`, { code: 'B' })],
+            prompt: r`Work out the value of $y$.`,
+            answerLabel: 'y =',
+            answer: num(3),
+            model: '3',
+            recompute: () => -2 + 10 / 2,
+            points: [point(r`$3$`, { code: 'A' })],
           }),
         ],
+        guidance: r`Opposite sides of a parallelogram are equal vectors, so $\overrightarrow{QR} = \overrightarrow{PS}$. Go along $PQ$ and then half of $QR$.`,
       }),
       short({
         seconds: 70,

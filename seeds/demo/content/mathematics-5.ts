@@ -208,6 +208,8 @@ Work out the value of $n$.`,
           'weak negative correlation',
           'inverse',
           'inverse correlation',
+          '-ve',
+          '-ve correlation',
         ),
         model: 'Negative',
         points: [

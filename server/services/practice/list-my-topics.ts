@@ -45,12 +45,12 @@ const loadOwnTopics = ({ actor, today }: Scope) =>
 function figures(row: Row, paper: NextPaper | undefined, { today, school: { seasonEndsOn } }: Scope) {
   const examOn = paper?.on ?? seasonEndsOn;
   const items: TopicItem[] = row.states.map((memory) => ({ memory, examOn }));
-  const { now, onExamDay } = topicRecall(items, today);
+  const { onExamDay } = topicRecall(items, today);
   const returns = row.states.flatMap((memory) => returnOn(memory, paper?.on ?? null, today) ?? []).sort();
   const practised = row.states.map((memory) => memory.lastOn).sort();
   return {
     standing: standingOf(onExamDay),
-    recall: now === null ? null : recallPercent(now),
+    recall: onExamDay === null ? null : recallPercent(onExamDay),
     returnsOn: returns[0] ?? null,
     lastPractisedOn: practised.at(-1) ?? null,
   };

@@ -73,6 +73,11 @@ export class AnswerQueue {
     this.#write([...this.#read().filter(({ body }) => body.id !== entry.body.id), entry]);
   }
 
+  /** Puts back what a sign-out in another tab has wiped from this tab's storage. */
+  keep(): void {
+    this.#write(this.#waiting);
+  }
+
   remove(id: string): void {
     this.#write(this.#read().filter(({ body }) => body.id !== id));
   }

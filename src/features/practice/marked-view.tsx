@@ -14,13 +14,13 @@ import { AnsweredRows, SubjectRow } from './question-rows.tsx';
 type ResultPart = AnswerResultDto['parts'][number];
 
 /** Ticks and carets of one part, for the marks margin. */
-export function MarginMarks({ part }: { part: ResultPart | undefined }) {
+export function MarginMarks({ part, isDrawn }: { part: ResultPart | undefined; isDrawn: boolean }) {
   const decided = part?.points.filter((point) => point.isEarned !== null) ?? [];
   return (
     <div className="flex flex-col items-center justify-end gap-1.5 h-full pb-6" aria-hidden="true">
       {keyed(decided, (point) => point.text).map(({ key, item: point }) => (
         <span key={key} className={`inline-flex items-center gap-1 mcode ${point.isEarned ? '' : 'no'}`}>
-          {point.isEarned ? <Tick size={20} isDrawn /> : <Caret />}
+          {point.isEarned ? <Tick size={20} isDrawn={isDrawn} /> : <Caret />}
           {pointCode(point)}
         </span>
       ))}
@@ -28,18 +28,29 @@ export function MarginMarks({ part }: { part: ResultPart | undefined }) {
   );
 }
 
-const isFull = (part: ResultPart): boolean => part.points.every((point) => point.isEarned);
+/** Letters and figures alone, so that "$25\\,000$" and "25000" are the same. */
+const bare = (text: string): string => text.toLowerCase().replace(/[^\p{L}\p{N}]/gu, '');
 
-function PartScheme({ part, letter }: { part: ResultPart; letter: string | null }) {
+/** A model answer helps where marks were lost and no point of the scheme says it already. */
+const needsModelAnswer = ({ points, modelAnswer }: ResultPart): boolean =>
+  points.some((point) => !point.isEarned) && !points.some((point) => bare(point.text) === bare(modelAnswer));
+
+interface PartSchemeProps {
+  part: ResultPart;
+  letter: string | null;
+  isDrawn: boolean;
+}
+
+function PartScheme({ part, letter, isDrawn }: PartSchemeProps) {
   return (
     <div>
       {letter ? <h3 className="!text-sm font-semibold text-ink-2 !font-text !tracking-normal">{letter}</h3> : null}
-      <MarkScheme points={part.points} isDrawn />
-      {isFull(part) ? null : (
+      <MarkScheme points={part.points} isDrawn={isDrawn} />
+      {needsModelAnswer(part) ? (
         <p className="mt-2 text-sm text-ink-2">
           Model answer: <Markdown isInline source={part.modelAnswer} />
         </p>
-      )}
+      ) : null}
     </div>
   );
 }
@@ -70,13 +81,15 @@ function Explanation({ result }: { result: AnswerResultDto }) {
     <section>
       <h3>{headingFor(result)}</h3>
       <div className="mt-1 grid gap-1.5">
-        {result.parts.map((part, index) => (
-          // Parts never change places.
-          <div key={partLetter(index)}>
-            {isSingle ? null : `${partLetter(index)} `}
-            <Markdown isInline source={part.words} />
-          </div>
-        ))}
+        {result.parts.map((part, index) =>
+          // Where the student marked it, the words only asked for that. Parts never change places.
+          part.markedBy === 'student' ? null : (
+            <div key={partLetter(index)}>
+              {isSingle ? null : `${partLetter(index)} `}
+              <Markdown isInline source={part.words} />
+            </div>
+          ),
+        )}
         {result.guidance ? <Markdown source={result.guidance} /> : null}
       </div>
       {result.next ? (
@@ -118,7 +131,7 @@ export function MarkedView({ item, number, result, steps, isFresh }: MarkedViewP
           item={item}
           number={number}
           responses={result.responses}
-          renderMarks={(index) => <MarginMarks part={result.parts[index]} />}
+          renderMarks={(index) => <MarginMarks part={result.parts[index]} isDrawn={isFresh} />}
         />
         <SheetRow marks={<div className="flex items-end justify-center h-full pb-6">{badge}</div>}>
           <div className="pb-6 flex items-end justify-between gap-4">
@@ -138,6 +151,7 @@ export function MarkedView({ item, number, result, steps, isFresh }: MarkedViewP
                     key={partLetter(index)}
                     part={part}
                     letter={result.parts.length > 1 ? partLetter(index) : null}
+                    isDrawn={isFresh}
                   />
                 ))}
               </div>

@@ -13,10 +13,10 @@ export function SubjectRow({ item, topic }: { item: SetItemDto; topic?: AnswerRe
   return (
     <SheetRow>
       <div className="pt-4 md:pt-6 flex items-center justify-between gap-3 text-sm">
-        <span className="flex items-center gap-2 font-semibold">
+        <span className="flex flex-none items-center gap-2 font-semibold max-w-[60%]">
           <StrandLabel subject={item.subject} /> {item.subject.name}
         </span>
-        <span className="text-right text-ink-2">
+        <span className="text-right text-balance text-ink-2">
           {topic ? (
             <>
               Topic <b className="font-semibold text-ink">{topic.title}</b>

@@ -5,6 +5,7 @@ import { type SetDto, setKindWords } from '#shared/schemas/practice.ts';
 import { Ribbon } from '#src/components/ribbon.tsx';
 import { type RibbonItem, ribbonSizes } from '#src/components/ribbon-geometry.ts';
 import { timerWords } from '#src/lib/dates.ts';
+import { useHiddenTime } from './use-hidden-time.ts';
 
 export interface RunnerState {
   set: SetDto;
@@ -12,6 +13,8 @@ export interface RunnerState {
   place: number;
   /** Items answered, those still waiting on this device included. */
   answeredIds: ReadonlySet<string>;
+  /** The question shown was answered just now. */
+  isFresh?: boolean;
 }
 
 interface RunnerFrameProps {
@@ -25,7 +28,7 @@ interface RunnerFrameProps {
   children: ReactNode;
 }
 
-function useRibbonItems({ set, place, answeredIds }: RunnerState): RibbonItem[] {
+function useRibbonItems({ set, place, answeredIds, isFresh = false }: RunnerState): RibbonItem[] {
   return useMemo(
     () =>
       set.items.map(({ id, subject }, index) => ({
@@ -33,8 +36,9 @@ function useRibbonItems({ set, place, answeredIds }: RunnerState): RibbonItem[] 
         name: subject.name,
         strand: subject.strand,
         state: index === place ? 'now' : answeredIds.has(id) ? 'done' : 'next',
+        ...(index === place ? { isAnswered: answeredIds.has(id), isFresh } : {}),
       })),
-    [set.items, place, answeredIds],
+    [set.items, place, answeredIds, isFresh],
   );
 }
 
@@ -45,11 +49,31 @@ function timeLeftWords(left: number): string {
   return left <= 300 ? 'Five minutes left.' : '';
 }
 
+/** The time of a set, and the way to hide it, which is kept on the device. */
+function SetTime({ seconds, isHidden, toggle }: { seconds: number; isHidden: boolean; toggle: () => void }) {
+  return (
+    <span className="text-sm text-ink-2 flex items-center justify-end gap-x-2.5">
+      {isHidden ? null : <span role="timer">{timerWords(seconds)} so far</span>}
+      <HideTime isHidden={isHidden} toggle={toggle} className="max-md:hidden -my-3" />
+    </span>
+  );
+}
+
+function HideTime({ isHidden, toggle, className }: { isHidden: boolean; toggle: () => void; className: string }) {
+  return (
+    <button type="button" className={`link text-sm min-h-11 ${className}`} onClick={toggle}>
+      {isHidden ? 'Show time' : 'Hide time'}
+    </button>
+  );
+}
+
 /** The frame of a running set: one way out, the ribbon, where we are and how long it took. */
 export function RunnerFrame({ state, seconds, headingRef, notes, children }: RunnerFrameProps) {
   const { set, place } = state;
   const items = useRibbonItems(state);
   const name = setKindWords[set.kind];
+  const time = useHiddenTime();
+  const left = set.budgetSeconds - seconds;
   return (
     <div className="flex min-h-screen flex-col">
       <title>{`Question ${place + 1}, ${name.toLowerCase()} – Plait`}</title>
@@ -78,19 +102,18 @@ export function RunnerFrame({ state, seconds, headingRef, notes, children }: Run
               <span className="sr-only">Question </span>
               {place + 1} of {set.items.length}
             </h1>
-            <span className="text-sm text-ink-2 block" role="timer">
-              {timerWords(seconds)} so far
-            </span>
+            <SetTime seconds={seconds} {...time} />
           </div>
         </div>
       </header>
       <main className="md:px-10 pb-8 flex-1">
         <div className="max-w-[62rem] mx-auto">
           <p role="status" className="sr-only">
-            {timeLeftWords(set.budgetSeconds - seconds)}
+            {time.isHidden && left > 0 ? '' : timeLeftWords(left)}
           </p>
           {notes}
           {children}
+          <HideTime {...time} className="md:hidden mx-5 mt-2" />
         </div>
       </main>
     </div>

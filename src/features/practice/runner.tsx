@@ -101,7 +101,7 @@ function Answered({ control, item, viewKey }: AnsweredProps) {
 
 function View({ set, control }: { set: SetDto; control: RunnerControl }) {
   const { item, entry, place, away, answeredIds, secondsBefore, refusal, drafts } = control;
-  const state: RunnerState = { set, place: Math.max(place, 0), answeredIds };
+  const state: RunnerState = { set, place: Math.max(place, 0), answeredIds, isFresh: control.isFresh };
   const notes = <Notes set={set} control={control} />;
 
   if (!item) {

@@ -70,16 +70,14 @@ function PartTicks({ part, letter, ticks, onTick }: PartTicksProps) {
   return (
     <div>
       {letter ? <h3 className="!text-base !leading-6">{letter}</h3> : null}
+      <p className="text-sm text-ink-2">
+        <Markdown isInline source={part.words} />
+      </p>
       {part.markedBy === 'plait' ? (
-        <>
-          <p className="text-ink-2">
-            <Markdown isInline source={part.words} />
-          </p>
-          <MarkScheme points={part.points} />
-        </>
+        <MarkScheme points={part.points} />
       ) : (
         <>
-          <ul className="border-b border-rule" data-ticks="">
+          <ul className="mt-3 border-b border-rule" data-ticks="">
             {keyed(part.points, (point) => point.text).map(({ key, item: point, index }) => (
               <TickRow key={key} point={point} isOn={ticks[index] ?? false} onChange={(isOn) => onTick(index, isOn)} />
             ))}
@@ -132,8 +130,7 @@ export function SelfMarkView({ item, number, result, kept, isSending, onTicks, o
             <h2 ref={heading} id="self-mark" tabIndex={-1} className="!text-[1.125rem] !leading-6">
               Tick each point you earned
             </h2>
-            <p className="hint mb-3">Same meaning counts. Same words are not needed.</p>
-            <div className="grid gap-5">
+            <div className="mt-0.5 grid gap-5">
               {result.parts.map((part, at) => (
                 <PartTicks
                   key={partLetter(at)}

@@ -1,5 +1,5 @@
 import { type SetSummaryDto, setKindWords } from '#shared/schemas/practice.ts';
-import { Ribbon } from '#src/components/ribbon.tsx';
+import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { type RibbonItem, ribbonSizes } from '#src/components/ribbon-geometry.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 
@@ -23,7 +23,7 @@ export function SummaryRibbon({ summary }: { summary: SetSummaryDto }) {
   return (
     <div className="sheet px-5 py-4 md:px-8 md:py-6 mb-7">
       <div className="hidden md:block">
-        <Ribbon
+        <RibbonRows
           items={ribbonItems(summary.items)}
           size={ribbonSizes.today}
           name={setKindWords[summary.kind]}

@@ -76,6 +76,7 @@ export function useAnswerQueue(userId: string, setId: string, onRefused: (refusa
         if (isStopped.current) return;
       }
     } catch (error) {
+      if (isSignedOut(error)) queue.keep();
       noticeSignedOut(error);
       if (isStopped.current) return;
       if (isTransient(error)) setAway(error instanceof NetworkError ? 'offline' : 'busy');

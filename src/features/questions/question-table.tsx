@@ -61,7 +61,7 @@ export function QuestionTable({ rows, lang, isBusy }: QuestionTableProps) {
               <td className="text-ink-2">{kindWords[row.kind]}</td>
               <td className="r font-bold">{row.maxMarks}</td>
               <td className="r">
-                <FacilityBar facility={row.facility} none="—" />
+                <FacilityBar facility={row.facility} none="–" />
               </td>
               <td>
                 <Status row={row} />
@@ -83,7 +83,8 @@ export function QuestionTable({ rows, lang, isBusy }: QuestionTableProps) {
             <span className="col-start-2 text-sm text-ink-2">
               {row.topic || 'No topic yet'}
               <span className="num block">
-                {kindWords[row.kind]}.{row.facility === null ? '' : ` Facility ${row.facility.toFixed(2)}`}
+                {kindWords[row.kind]}
+                {row.facility === null ? '' : `, facility ${row.facility.toFixed(2)}`}
               </span>
             </span>
             <span className="self-end text-sm">

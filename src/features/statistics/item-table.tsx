@@ -11,7 +11,7 @@ interface ItemTableProps {
 }
 
 const TOO_FEW = 'under 10 students';
-const timeWords = (seconds: number | null) => (seconds === null ? '—' : secondsWords(seconds));
+const timeWords = (seconds: number | null) => (seconds === null ? '–' : secondsWords(seconds));
 
 /** Each question version with its figures: a table at a desk, a list on a phone. */
 export function ItemTable({ rows, lang, isBusy }: ItemTableProps) {

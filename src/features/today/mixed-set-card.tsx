@@ -4,7 +4,7 @@ import { durationWords } from '#shared/domain/time/words.ts';
 import type { TodaySetDto } from '#shared/schemas/practice.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { MarksBadge } from '#src/components/marks-badge.tsx';
-import { Ribbon } from '#src/components/ribbon.tsx';
+import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { ribbonSizes } from '#src/components/ribbon-geometry.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { clockWords } from '#src/lib/dates.ts';
@@ -13,7 +13,7 @@ import { countBySubject, ribbonItems } from './ribbon-items.ts';
 interface CardProps {
   set: TodaySetDto;
   zone: string;
-  /** The morning set, in one line beside the button. */
+  /** The morning set, when it is done, in one line beside the button. */
   aside: ReactNode;
 }
 
@@ -26,7 +26,7 @@ function aboutWords(set: TodaySetDto): string {
 
 function timeWords(set: TodaySetDto, zone: string): string {
   if (set.status === 'done') return set.finishedAt ? `Finished at ${clockWords(set.finishedAt, zone)}` : '';
-  return `about ${durationWords(set.minutes)}`;
+  return `about ${durationWords(set.minutes)}${set.status === 'open' ? ' in all' : ''}`;
 }
 
 function Strands({ set }: { set: TodaySetDto }) {
@@ -34,10 +34,10 @@ function Strands({ set }: { set: TodaySetDto }) {
   return (
     <>
       <div className="mt-4 mb-2 -mx-1 hidden md:block">
-        <Ribbon items={items} size={ribbonSizes.today} name="Mixed set" surface="sheet" tint={34} room={730} />
+        <RibbonRows items={items} size={ribbonSizes.today} name="Mixed set" surface="sheet" tint={34} room={730} />
       </div>
       <div className="mt-4 md:hidden">
-        <Ribbon
+        <RibbonRows
           items={items}
           size={ribbonSizes.todayPhone}
           name="Mixed set"
@@ -58,6 +58,11 @@ function Strands({ set }: { set: TodaySetDto }) {
   );
 }
 
+function stepWords({ status, answered, questions }: TodaySetDto): string {
+  if (status !== 'open') return 'Start mixed set';
+  return answered < questions ? 'Continue mixed set' : 'Finish mixed set';
+}
+
 function Step({ set }: { set: TodaySetDto }) {
   if (set.status === 'done') {
     return (
@@ -75,7 +80,7 @@ function Step({ set }: { set: TodaySetDto }) {
   }
   return (
     <Link className="btn big max-sm:w-full" to="/set/mixed">
-      {set.status === 'open' ? 'Continue mixed set' : 'Start mixed set'}
+      {stepWords(set)}
     </Link>
   );
 }

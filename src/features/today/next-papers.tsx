@@ -38,7 +38,9 @@ export function NextPapers({ papers }: { papers: Sitting[] }) {
                 <span className="leading-tight min-w-0">
                   <span className="sr-only">{sitting.subject.name} </span>
                   <span className="font-semibold">{sitting.paperTitle}</span>
-                  <span className="text-ink-2 num">, {durationWords(sitting.minutes)}</span>
+                  <span className="text-ink-2 num">
+                    , <span className="whitespace-nowrap">{durationWords(sitting.minutes)}</span>
+                  </span>
                   <span className="block text-sm text-ink-2 num mt-0.5">
                     {dayTimeWords(sitting.on, sitting.startsAt)}
                   </span>
@@ -49,7 +51,7 @@ export function NextPapers({ papers }: { papers: Sitting[] }) {
               </li>
             ))}
           </ul>
-          <p className="hint mt-2">Dates from {sources.join('; ')}. The exams office has the last word.</p>
+          <p className="hint mt-2">Source of the dates: {sources.join('; ')}. The exams office has the last word.</p>
         </>
       )}
     </section>

@@ -8,11 +8,11 @@ export function WeakTopics({ topics, hasPapers }: { topics: TodayDto['weakTopics
   return (
     <section className="mt-9" aria-labelledby="weak">
       <h2 id="weak" className="!text-[1.25rem] pb-2 border-b border-ink">
-        {hasPapers ? 'Weak for those papers' : 'Weak topics'}
+        {hasPapers ? 'Weakest for those papers' : 'Weakest topics'}
       </h2>
       {topics.length === 0 ? (
         <p className="text-ink-2 mt-3">
-          Nothing is weak so far. Topics appear here once you have answered some questions.
+          Your weakest topics appear here once you have answered some questions.
         </p>
       ) : (
         <>

@@ -12,9 +12,15 @@ interface SubjectTabsProps {
 export function SubjectTabs({ subjects, chosenId }: SubjectTabsProps) {
   return (
     <nav className="tabs lg:!gap-x-3.5 lg:text-sm" aria-label="Subject">
-      <Link to="/topics" replace preventScrollReset aria-current={chosenId === null ? 'page' : undefined}>
+      <Link
+        to="/topics"
+        replace
+        preventScrollReset
+        aria-current={chosenId === null ? 'page' : undefined}
+        className="!flex items-center min-h-11"
+      >
         All {subjects.length}
-        <span className="max-lg:sr-only"> subjects</span>
+        <span className="max-lg:sr-only">&nbsp;subjects</span>
       </Link>
       {subjects.map((subject) => (
         <Link

@@ -24,7 +24,7 @@ export function TopicTable({ groups, today }: TopicTableProps) {
           <th scope="col">Topic</th>
           <th scope="col">Standing</th>
           <th scope="col" className="w-[270px]" colSpan={2}>
-            Expected recall now
+            Expected recall on the day
           </th>
           <th scope="col">Comes back</th>
           <th scope="col" className="whitespace-nowrap">
