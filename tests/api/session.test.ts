@@ -1,12 +1,13 @@
 import type TestAgent from 'supertest/lib/agent.js';
 import { describe, expect, test } from 'vitest';
-import { aSubject } from '#seeds/factories/curriculum.ts';
+import { aClass, aSubject } from '#seeds/factories/curriculum.ts';
 import { aPerson, aStudent, type FactoryPerson } from '#seeds/factories/people.ts';
 import { aSchool } from '#seeds/factories/school.ts';
 import { withSchool } from '#server/db/scope.ts';
 import { Membership } from '#server/models/membership.ts';
 import { TutorGroup } from '#server/models/tutor-group.ts';
 import { User } from '#server/models/user.ts';
+import { loadScope } from '#server/services/people/load-scope.ts';
 import type { Role } from '#shared/schemas/role.ts';
 import { cookieOf, setCookie, storedSessions, trySignIn } from '#tests/support/account.ts';
 import { browser, testApp, testClock } from '#tests/support/app.ts';
@@ -160,6 +161,20 @@ test('a role that is given or ends counts from the next request on', async () =>
   await withSchool(school.id, () => Membership.update({ validTo: '2020-01-02' }, { where: { userId: person.id } }));
   await agent.get('/api/today').expect(403);
   expect((await agent.get('/api/me').expect(200)).body.memberships).toEqual([]);
+});
+
+test('a class that is left over from a role that ended reaches nobody', async () => {
+  const school = await aSchool();
+  const [past, present] = [await aSubject(school), await aSubject(school)];
+  const teacher = await aPerson(
+    school,
+    { role: 'teacher', subjectId: past.id, validTo: '2020-01-02' },
+    { role: 'teacher', subjectId: present.id },
+  );
+  await aClass(school, past, { teachers: [teacher] });
+  const { id } = await aClass(school, present, { teachers: [teacher] });
+  const scope = await withSchool(school.id, (open) => loadScope(open, teacher.id));
+  expect(scope?.actor.classIds).toEqual([id]);
 });
 
 test('the last activity is written at most once a minute', async () => {

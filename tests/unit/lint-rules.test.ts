@@ -61,6 +61,7 @@ const examples: Example[] = [
   ...allowed('shared/schemas', 'zod', './common.ts'),
 
   ...refused('server', '#src/lib/a.ts', '#seeds/factories/a.ts', '#tests/support/a.ts', 'node:child_process'),
+  ...allowed('server/launch', 'node:child_process'),
   ...refused('server/routes', '#server/models/a.ts', '#server/db/scope.ts', '#server/presenters/a.ts', 'sequelize'),
   ...allowed('server/routes', '#server/services/b/a.ts', '#server/http/registry.ts', '#shared/schemas/a.ts'),
   ...refused('server/services/b', '#server/routes/a.ts', '#server/http/session.ts', 'express', 'child_process'),

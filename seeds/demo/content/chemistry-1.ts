@@ -1,4 +1,5 @@
 import { num, part, point, r, recall, short, shortParts, type TopicContent, wording, words } from './build.ts';
+import { exactly } from './exact-words.ts';
 
 /** Paper 1: atoms, bonding and amounts. */
 export const chemistryTopics1To3: TopicContent[] = [
@@ -69,7 +70,7 @@ Calculate the relative atomic mass of the gallium in this sample. Give your answ
       short({
         seconds: 35,
         stem: 'State the name given to atoms of the same element that have different numbers of neutrons.',
-        answer: words('isotopes', 'isotope'),
+        answer: exactly(['isotopes', 'isotope'], ['isotones', 'isomers']),
         model: 'isotopes',
         points: [point('isotopes', { reject: ['allotropes', 'isomers', 'ions'] })],
       }),
@@ -134,7 +135,7 @@ Calculate the relative atomic mass of the gallium in this sample. Give your answ
           }),
           part({
             prompt: 'Name the product that causes this colour.',
-            answer: words('bromine', 'Br2', 'Br₂', 'bromine solution', 'aqueous bromine', 'bromine water'),
+            answer: exactly(['bromine', 'Br2', 'bromine solution', 'aqueous bromine', 'bromine water'], ['bromide']),
             model: 'bromine',
             points: [point('bromine', { allow: ['Br₂'], reject: ['bromide'] })],
           }),

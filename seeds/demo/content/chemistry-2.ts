@@ -1,4 +1,5 @@
 import { num, part, point, r, recall, short, shortParts, type TopicContent, wording, words } from './build.ts';
+import { exactly } from './exact-words.ts';
 
 const carbonDioxide = ['carbon dioxide', 'CO2', 'CO₂'];
 
@@ -183,7 +184,10 @@ Titres within $0.10\ \text{cm}^3$ of each other are concordant. Calculate the me
         parts: [
           part({
             prompt: 'Name the salt formed.',
-            answer: words('zinc sulfate', 'zinc sulphate', 'ZnSO4', 'ZnSO₄'),
+            answer: exactly(
+              ['zinc sulfate', 'zinc sulphate', 'ZnSO4'],
+              ['zinc sulfide', 'zinc sulphide', 'zinc sulfite', 'zinc sulphite'],
+            ),
             model: 'zinc sulfate',
             points: [point('zinc sulfate', { allow: ['ZnSO₄'], reject: ['zinc sulfide'] })],
           }),
@@ -210,7 +214,7 @@ Titres within $0.10\ \text{cm}^3$ of each other are concordant. Calculate the me
           }),
           part({
             prompt: 'Name the gas produced at the positive electrode.',
-            answer: words('chlorine', 'Cl2', 'Cl₂', 'chlorine gas'),
+            answer: exactly(['chlorine', 'Cl2', 'chlorine gas'], ['chloride', 'chloride gas']),
             model: 'chlorine',
             points: [point('chlorine', { allow: ['Cl₂'], reject: ['chloride', 'oxygen'] })],
           }),
@@ -435,7 +439,10 @@ Each ammonia molecule contains three $\text{N–H}$ bonds. Calculate the bond en
           }),
           part({
             prompt: 'State the name given to a reaction that transfers energy to the surroundings.',
-            answer: words('exothermic', 'exothermic reaction', 'it is exothermic'),
+            answer: exactly(
+              ['exothermic', 'exothermic reaction', 'it is exothermic'],
+              ['endothermic', 'endothermic reaction', 'it is endothermic'],
+            ),
             model: 'exothermic',
             points: [point('exothermic', { reject: ['endothermic'] })],
           }),

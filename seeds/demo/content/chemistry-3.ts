@@ -1,4 +1,5 @@
 import { num, part, point, r, recall, short, shortParts, type TopicContent, wording, words } from './build.ts';
+import { exactly } from './exact-words.ts';
 
 /** Paper 2: rates, organic chemistry, tests, and the atmosphere and resources. */
 export const chemistryTopics7To10: TopicContent[] = [
@@ -281,15 +282,9 @@ $$`,
           }),
           part({
             prompt: 'Name the orange solution that can be used to test for an alkene.',
-            answer: words(
-              'bromine water',
-              'bromine',
-              'bromine solution',
-              'aqueous bromine',
-              'Br2',
-              'Br2(aq)',
-              'Br₂',
-              'Br₂(aq)',
+            answer: exactly(
+              ['bromine water', 'bromine', 'bromine solution', 'aqueous bromine', 'Br2', 'Br2(aq)'],
+              ['bromide', 'bromide water', 'bromide solution'],
             ),
             model: 'bromine water',
             points: [point('bromine water', { allow: ['bromine'], reject: ['bromide'] })],
@@ -530,30 +525,47 @@ Relative atomic masses ($A_\text{r}$): $\text{H} = 1$, $\text{C} = 12$`,
         parts: [
           part({
             prompt: 'A white precipitate forms with dilute hydrochloric acid and barium chloride solution.',
-            answer: words(
-              'sulfate',
-              'sulphate',
-              'sulfate ion',
-              'sulfate ions',
-              'sulphate ion',
-              'sulphate ions',
-              'SO4 2-',
-              'SO42-',
-              'SO4^2-',
-              'SO₄²⁻',
+            answer: exactly(
+              [
+                'sulfate',
+                'sulphate',
+                'sulfate ion',
+                'sulfate ions',
+                'sulphate ion',
+                'sulphate ions',
+                'SO4 2-',
+                'SO42-',
+                'SO4^2-',
+              ],
+              [
+                'sulfide',
+                'sulphide',
+                'sulfite',
+                'sulphite',
+                'sulfite ion',
+                'sulfite ions',
+                'sulfide ion',
+                'sulfide ions',
+              ],
             ),
             model: 'sulfate',
             points: [point('sulfate', { allow: ['SO₄²⁻'], reject: ['sulfide', 'sulfite'] })],
           }),
           part({
             prompt: 'A cream precipitate forms with dilute nitric acid and silver nitrate solution.',
-            answer: words('bromide', 'bromide ion', 'bromide ions', 'Br-', 'Br⁻', 'Br^-'),
+            answer: exactly(
+              ['bromide', 'bromide ion', 'bromide ions', 'Br-', 'Br^-'],
+              ['bromine', 'bromine ion', 'bromine ions'],
+            ),
             model: 'bromide',
             points: [point('bromide', { allow: ['Br⁻'], reject: ['bromine'] })],
           }),
           part({
             prompt: 'A white precipitate forms with dilute nitric acid and silver nitrate solution.',
-            answer: words('chloride', 'chloride ion', 'chloride ions', 'Cl-', 'Cl⁻', 'Cl^-'),
+            answer: exactly(
+              ['chloride', 'chloride ion', 'chloride ions', 'Cl-', 'Cl^-'],
+              ['chlorine', 'chlorine ion', 'chlorine ions'],
+            ),
             model: 'chloride',
             points: [point('chloride', { allow: ['Cl⁻'], reject: ['chlorine'] })],
           }),

@@ -20,7 +20,8 @@ const structure: TopicContent = {
       seconds: 45,
       stem: 'A short story opens with a child shutting a red gate and ends, years later, with the same person opening it. State the term for a structure in which the ending returns to the opening.',
       answer: {
-        ...wording(
+        kind: 'text',
+        accept: [
           'cyclical',
           'cyclical structure',
           'cyclic',
@@ -34,7 +35,7 @@ const structure: TopicContent = {
           'bookending',
           'bookends',
           'full circle',
-        ),
+        ],
         reject: [
           'linear',
           'linear structure',
@@ -43,6 +44,7 @@ const structure: TopicContent = {
           'flashback',
           'foreshadowing',
         ],
+        unlisted: 'selfMark',
       },
       model: 'cyclical structure',
       points: [
@@ -136,7 +138,8 @@ const summary: TopicContent = {
       seconds: 40,
       stem: 'State the term for bringing together information from two texts to make a single point.',
       answer: {
-        ...wording(
+        kind: 'text',
+        accept: [
           'synthesis',
           'synthesising',
           'synthesise',
@@ -144,8 +147,9 @@ const summary: TopicContent = {
           'synthesize',
           'to synthesise',
           'synthesis of information',
-        ),
+        ],
         reject: ['analysis', 'analyse', 'summary', 'comparison', 'inference', 'evaluation'],
+        unlisted: 'selfMark',
       },
       model: 'synthesis',
       points: [point('Synthesis', { reject: ['analysis'] })],

@@ -89,7 +89,8 @@ const viewpointWriting: TopicContent = {
       seconds: 45,
       stem: 'In a speech, a writer says: “Some will say that a youth club costs too much. It costs less than the damage done by having none.” State the term for an opposing point that a writer raises in order to answer it.',
       answer: {
-        ...wording(
+        kind: 'text',
+        accept: [
           'counter-argument',
           'counterargument',
           'counter argument',
@@ -99,8 +100,9 @@ const viewpointWriting: TopicContent = {
           'counter claim',
           'counterpoint',
           'counter-point',
-        ),
+        ],
         reject: ['argument', 'rhetorical question', 'rebuttal', 'anecdote'],
+        unlisted: 'selfMark',
       },
       model: 'counter-argument',
       points: [
@@ -187,6 +189,7 @@ const creativeWriting: TopicContent = {
             'aural',
             'sense of hearing',
             'sense of sound',
+            'audible',
             'hear',
             'listening',
             'the ears',
@@ -213,6 +216,7 @@ const creativeWriting: TopicContent = {
           'clichés',
           'cliches',
           'clichéd',
+          'clichéd phrase',
           'hackneyed phrase',
           'hackneyed expression',
           'stock phrase',

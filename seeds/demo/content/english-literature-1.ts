@@ -127,6 +127,7 @@ const macbethThemes: TopicContent = {
           'King James',
           'James',
           'James VI and I',
+          'James VI',
           'James I of England',
           'King James the First',
           'James 1',
@@ -274,7 +275,7 @@ const macbethLanguage: TopicContent = {
 
 > “Come, you spirits\
 > That tend on mortal thoughts, unsex me here”`,
-      answer: exactly(['Lady Macbeth', 'Lady M'], ['Lady Macduff', 'the Witches', 'Hecate']),
+      answer: exactly(['Lady Macbeth', 'Lady M', "Macbeth's wife"], ['Lady Macduff', 'the Witches', 'Hecate']),
       model: 'Lady Macbeth',
       points: ['Lady Macbeth'],
     }),
@@ -372,7 +373,7 @@ const carolPlot: TopicContent = {
         }),
         part({
           prompt: 'Scrooge’s nephew',
-          answer: exactly(['Fred'], ['Bob', 'Tim', 'Peter', 'Fezziwig']),
+          answer: exactly(['Fred', 'Frederick'], ['Bob', 'Tim', 'Peter', 'Fezziwig']),
           model: 'Fred',
           points: ['Fred'],
         }),
@@ -567,7 +568,7 @@ const terms: TopicContent = {
         part({
           prompt: 'A pause within a line, often marked by punctuation',
           answer: exactly(
-            ['caesura', 'cesura', 'caesurae', 'a caesura'],
+            ['caesura', 'cesura', 'caesurae', 'a caesura', 'caesural pause'],
             ['enjambment', 'enjambement', 'end-stopping'],
           ),
           model: 'caesura',

@@ -21,7 +21,7 @@ const jekyllPlot: TopicContent = {
         }),
         part({
           prompt: 'The Member of Parliament whom Hyde murders',
-          answer: words('Sir Danvers Carew', 'Danvers Carew', 'Carew', 'Sir Danvers', 'Sir Carew'),
+          answer: words('Sir Danvers Carew', 'Danvers Carew', 'Carew', 'Sir Danvers', 'Danvers', 'Sir Carew'),
           model: 'Sir Danvers Carew',
           points: ['(Sir Danvers) Carew'],
         }),

@@ -60,6 +60,7 @@ const family: TopicContent = {
             'have a row',
             'bicker',
             'to argue with each other',
+            'to squabble',
           ),
           model: 'to argue',
           points: [point('to argue', { allow: ['to quarrel', 'to fall out'], reject: ['to dispute'] })],
@@ -186,7 +187,8 @@ const school: TopicContent = {
         part({
           prompt: '*réussir un examen*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'to pass an exam',
               'pass an exam',
               'to pass a test',
@@ -198,7 +200,7 @@ const school: TopicContent = {
               'passing an exam',
               'to pass exams',
               'to pass your exam',
-            ),
+            ],
             reject: [
               'to take an exam',
               'to sit an exam',
@@ -206,6 +208,7 @@ const school: TopicContent = {
               'to resit an exam',
               'to revise for an exam',
             ],
+            unlisted: 'selfMark',
           },
           model: 'to pass an exam',
           points: [point('to pass an exam', { allow: ['to succeed in'], reject: ['to sit an exam'] })],
@@ -349,7 +352,8 @@ const town: TopicContent = {
         part({
           prompt: '*un immeuble*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'a block of flats',
               'block of flats',
               'an apartment block',
@@ -362,8 +366,9 @@ const town: TopicContent = {
               'flats',
               'tower block',
               'a tower block',
-            ),
+            ],
             reject: ['a flat', 'an apartment', 'furniture', 'a piece of furniture', 'a house', 'immobile'],
+            unlisted: 'selfMark',
           },
           model: 'a block of flats',
           points: [point('a block of flats', { allow: ['a building'], reject: ['a flat', 'furniture'] })],
@@ -395,8 +400,10 @@ const town: TopicContent = {
         part({
           prompt: 'opposite the station',
           answer: {
-            ...wording('en face de la gare', 'face à la gare'),
+            kind: 'text',
+            accept: ['en face de la gare', 'face à la gare'],
             reject: ['en face du gare', 'en face la gare', 'en face de gare'],
+            unlisted: 'selfMark',
           },
           model: 'en face de la gare',
           points: [point('*en face de la gare*', { allow: ['*face à la gare*'], reject: ['*en face la gare*'] })],
@@ -404,8 +411,10 @@ const town: TopicContent = {
         part({
           prompt: 'behind the church',
           answer: {
-            ...wording("derrière l'église"),
+            kind: 'text',
+            accept: ["derrière l'église"],
             reject: ["derrière de l'église", "devant l'église", "à côté de l'église"],
+            unlisted: 'selfMark',
           },
           model: "derrière l'église",
           points: [
@@ -415,18 +424,20 @@ const town: TopicContent = {
         part({
           prompt: 'between the park and the river',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'entre le parc et la rivière',
               'entre le parc et le fleuve',
               'entre le jardin public et la rivière',
               'entre la rivière et le parc',
-            ),
+            ],
             reject: [
               'entre la parc et la rivière',
               'entre le parc et le rivière',
               'entre le parc est la rivière',
               'entre le parc et la fleuve',
             ],
+            unlisted: 'selfMark',
           },
           model: 'entre le parc et la rivière',
           points: [

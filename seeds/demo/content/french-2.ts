@@ -13,7 +13,8 @@ const holidays: TopicContent = {
         part({
           prompt: '*à l’étranger*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'abroad',
               'in a foreign country',
               'overseas',
@@ -21,8 +22,9 @@ const holidays: TopicContent = {
               'in foreign countries',
               'in another country',
               'to another country',
-            ),
+            ],
             reject: ['a foreigner', 'foreigner', 'the stranger', 'strange', 'stranger', 'to the stranger'],
+            unlisted: 'selfMark',
           },
           model: 'abroad',
           points: [point('abroad', { allow: ['overseas'], reject: ['a stranger'] })],
@@ -30,7 +32,8 @@ const holidays: TopicContent = {
         part({
           prompt: '*faire la grasse matinée*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'to have a lie-in',
               'to have a lie in',
               'have a lie-in',
@@ -44,8 +47,9 @@ const holidays: TopicContent = {
               'to stay in bed late',
               'to get up late',
               'having a lie-in',
-            ),
+            ],
             reject: ['a fat morning', 'to have a fat morning', 'to make the fat morning', 'to get up early'],
+            unlisted: 'selfMark',
           },
           model: 'to have a lie-in',
           points: [point('to have a lie-in', { allow: ['to sleep late'], reject: ['a fat morning'] })],
@@ -53,7 +57,8 @@ const holidays: TopicContent = {
         part({
           prompt: '*au bord de la mer*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'at the seaside',
               'by the sea',
               'at the seashore',
@@ -66,8 +71,9 @@ const holidays: TopicContent = {
               'at the edge of the sea',
               'next to the sea',
               'at the beach',
-            ),
+            ],
             reject: ['on board', 'the mother', 'in the sea', 'on the sea'],
+            unlisted: 'selfMark',
           },
           model: 'at the seaside',
           points: [point('at the seaside', { allow: ['by the sea'], reject: ['on board'] })],
@@ -193,7 +199,8 @@ const food: TopicContent = {
         part({
           prompt: '*malsain*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'unhealthy',
               'not healthy',
               'bad for you',
@@ -202,8 +209,9 @@ const food: TopicContent = {
               'not good for you',
               'not good for your health',
               'unwholesome',
-            ),
+            ],
             reject: ['ill', 'sick', 'healthy', 'unwell', 'badly'],
+            unlisted: 'selfMark',
           },
           model: 'unhealthy',
           points: [point('unhealthy', { reject: ['ill', 'healthy'] })],
@@ -242,8 +250,10 @@ const food: TopicContent = {
         part({
           prompt: 'I have a headache.',
           answer: {
-            ...wording("J'ai mal à la tête.", "J'ai un mal de tête.", 'Ma tête me fait mal.', 'La tête me fait mal.'),
+            kind: 'text',
+            accept: ["J'ai mal à la tête.", "J'ai un mal de tête.", 'Ma tête me fait mal.', 'La tête me fait mal.'],
             reject: ["J'ai mal au tête.", "J'ai mal à ma tête.", 'Je suis mal à la tête.', "J'ai mal la tête."],
+            unlisted: 'selfMark',
           },
           model: "J'ai mal à la tête.",
           points: [
@@ -256,8 +266,10 @@ const food: TopicContent = {
         part({
           prompt: 'I am hungry.',
           answer: {
-            ...wording("J'ai faim.", 'Je suis affamé.', 'Je suis affamée.'),
+            kind: 'text',
+            accept: ["J'ai faim.", 'Je suis affamé.', 'Je suis affamée.'],
             reject: ['Je suis faim.', "J'ai soif.", "J'ai chaud.", "J'ai froid."],
+            unlisted: 'selfMark',
           },
           model: "J'ai faim.",
           points: [point('*J’ai faim*', { reject: ['*Je suis faim*', '*J’ai fin*'] })],
@@ -312,7 +324,8 @@ const freeTime: TopicContent = {
         part({
           prompt: '*un dessin animé*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'a cartoon',
               'cartoon',
               'an animated film',
@@ -322,8 +335,9 @@ const freeTime: TopicContent = {
               'animation',
               'an animated series',
               'an animated movie',
-            ),
+            ],
             reject: ['a comic book', 'a comic', 'a comic strip', 'a drawing', 'an animated drawing'],
+            unlisted: 'selfMark',
           },
           model: 'a cartoon',
           points: [point('a cartoon', { allow: ['an animated film'], reject: ['a comic book'] })],

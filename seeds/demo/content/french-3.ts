@@ -227,7 +227,7 @@ const present: TopicContent = {
           prompt: '*ne … jamais*',
           answer: exactly(
             ['never', 'not ever', 'not ... ever'],
-            ['ever', 'no longer', 'not yet', 'always', 'nothing', 'nobody'],
+            ['no longer', 'not yet', 'always', 'nothing', 'nobody'],
           ),
           model: 'never',
           points: [point('never', { reject: ['ever'] })],
@@ -245,7 +245,7 @@ const present: TopicContent = {
               'not anymore',
               'any more',
             ],
-            ['more', 'most', 'never', 'nothing'],
+            ['most', 'never', 'nothing'],
           ),
           model: 'no longer',
           points: [point('no longer', { allow: ['no more', 'not any more'], reject: ['more'] })],
@@ -253,8 +253,10 @@ const present: TopicContent = {
         part({
           prompt: '*ne … que*',
           answer: {
-            ...wording('only', 'nothing but', 'just', 'nothing except', 'not ... except', 'except', 'merely'),
+            kind: 'text',
+            accept: ['only', 'nothing but', 'just', 'nothing except', 'not ... except', 'except', 'merely'],
             reject: ['that', 'what', 'not that', 'nothing', 'never', 'no longer', 'nobody'],
+            unlisted: 'selfMark',
           },
           model: 'only',
           points: [point('only', { allow: ['nothing but'] })],
@@ -263,7 +265,7 @@ const present: TopicContent = {
           prompt: '*ne … personne*',
           answer: exactly(
             ['nobody', 'no one', 'no-one', 'not anyone', 'not anybody', 'noone', 'not ... anyone', 'not ... anybody'],
-            ['person', 'nothing', 'somebody', 'someone', 'anybody', 'anyone'],
+            ['person', 'nothing', 'somebody', 'someone'],
           ),
           model: 'nobody',
           points: [point('nobody', { allow: ['no one'], reject: ['person'] })],

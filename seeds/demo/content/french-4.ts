@@ -1,4 +1,4 @@
-import { part, point, recall, shortParts, type TopicContent, wording, words } from './build.ts';
+import { part, point, recall, shortParts, type TopicContent, words } from './build.ts';
 import { exactly } from './exact-words.ts';
 
 const past: TopicContent = {
@@ -186,7 +186,8 @@ const future: TopicContent = {
         part({
           prompt: 'I am going to travel.',
           answer: {
-            ...wording('Je vais voyager.', 'Je vais faire un voyage.', 'Je vais partir en voyage.'),
+            kind: 'text',
+            accept: ['Je vais voyager.', 'Je vais faire un voyage.', 'Je vais partir en voyage.'],
             reject: [
               'Je vais voyage.',
               'Je vais voyagé.',
@@ -196,6 +197,7 @@ const future: TopicContent = {
               'Je fais voyager.',
               'Je voyagerai.',
             ],
+            unlisted: 'selfMark',
           },
           model: 'Je vais voyager.',
           points: [point('*Je vais voyager*', { allow: ['*Je vais faire un voyage*'], reject: ['*Je vais voyage*'] })],
@@ -365,7 +367,8 @@ const translation: TopicContent = {
         part({
           prompt: 'At what time does she get up?',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               "five o'clock",
               "5 o'clock",
               '5 am',
@@ -394,8 +397,9 @@ const translation: TopicContent = {
               'at five in the morning',
               '5h',
               '5h00',
-            ),
+            ],
             reject: ["four o'clock", "six o'clock", '4', '6', '4 am', '6 am', '5 pm', 'five pm', '15', 'fifteen'],
+            unlisted: 'selfMark',
           },
           model: "five o'clock",
           points: ['At five o’clock'],
@@ -403,7 +407,8 @@ const translation: TopicContent = {
         part({
           prompt: 'What job do her parents think she should do?',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'lawyer',
               'a lawyer',
               'solicitor',
@@ -416,8 +421,9 @@ const translation: TopicContent = {
               'to become a lawyer',
               'attorney',
               'an attorney',
-            ),
+            ],
             reject: ['vet', 'a vet', 'avocado', 'an avocado', 'nurse', 'farmer', 'doctor'],
+            unlisted: 'selfMark',
           },
           model: 'lawyer',
           points: [point('Lawyer', { allow: ['solicitor', 'barrister'], reject: ['vet'] })],
@@ -425,7 +431,8 @@ const translation: TopicContent = {
         part({
           prompt: 'What job does she dream of doing?',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'vet',
               'a vet',
               'veterinarian',
@@ -437,8 +444,9 @@ const translation: TopicContent = {
               'becoming a vet',
               'be a vet',
               'animal doctor',
-            ),
+            ],
             reject: ['lawyer', 'a lawyer', 'solicitor', 'barrister', 'farmer', 'a farmer', 'doctor', 'nurse'],
+            unlisted: 'selfMark',
           },
           model: 'vet',
           points: ['Vet'],
@@ -454,7 +462,8 @@ const translation: TopicContent = {
         part({
           prompt: '*une librairie*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'bookshop',
               'a bookshop',
               'book shop',
@@ -464,8 +473,9 @@ const translation: TopicContent = {
               'book store',
               "bookseller's",
               'a shop that sells books',
-            ),
+            ],
             reject: ['library', 'a library', 'librarian', 'bookcase'],
+            unlisted: 'selfMark',
           },
           model: 'a bookshop',
           points: [point('a bookshop', { reject: ['a library'] })],
@@ -473,7 +483,8 @@ const translation: TopicContent = {
         part({
           prompt: '*assister à*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'to attend',
               'attend',
               'attending',
@@ -482,8 +493,9 @@ const translation: TopicContent = {
               'to be at',
               'to go to',
               'to witness',
-            ),
+            ],
             reject: ['to assist', 'assist', 'assist at', 'assist with', 'to help', 'help', 'to wait'],
+            unlisted: 'selfMark',
           },
           model: 'to attend',
           points: [point('to attend', { reject: ['to assist'] })],
@@ -491,7 +503,8 @@ const translation: TopicContent = {
         part({
           prompt: '*actuellement*',
           answer: {
-            ...wording(
+            kind: 'text',
+            accept: [
               'currently',
               'at the moment',
               'at this moment',
@@ -501,8 +514,9 @@ const translation: TopicContent = {
               'presently',
               'nowadays',
               'right now',
-            ),
+            ],
             reject: ['actually', 'in fact', 'really'],
+            unlisted: 'selfMark',
           },
           model: 'currently',
           points: [point('currently', { allow: ['at the moment'], reject: ['actually'] })],
@@ -510,8 +524,10 @@ const translation: TopicContent = {
         part({
           prompt: '*la journée*',
           answer: {
-            ...wording('the day', 'day', 'daytime', 'the daytime', 'day time', 'the whole day', 'all day'),
+            kind: 'text',
+            accept: ['the day', 'day', 'daytime', 'the daytime', 'day time', 'the whole day', 'all day'],
             reject: ['journey', 'the journey', 'trip', 'the trip', 'today'],
+            unlisted: 'selfMark',
           },
           model: 'the day',
           points: [point('the day', { reject: ['the journey'] })],

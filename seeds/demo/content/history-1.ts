@@ -11,8 +11,8 @@ const earlyMedicine: TopicContent = {
       stem: 'Medieval ideas about disease came from the ancient world.',
       parts: [
         part({
-          prompt: 'Name the Greek doctor linked with the Theory of the Four Humours.',
-          answer: exactly(['Hippocrates'], ['Galen', 'Aristotle', 'Socrates', 'Hippocratic']),
+          prompt: 'Name the Greek doctor of the fifth century BC linked with the Theory of the Four Humours.',
+          answer: exactly(['Hippocrates'], ['Galen', 'Aristotle', 'Socrates']),
           model: 'Hippocrates',
           points: [point('Hippocrates', { reject: ['Galen'] })],
         }),
@@ -232,7 +232,7 @@ const victorianMedicine: TopicContent = {
         ),
       ],
       model:
-        'The 1848 Act only allowed towns to set up local boards of health, so many did nothing. The 1875 Act was compulsory: councils had to provide clean water and proper sewers. One reason was that Pasteur’s germ theory of 1861 had shown that dirt could carry disease; another was that many working men could vote after 1867.',
+        'The 1848 Act only allowed towns to set up local boards of health, so many did nothing. The 1875 Act was compulsory: councils had to provide clean water and proper sewers. One reason was that Pasteur’s germ theory of 1861 had helped to explain how dirty water spread disease; another was that many working men could vote after 1867.',
       guidance: 'The key words are *permissive* for 1848 and *compulsory* for 1875.',
     }),
   ],
@@ -271,11 +271,11 @@ const modernMedicine: TopicContent = {
         part({
           prompt: 'State the term for a medicine, such as penicillin, that kills or stops the growth of bacteria.',
           answer: exactly(
-            ['antibiotic', 'an antibiotic', 'antibiotics'],
+            ['antibiotic', 'an antibiotic', 'antibiotics', 'antibacterial'],
             ['antiseptic', 'antibody', 'antibodies', 'vaccine', 'antiseptics'],
           ),
           model: 'antibiotic',
-          points: [point('Antibiotic', { reject: ['antiseptic', 'vaccine'] })],
+          points: [point('Antibiotic', { allow: ['antibacterial'], reject: ['antiseptic', 'vaccine'] })],
         }),
       ],
     }),
@@ -290,11 +290,21 @@ const modernMedicine: TopicContent = {
       seconds: 40,
       stem: 'Watson and Crick published the structure of DNA in 1953. Name its shape.',
       answer: exactly(
-        ['double helix', 'a double helix', 'double-helix', 'the double helix', 'double spiral', 'a double spiral'],
+        [
+          'double helix',
+          'a double helix',
+          'double-helix',
+          'the double helix',
+          'double spiral',
+          'a double spiral',
+          'twisted ladder',
+        ],
         ['single helix'],
       ),
       model: 'double helix',
-      points: [point('Double helix', { allow: ['double spiral'], reject: ['spiral, alone'] })],
+      points: [
+        point('Double helix', { allow: ['double spiral', 'twisted ladder'], reject: ['spiral or helix, alone'] }),
+      ],
     }),
     short({
       seconds: 40,
@@ -352,15 +362,15 @@ const coldWarOrigins: TopicContent = {
       parts: [
         part({
           prompt: 'The conference of Stalin, Roosevelt and Churchill in February 1945',
-          answer: exactly(['Yalta'], ['Potsdam', 'Tehran', 'Malta']),
+          answer: exactly(['Yalta', 'Yalta Conference', 'Crimea'], ['Potsdam', 'Tehran', 'Malta']),
           model: 'Yalta',
-          points: [point('Yalta', { reject: ['Potsdam', 'Tehran'] })],
+          points: [point('Yalta', { allow: ['Crimea'], reject: ['Potsdam', 'Tehran'] })],
         }),
         part({
           prompt: 'The conference of July and August 1945, attended by Truman',
-          answer: exactly(['Potsdam'], ['Yalta', 'Tehran', 'Berlin']),
+          answer: exactly(['Potsdam', 'Potsdam Conference'], ['Yalta', 'Tehran']),
           model: 'Potsdam',
-          points: [point('Potsdam', { reject: ['Yalta'] })],
+          points: [point('Potsdam', { allow: ['Potsdam, near Berlin'], reject: ['Yalta', 'Berlin, alone'] })],
         }),
       ],
       guidance: 'Roosevelt died in April 1945, so a conference with Truman is the later one.',
@@ -468,20 +478,20 @@ const coldWarCrises: TopicContent = {
       parts: [
         part({
           prompt: 'Name the leader of Cuba after the revolution of 1959.',
-          answer: words('Fidel Castro', 'Castro'),
+          answer: words('Fidel Castro', 'Castro', 'Fidel'),
           model: 'Fidel Castro',
           points: [point('(Fidel) Castro', { reject: ['Batista'] })],
         }),
         part({
           prompt: 'Name the bay where an invasion by Cuban exiles, backed by the USA, failed in April 1961.',
-          answer: words('Bay of Pigs', 'the Bay of Pigs', 'Pigs', 'Bahía de Cochinos'),
+          answer: words('Bay of Pigs', 'the Bay of Pigs', 'Pigs', 'Pigs Bay', 'Bahía de Cochinos', 'Playa Girón'),
           model: 'Bay of Pigs',
           points: ['The Bay of Pigs'],
         }),
         part({
           prompt: 'Name the Soviet leader during the missile crisis of October 1962.',
           answer: exactly(
-            ['Nikita Khrushchev', 'Khrushchev', 'Kruschev', 'Khruschev', 'Krushchev', 'Krushev'],
+            ['Nikita Khrushchev', 'Khrushchev', 'Kruschev', 'Khruschev', 'Krushchev', 'Krushev', 'Kruschov', 'Nikita'],
             ['Stalin', 'Brezhnev', 'Gorbachev'],
           ),
           model: 'Nikita Khrushchev',

@@ -1,4 +1,4 @@
-import { num, part, point, recall, short, shortParts, type TopicContent, words } from './build.ts';
+import { num, part, point, recall, short, shortParts, type TopicContent, wording, words } from './build.ts';
 import { exactly } from './exact-words.ts';
 
 const elizabethRule: TopicContent = {
@@ -43,6 +43,9 @@ const elizabethRule: TopicContent = {
               'Supreme Governor of the Church of England',
               'Supreme Governor of the Church',
               'the Supreme Governor',
+              'Governor',
+              'Governor of the Church',
+              'Governor of the Church of England',
             ],
             [
               'Supreme Head',
@@ -53,7 +56,7 @@ const elizabethRule: TopicContent = {
             ],
           ),
           model: 'Supreme Governor',
-          points: [point('Supreme Governor', { reject: ['Supreme Head'] })],
+          points: [point('Supreme Governor', { allow: ['Governor'], reject: ['Supreme Head'] })],
         }),
       ],
       guidance:
@@ -61,13 +64,27 @@ const elizabethRule: TopicContent = {
     }),
     short({
       seconds: 40,
-      stem: 'Name the man whom Elizabeth made her Secretary of State in 1558 and who became Lord Burghley in 1571.',
+      stem: 'Name the man whom Elizabeth made her Secretary of State in 1558 and Lord Treasurer in 1572.',
       answer: exactly(
-        ['William Cecil', 'Cecil', 'Sir William Cecil', 'Burghley', 'Lord Burghley'],
+        [
+          'William Cecil',
+          'Cecil',
+          'Sir William Cecil',
+          'Burghley',
+          'Lord Burghley',
+          'Baron Burghley',
+          'Lord Burleigh',
+          'Burleigh',
+        ],
         ['Robert Cecil', 'Robert Dudley', 'Walsingham', 'Francis Walsingham'],
       ),
       model: 'William Cecil',
-      points: [point('(William) Cecil', { reject: ['Robert Cecil, his son', 'Walsingham'] })],
+      points: [
+        point('(William) Cecil', {
+          allow: ['Lord Burghley, his title from 1571'],
+          reject: ['Robert Cecil, his son', 'Walsingham'],
+        }),
+      ],
     }),
     recall({
       seconds: 150,
@@ -254,7 +271,7 @@ const elizabethSociety: TopicContent = {
     short({
       seconds: 40,
       stem: 'State the term used by Elizabethans for homeless people without work who wandered from place to place and were feared as criminals.',
-      answer: words(
+      answer: wording(
         'vagabonds',
         'vagabond',
         'vagrants',
@@ -262,9 +279,17 @@ const elizabethSociety: TopicContent = {
         'sturdy beggars',
         'vagabonds and vagrants',
         'sturdy beggar',
+        'rogues and vagabonds',
+        'the idle poor',
+        'the undeserving poor',
       ),
       model: 'vagabonds',
-      points: [point('Vagabonds', { allow: ['vagrants', 'sturdy beggars'], reject: ['the deserving poor'] })],
+      points: [
+        point('Vagabonds', {
+          allow: ['vagrants', 'sturdy beggars', 'the idle poor'],
+          reject: ['the deserving poor', 'beggars, alone'],
+        }),
+      ],
     }),
     recall({
       seconds: 140,
@@ -324,15 +349,15 @@ const weimar: TopicContent = {
       parts: [
         part({
           prompt: 'State the largest number of men that the treaty allowed in the German army.',
-          answer: num(100000),
+          answer: num(100000, { unit: 'men' }),
           answerLabel: 'Number of men =',
           model: '100000',
-          points: [point('100 000', { allow: ['100,000'] })],
+          points: ['100,000'],
         }),
         part({
           prompt:
             'Give the name by which Article 231, which made Germany accept responsibility for the war, is usually known.',
-          answer: words('War Guilt Clause', 'the War Guilt Clause', 'war guilt', 'guilt clause'),
+          answer: words('War Guilt Clause', 'the War Guilt Clause', 'war guilt', 'guilt clause', 'war guilt article'),
           model: 'War Guilt Clause',
           points: ['The War Guilt Clause'],
         }),
@@ -361,10 +386,7 @@ const weimar: TopicContent = {
     short({
       seconds: 40,
       stem: 'Name the new currency introduced in Germany in November 1923 to end hyperinflation.',
-      answer: exactly(
-        ['Rentenmark', 'the Rentenmark', 'Rentenmarks'],
-        ['Reichsmark', 'mark', 'Deutschmark', 'Papiermark'],
-      ),
+      answer: exactly(['Rentenmark', 'the Rentenmark', 'Rentenmarks'], ['Reichsmark', 'Deutschmark', 'Papiermark']),
       model: 'Rentenmark',
       points: [point('Rentenmark', { reject: ['Reichsmark, which followed in 1924'] })],
       guidance: 'The Rentenmark came first, in November 1923; the Reichsmark replaced it in 1924.',
@@ -453,6 +475,13 @@ const naziRise: TopicContent = {
         'the stock market crash',
         'Wall Street stock market crash',
         'Crash of 1929',
+        'the Great Crash',
+        'the Crash',
+        'Wall Street collapse',
+        'collapse of Wall Street',
+        'stock exchange crash',
+        'Black Tuesday',
+        'Black Thursday',
       ),
       model: 'the Wall Street Crash',
       points: [point('The Wall Street Crash', { reject: ['the Great Depression, which followed'] })],
@@ -549,6 +578,8 @@ const naziGermany: TopicContent = {
             'the Reichstag building',
             'German parliament',
             'the German parliament building',
+            'the parliament building',
+            'parliament',
           ),
           model: 'the Reichstag',
           points: ['The Reichstag'],
@@ -556,7 +587,14 @@ const naziGermany: TopicContent = {
         part({
           prompt:
             'Name the law of March 1933 that let Hitler’s government make laws without the consent of parliament.',
-          answer: words('Enabling Act', 'the Enabling Act', 'Enabling Law', 'the Enabling Law', 'Enabling Act 1933'),
+          answer: words(
+            'Enabling Act',
+            'the Enabling Act',
+            'Enabling Law',
+            'the Enabling Law',
+            'Enabling Act 1933',
+            'Enabling',
+          ),
           model: 'the Enabling Act',
           points: ['The Enabling Act'],
         }),
@@ -570,6 +608,10 @@ const naziGermany: TopicContent = {
               'Rohm Purge',
               'Roehm Purge',
               'Night of Long Knives',
+              'Röhm Putsch',
+              'Rohm Putsch',
+              'Blood Purge',
+              'Operation Hummingbird',
             ],
             ['Night of Broken Glass', 'Kristallnacht', 'Munich Putsch'],
           ),
@@ -581,10 +623,7 @@ const naziGermany: TopicContent = {
     short({
       seconds: 40,
       stem: 'Name the leader of the SS from 1929.',
-      answer: exactly(
-        ['Heinrich Himmler', 'Himmler'],
-        ['Hitler', 'Röhm', 'Goebbels', 'Göring', 'Heydrich', 'Ernst Röhm'],
-      ),
+      answer: exactly(['Heinrich Himmler', 'Himmler'], ['Röhm', 'Goebbels', 'Göring', 'Heydrich', 'Ernst Röhm']),
       model: 'Heinrich Himmler',
       points: [point('(Heinrich) Himmler', { reject: ['Röhm, leader of the SA'] })],
       guidance: 'Himmler led the SS; Röhm led the SA until he was killed in 1934.',

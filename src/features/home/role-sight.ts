@@ -29,7 +29,11 @@ export const roleSight: Partial<Record<Role, Sight>> = {
       'Accounts, and the audit log of who did what',
       'Export and erasure of a person’s data',
     ],
-    willNot: ['What a student answered, or their working', 'The standing of a student’s topics', 'Questions and item statistics'],
+    willNot: [
+      'What a student answered, or their working',
+      'The standing of a student’s topics',
+      'Questions and item statistics',
+    ],
   },
   tutor: {
     will: ['Minutes planned and minutes done by your tutor group', 'The standing of each of their topics'],

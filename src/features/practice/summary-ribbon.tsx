@@ -1,6 +1,6 @@
 import { type SetSummaryDto, setKindWords } from '#shared/schemas/practice.ts';
-import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { type RibbonItem, ribbonSizes } from '#src/components/ribbon-geometry.ts';
+import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 
 type Item = SetSummaryDto['items'][number];

@@ -53,7 +53,7 @@ export function QuestionPreview({ lang }: QuestionPreviewProps) {
   const body = useMemo(() => toDraftBody(shown), [shown]);
   return (
     <>
-      <div className="mb-2.5 flex items-center justify-between gap-3">
+      <div className="mb-2.5 flex flex-wrap items-center justify-between gap-3">
         <h2 id="preview-title" className="!text-[1.125rem]">
           As the student sees it
         </h2>

@@ -19,7 +19,13 @@ export function MorningRow({ set }: { set: TodaySetDto }) {
       </h2>
       <div className="flex flex-wrap items-center justify-between gap-x-8 gap-y-3 min-w-0">
         <div className="w-60 max-w-full">
-          <Ribbon items={ribbonItems(set)} size={ribbonSizes.todayPhone} name="Morning set" tint={34} hasLabels={false} />
+          <Ribbon
+            items={ribbonItems(set)}
+            size={ribbonSizes.todayPhone}
+            name="Morning set"
+            tint={34}
+            hasLabels={false}
+          />
         </div>
         <p className="text-ink-2 num min-w-0 flex-1 basis-48">
           {words}, <span className="whitespace-nowrap">about {durationWords(set.minutes)}</span>

@@ -35,7 +35,7 @@ export function NextPapers({ papers }: { papers: Sitting[] }) {
                 className="grid grid-cols-[auto_1fr_auto] gap-x-3 items-center py-3 border-b border-rule"
               >
                 <StrandLabel subject={sitting.subject} />
-                <span className="leading-tight min-w-0">
+                <span className="leading-tight min-w-0 [overflow-wrap:anywhere]">
                   <span className="sr-only">{sitting.subject.name} </span>
                   <span className="font-semibold">{sitting.paperTitle}</span>
                   <span className="text-ink-2 num">

@@ -11,9 +11,7 @@ export function WeakTopics({ topics, hasPapers }: { topics: TodayDto['weakTopics
         {hasPapers ? 'Weakest for those papers' : 'Weakest topics'}
       </h2>
       {topics.length === 0 ? (
-        <p className="text-ink-2 mt-3">
-          Your weakest topics appear here once you have answered some questions.
-        </p>
+        <p className="text-ink-2 mt-3">Your weakest topics appear here once you have answered some questions.</p>
       ) : (
         <>
           <ul>
