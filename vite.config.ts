@@ -8,9 +8,9 @@ const serverEntries = {
   'verify-log': 'server/commands/verify-log.ts',
 };
 
-/** Libraries that every page needs. */
-const BASE_PACKAGES =
-  /node_modules\/(react|react-dom|scheduler|react-router|react-router-dom|@tanstack\/(query-core|react-query)|zod)\//;
+/** Libraries that every page needs, and the small modules of ours that would each become a file of their own. */
+const BASE =
+  /node_modules\/(react|react-dom|scheduler|react-router|react-router-dom|@tanstack\/(query-core|react-query)|zod)\/|\/src\/lib\/(api|keeper|kept-keys|query-client)\.ts$|\/shared\/schemas\/(common|curriculum)\.ts$/;
 
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: [react(), tailwindcss()],
@@ -22,7 +22,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         assetsInlineLimit: 0,
         manifest: true,
         // One chunk of what every page needs compresses better than a dozen small ones.
-        rollupOptions: { output: { advancedChunks: { groups: [{ name: 'base', test: BASE_PACKAGES }] } } },
+        rollupOptions: { output: { advancedChunks: { groups: [{ name: 'base', test: BASE }] } } },
       },
   server: {
     proxy: { '/api': process.env.API_ORIGIN ?? 'http://127.0.0.1:3000' },

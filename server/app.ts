@@ -2,6 +2,7 @@ import compression from 'compression';
 import express, { type Express } from 'express';
 import type { Pool } from 'pg';
 import type { Logger } from 'pino';
+import { speakPlainly } from '#shared/schemas/plain-words.ts';
 import type { Config } from './config.ts';
 import { isDatabaseReady } from './db/directory.ts';
 import { notFound } from './errors.ts';
@@ -36,6 +37,7 @@ const BODY_LIMIT = '512kb';
 
 /** The whole app without a port, so that tests need none. */
 export function createApp({ config, log, pool, clock = Date.now, isServing = () => true, demo }: AppDeps): Express {
+  speakPlainly();
   const app = express();
   app.set('trust proxy', config.TRUST_PROXY.length ? config.TRUST_PROXY : false);
   app.set('etag', false);

@@ -3,11 +3,16 @@ import { z } from 'zod';
 const url = z.string().regex(/^postgres(ql)?:\/\//, 'must be a postgres:// address');
 const isLoopback = (origin: string) => ['localhost', '127.0.0.1', '[::1]'].includes(new URL(origin).hostname);
 
-const configSchema = z
-  .object({
+const databaseSchema = z.object({
+  /** The app's own role: no superuser, no BYPASSRLS, owner of nothing. */
+  DATABASE_URL: url,
+  /** Most connections of the app's pool. */
+  DATABASE_POOL: z.coerce.number().int().min(2).max(50).default(10),
+});
+
+const configSchema = databaseSchema
+  .extend({
     NODE_ENV: z.enum(['production', 'development', 'test']).default('production'),
-    /** The app's own role: no superuser, no BYPASSRLS, owner of nothing. */
-    DATABASE_URL: url,
     HOST: z.string().default('127.0.0.1'),
     PORT: z.coerce.number().int().min(0).max(65535).default(3000),
     /** Where people reach Plait, used in cookies and the same-origin rule; never the Host header. */
@@ -27,7 +32,6 @@ const configSchema = z
           .map((part) => part.trim())
           .filter(Boolean),
       ),
-    DATABASE_POOL: z.coerce.number().int().min(2).max(50).default(10),
     LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
     /** Folder of the built client; not set while Vite serves it. */
     CLIENT_DIR: z.string().optional(),
@@ -45,10 +49,16 @@ const configSchema = z
 
 export type Config = z.output<typeof configSchema>;
 
-/** Reads the environment once, at the start. @throws Error that names each wrong variable, never its value */
-export function readConfig(environment: NodeJS.ProcessEnv): Config {
-  const parsed = configSchema.safeParse(environment);
+function read<T>(schema: z.ZodType<T>, environment: NodeJS.ProcessEnv): T {
+  const parsed = schema.safeParse(environment);
   if (parsed.success) return parsed.data;
   const lines = parsed.error.issues.map((issue) => `  ${issue.path.join('.')}: ${issue.message}`);
   throw new Error(`Plait cannot start with this configuration:\n${lines.join('\n')}`);
 }
+
+/** Reads the environment once, at the start. @throws Error that names each wrong variable, never its value */
+export const readConfig = (environment: NodeJS.ProcessEnv): Config => read(configSchema, environment);
+
+/** The part that the database connection needs: all that commands and seeds are given. @throws Error as `readConfig` */
+export const readDatabaseConfig = (environment: NodeJS.ProcessEnv): z.output<typeof databaseSchema> =>
+  read(databaseSchema, environment);

@@ -5,12 +5,27 @@ import { readConfig } from './config.ts';
 import { checkDatabase } from './db/check-database.ts';
 import { PatientClient } from './db/patient-client.ts';
 import { sequelize } from './db/sequelize.ts';
+import { keepLimitsPruned } from './http/prune-limits.ts';
 import { createLogger } from './http/request-log.ts';
 
 /** Requests in flight get this long to finish once the process is asked to stop. */
 const DRAIN_MS = 15_000;
 
-const config = readConfig(process.env);
+/** Says in a sentence why there is no server: whoever starts it needs that, and no stack trace. */
+function giveUp(error: unknown): never {
+  process.stderr.write(`${error instanceof Error ? error.message : String(error)}\n`);
+  process.exit(1);
+}
+
+function readConfigOrGiveUp() {
+  try {
+    return readConfig(process.env);
+  } catch (error) {
+    return giveUp(error);
+  }
+}
+
+const config = readConfigOrGiveUp();
 const log = createLogger(config.LOG_LEVEL);
 const pool = new pg.Pool({
   connectionString: config.DATABASE_URL,
@@ -24,7 +39,7 @@ pool.on('error', (error) => log.warn({ err: error }, 'idle session connection lo
 let isServing = true;
 process.on('unhandledRejection', (error) => log.error({ err: error }, 'unhandled rejection'));
 
-await checkDatabase(config);
+await checkDatabase(config).catch(giveUp);
 // The demo's code is reached only where the start command names its list of people.
 const demo = config.DEMO_FILE
   ? await (await import('./services/people/demo-sign-in.ts')).readDemoPeople(config.DEMO_FILE)
@@ -37,6 +52,7 @@ const app = createApp({
   demo,
 });
 
+const stopPruning = keepLimitsPruned(pool, log);
 const server = app.listen(config.PORT, config.HOST, (error) => {
   if (error) {
     log.fatal({ err: error }, `cannot listen on ${config.HOST}:${config.PORT}`);
@@ -48,6 +64,7 @@ const server = app.listen(config.PORT, config.HOST, (error) => {
 async function stop(): Promise<void> {
   if (!isServing) return;
   isServing = false;
+  stopPruning();
   const force = setTimeout(() => server.closeAllConnections(), DRAIN_MS);
   server.close(async () => {
     clearTimeout(force);

@@ -22,6 +22,8 @@ export interface BankQuestion {
   subjectId: string;
   /** Topics it serves, one in each specification that has it. */
   topicIds: string[];
+  /** The option that its topic belongs to, if any. */
+  option: string | null;
 }
 
 /** Days before seeding between which questions went live: all of them before the first simulated answer. */
@@ -31,15 +33,15 @@ const LIVE_TO_DAYS = 75;
 /** A subject's questions in the order of its topics, numbered from 1. */
 export function planBank({ id: subjectId, content, specifications }: SubjectPlan): BankQuestion[] {
   const stages = stagesOf(content.topics);
-  const questions = content.topics.flatMap((topic) =>
-    topic.questions.map((question) => ({
+  const questions = content.topics.flatMap((topic) => {
+    const served = specifications.flatMap(({ topics }) => topics.filter(({ number }) => number === topic.number));
+    return topic.questions.map((question) => ({
       content: question,
-      topicIds: specifications.flatMap(({ topics }) =>
-        topics.filter((t) => t.number === topic.number).map((t) => t.id),
-      ),
-    })),
-  );
-  return questions.map(({ content: question, topicIds }, index) => {
+      topicIds: served.map((one) => one.id),
+      option: served[0]?.option ?? null,
+    }));
+  });
+  return questions.map(({ content: question, topicIds, option }, index) => {
     const id = idFor('question', content.code, index + 1);
     return {
       id,
@@ -49,6 +51,7 @@ export function planBank({ id: subjectId, content, specifications }: SubjectPlan
       content: question,
       subjectId,
       topicIds,
+      option,
     };
   });
 }
@@ -101,12 +104,14 @@ function versionRow(input: VersionInput, today: string): Row<'question_versions'
     revision: 1 + random.below(6),
     kind: question.content.kind,
     tier: question.content.tier ?? null,
+    option: question.option,
     body,
     search_text: searchText,
     excerpt,
     max_marks: maxMarks,
     expected_seconds: question.content.seconds,
     author_id: authorId,
+    last_edited_by: authorId,
     reviewer_id: reviewerId,
     review_comment: reviewComment,
     saved_at: savedAt,
@@ -174,12 +179,15 @@ export function bankRows({ content }: SubjectPlan, bank: readonly BankQuestion[]
     }),
     question_versions: [...versions.values()].flat(),
     question_topics: bank.flatMap(({ id, topicIds }) =>
-      topicIds.map((topicId, index) => ({
-        id: idFor(id, 'topic', topicId),
-        question_id: id,
-        topic_id: topicId,
-        position: index,
-      })),
+      (versions.get(id) ?? []).flatMap(({ id: versionId }) =>
+        topicIds.map((topicId, index) => ({
+          id: idFor(versionId ?? '', 'topic', topicId),
+          question_id: id,
+          question_version_id: versionId,
+          topic_id: topicId,
+          position: index,
+        })),
+      ),
     ),
   };
 }

@@ -1,12 +1,14 @@
 import { addDays, weekday } from '#shared/domain/time/calendar.ts';
-import type { Tier } from '#shared/schemas/common.ts';
+import { HISTORY_OPTIONS } from './history-options.ts';
 import { idFor } from './ids.ts';
+import { type Entry, isFor } from './papers.ts';
 import { adultId, type Student } from './people.ts';
 import { type Random, randomFor } from './random.ts';
 import type { Rows } from './rows.ts';
 import { YEAR_GROUP_ID } from './school.ts';
 import { teachersOf } from './staff.ts';
 import type { SpecificationContent, SubjectPlan } from './subjects.ts';
+import { isTiered } from './tiers.ts';
 
 /** Sizes of seven classes, by attainment and mixed. Two of those by attainment have 28, and are the ones simulated. */
 const SET_SIZES = [28, 28, 27, 25, 28, 24, 20];
@@ -43,7 +45,8 @@ export interface ClassPlan {
   subjectCode: string;
   specification: SpecificationContent;
   teacherId: string;
-  tier: Tier | null;
+  /** What all of its students are entered for. */
+  entry: Entry;
   students: Student[];
   /** Topic → the day it was taught, for those that have been. */
   taught: Map<string, string>;
@@ -70,12 +73,12 @@ const toSchoolDay = (day: string): string => addDays(day, [0, 0, 0, 0, 0, -1, 1]
 /** Topics in their order over fifteen months; the last one or two are still to come. */
 function teachings(
   { topics }: SpecificationContent,
-  tier: Tier | null,
+  entry: Entry,
   set: number,
   today: string,
   random: Random,
 ): Map<string, string> {
-  const followed = topics.filter((topic) => !topic.tier || topic.tier === tier);
+  const followed = topics.filter(isFor(entry));
   const taught = followed.slice(0, followed.length - 1 - (set % 2));
   const span = TEACHING_FROM_DAYS - TEACHING_TO_DAYS - 14;
   return new Map(
@@ -85,6 +88,12 @@ function teachings(
     }),
   );
 }
+
+/** The better sets sit Higher; classes of history take its options in turn. */
+const entryOf = (subjectCode: string, set: number): Entry => ({
+  tier: !isTiered(subjectCode) ? null : set <= HIGHER_SETS ? 'higher' : 'foundation',
+  option: subjectCode === 'HI' ? (HISTORY_OPTIONS[(set - 1) % HISTORY_OPTIONS.length] ?? null) : null,
+});
 
 /** Every class of the year: seven a subject, every student in one for each subject. */
 export function planClasses(
@@ -101,7 +110,7 @@ export function planClasses(
       const set = index + 1;
       const name = `11${content.code.charAt(0)}${content.code.charAt(1).toLowerCase()}${set}`;
       const specification = combined && set > SEPARATE_SCIENCE_SETS ? combined : separate;
-      const tier = grouping.by === 'mixed' ? null : set <= HIGHER_SETS ? 'higher' : 'foundation';
+      const entry = entryOf(content.code, set);
       return {
         id: idFor('class', name),
         name,
@@ -110,9 +119,9 @@ export function planClasses(
         subjectCode: content.code,
         specification,
         teacherId: adultId(teachers[index % teachers.length] ?? ''),
-        tier,
+        entry,
         students: members,
-        taught: teachings(specification, tier, set, today, randomFor('teaching', name)),
+        taught: teachings(specification, entry, set, today, randomFor('teaching', name)),
       };
     });
   });
@@ -138,12 +147,12 @@ export const classRows = (classes: readonly ClassPlan[], since: string): Rows =>
     class_id: id,
     user_id: teacherId,
   })),
-  enrolments: classes.flatMap(({ id, students, tier }) =>
+  enrolments: classes.flatMap(({ id, students, entry }) =>
     students.map((student) => ({
       id: idFor(id, 'student', student.id),
       class_id: id,
       user_id: student.id,
-      tier,
+      ...entry,
       valid_from: since,
     })),
   ),

@@ -6,10 +6,8 @@ import type { SpecificationContent, SubjectPlan } from './subjects.ts';
 const weightRows = ({ topics, papers }: SpecificationContent) =>
   topics.flatMap((topic) =>
     papers.flatMap((paper) => {
-      const marks = topic.weights[paper.number];
-      return marks
-        ? [{ id: idFor(topic.id, 'weight', paper.number), topic_id: topic.id, paper_id: paper.id, marks }]
-        : [];
+      const marks = paper.weights.get(topic.number);
+      return marks ? [{ id: idFor(topic.id, 'weight', paper.id), topic_id: topic.id, paper_id: paper.id, marks }] : [];
     }),
   );
 
@@ -48,6 +46,8 @@ export function curriculumRows(subjects: readonly SubjectPlan[]): Rows {
         specification_id: id,
         number: paper.number,
         title: paper.title,
+        tier: paper.tier,
+        option: paper.option,
         minutes: paper.minutes,
         marks: paper.marks,
       })),
@@ -58,7 +58,8 @@ export function curriculumRows(subjects: readonly SubjectPlan[]): Rows {
         specification_id: id,
         number: topic.number,
         title: topic.title,
-        tier: topic.tier ?? null,
+        tier: topic.tier,
+        option: topic.option,
         position: index + 1,
       })),
     ),

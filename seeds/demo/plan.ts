@@ -41,7 +41,6 @@ export function planDemo(today: string): DemoPlan {
 const sinceOf = ({ today }: DemoPlan): string => schoolYearStart(addDays(today, -TEACHING_FROM_DAYS));
 
 export const schoolRows = ({ seasons }: DemoPlan): Rows => ({
-  school_directory: [{ code: SCHOOL.code, school_id: SCHOOL.id }],
   schools: [
     { name: SCHOOL.name, code: SCHOOL.code, zone: SCHOOL.zone, is_demo: true, season_ends_on: lastSitting(seasons) },
   ],

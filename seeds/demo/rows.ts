@@ -15,7 +15,6 @@ interface Values {
 
 /** The tables that seeding fills, in an order that references allow, with the columns it gives. */
 const TABLES = {
-  school_directory: { code: 'text', school_id: 'uuid' },
   schools: { name: 'text', code: 'text', zone: 'text', is_demo: 'boolean', season_ends_on: 'date' },
   year_groups: { id: 'uuid', name: 'text' },
   tutor_groups: { id: 'uuid', year_group_id: 'uuid', name: 'text' },
@@ -38,6 +37,8 @@ const TABLES = {
     specification_id: 'uuid',
     number: 'integer',
     title: 'text',
+    tier: 'text',
+    option: 'text',
     minutes: 'integer',
     marks: 'integer',
   },
@@ -47,6 +48,7 @@ const TABLES = {
     number: 'text',
     title: 'text',
     tier: 'text',
+    option: 'text',
     position: 'integer',
   },
   topic_weights: { id: 'uuid', topic_id: 'uuid', paper_id: 'uuid', marks: 'integer' },
@@ -63,7 +65,7 @@ const TABLES = {
   },
   classes: { id: 'uuid', subject_id: 'uuid', specification_id: 'uuid', year_group_id: 'uuid', name: 'text' },
   class_teachers: { id: 'uuid', class_id: 'uuid', user_id: 'uuid' },
-  enrolments: { id: 'uuid', class_id: 'uuid', user_id: 'uuid', tier: 'text', valid_from: 'date' },
+  enrolments: { id: 'uuid', class_id: 'uuid', user_id: 'uuid', tier: 'text', option: 'text', valid_from: 'date' },
   topic_teachings: { id: 'uuid', class_id: 'uuid', topic_id: 'uuid', taught_on: 'date' },
   questions: {
     id: 'uuid',
@@ -81,19 +83,27 @@ const TABLES = {
     revision: 'integer',
     kind: 'text',
     tier: 'text',
+    option: 'text',
     body: 'jsonb',
     search_text: 'text',
     excerpt: 'text',
     max_marks: 'integer',
     expected_seconds: 'integer',
     author_id: 'uuid',
+    last_edited_by: 'uuid',
     reviewer_id: 'uuid',
     review_comment: 'text',
     saved_at: 'timestamptz',
     sent_at: 'timestamptz',
     live_at: 'timestamptz',
   },
-  question_topics: { id: 'uuid', question_id: 'uuid', topic_id: 'uuid', position: 'integer' },
+  question_topics: {
+    id: 'uuid',
+    question_id: 'uuid',
+    question_version_id: 'uuid',
+    topic_id: 'uuid',
+    position: 'integer',
+  },
   sets: {
     id: 'uuid',
     user_id: 'uuid',
@@ -170,9 +180,8 @@ const BATCH = 1000;
 export async function insertRows(table: Table, rows: readonly object[]): Promise<number> {
   const columns: [string, string][] = Object.entries(TABLES[table]);
   const names = columns.map(([name]) => name);
-  const own = names.includes('school_id') ? '' : 'school_id, ';
-  const sql = `INSERT INTO ${table} (${own}${names.join(', ')})
-    SELECT ${own && 'app.current_school(), '}${names.map((name) => `r.${name}`).join(', ')}
+  const sql = `INSERT INTO ${table} (school_id, ${names.join(', ')})
+    SELECT app.current_school(), ${names.map((name) => `r.${name}`).join(', ')}
     FROM jsonb_to_recordset($1::jsonb) AS r(${columns.map(([name, type]) => `${name} ${type}`).join(', ')})`;
   for (let start = 0; start < rows.length; start += BATCH) {
     await execute(sql, [JSON.stringify(rows.slice(start, start + BATCH))]);

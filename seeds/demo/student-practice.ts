@@ -120,7 +120,7 @@ export class StudentPractice {
       const isBarelyFormed = memory !== null && memory.stability < 1;
       if (!subjects.has(facts.subjectId) || !(isOffered || isBarelyFormed)) return [];
       const lastWasBelowHalf = history !== undefined && history.lastShare < 0.5;
-      return [{ ...facts, memory, lastWasBelowHalf, answeredToday: null }];
+      return [{ ...facts, memory, lastWasBelowHalf, answeredToday: null, isTaken: false }];
     });
   }
 

@@ -4,11 +4,12 @@ import { dayNumber } from '#shared/domain/time/calendar.ts';
 import { bodyMarks, type QuestionPart } from '#shared/schemas/question-body.ts';
 import type { BankQuestion } from './bank.ts';
 import type { ClassPlan } from './classes.ts';
+import { isFor } from './papers.ts';
 import { randomFor } from './random.ts';
 import type { Season } from './timetable.ts';
 
 /** A candidate but for what the student has made of it. */
-type Facts = Omit<Candidate, 'memory' | 'lastWasBelowHalf' | 'answeredToday' | 'taughtOn' | 'itemsInTopic'>;
+type Facts = Omit<Candidate, 'memory' | 'lastWasBelowHalf' | 'answeredToday' | 'isTaken' | 'taughtOn' | 'itemsInTopic'>;
 
 /** One question as a class meets it. */
 export interface StudyItem {
@@ -41,22 +42,26 @@ export function nextPapers(seasons: readonly Season[]): Map<string, string> {
 
 /** The live questions that a class has been or will be taught, with the facts that its scheduler goes by. */
 export function studyItems(
-  { specification, tier, taught, subjectId }: ClassPlan,
+  { specification, entry, taught, subjectId }: ClassPlan,
   bank: readonly BankQuestion[],
   papersOn: ReadonlyMap<string, string>,
 ): StudyItem[] {
-  const subjectMarks = specification.papers.reduce((sum, { marks }) => sum + marks, 0);
-  const entered = bank.filter(
-    (question) => isLive(question) && (!question.content.tier || question.content.tier === tier),
+  const isEntered = isFor(entry);
+  const sat = specification.papers.filter(isEntered);
+  const subjectMarks = sat.reduce((sum, { marks }) => sum + marks, 0);
+  const asked = bank.filter(
+    (question) => isLive(question) && isEntered({ tier: question.content.tier ?? null, option: question.option }),
   );
   return specification.topics.flatMap((topic) => {
     const taughtOn = taught.get(topic.id);
     if (taughtOn === undefined) return [];
-    const inTopic = entered.filter(({ topicIds }) => topicIds.includes(topic.id));
+    const inTopic = asked.filter(({ topicIds }) => topicIds.includes(topic.id));
     const related = inTopic.flatMap(({ content }) => bodyOf(content).parts);
-    const papers = specification.papers
-      .filter(({ number }) => topic.weights[number])
-      .map(({ id, number }) => ({ id, marks: topic.weights[number] ?? 0, on: papersOn.get(id) ?? '' }))
+    const papers = sat
+      .flatMap(({ id, weights }) => {
+        const marks = weights.get(topic.number);
+        return marks ? [{ id, marks, on: papersOn.get(id) ?? '' }] : [];
+      })
       .sort((a, b) => (a.on < b.on ? -1 : 1));
     const [next] = papers;
     if (!next) return [];

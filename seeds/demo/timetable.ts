@@ -34,15 +34,16 @@ export interface Season {
   sittings: Sitting[];
 }
 
-/** Papers that different students sit at one time: all specifications of a subject, by paper number. */
+/** Papers sat at one time, none of them by one student: all of a subject with one number, whatever tier or option. */
 function examSlots(subjects: readonly SubjectPlan[]): string[][] {
-  const slots = subjects.flatMap(({ content, specifications }) =>
-    content.papers.map(({ number }) => ({
+  const slots = subjects.flatMap(({ content, specifications }) => {
+    const all = specifications.flatMap(({ papers }) => papers);
+    return [...new Set(all.map(({ number }) => number))].map((number) => ({
       number,
       place: ORDER.indexOf(content.code),
-      papers: specifications.flatMap(({ papers }) => papers.filter((p) => p.number === number).map((p) => p.id)),
-    })),
-  );
+      papers: all.filter((paper) => paper.number === number).map(({ id }) => id),
+    }));
+  });
   return slots.sort((a, b) => a.number - b.number || a.place - b.place).map(({ papers }) => papers);
 }
 

@@ -107,13 +107,13 @@ export async function taught(
 export async function aSitting(
   school: FactorySchool,
   subject: FactorySubject,
-  values: { on: string; startsAt?: string },
+  values: { on: string; startsAt?: string; kind?: 'mock' | 'summer' },
 ): Promise<void> {
   await withSchool(school.id, async () => {
     const seasonId = randomUUID();
     await execute(
-      `INSERT INTO seasons (school_id, id, name, kind, starts_on, ends_on) VALUES ($1, $2, $3, 'summer', $4, $4)`,
-      [school.id, seasonId, `Season ${unique()}`, values.on],
+      `INSERT INTO seasons (school_id, id, name, kind, starts_on, ends_on) VALUES ($1, $2, $3, $4, $5, $5)`,
+      [school.id, seasonId, `Season ${unique()}`, values.kind ?? 'summer', values.on],
     );
     await execute(
       `INSERT INTO sittings (school_id, id, paper_id, season_id, sat_on, starts_at, zone, source)

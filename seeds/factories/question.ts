@@ -48,6 +48,7 @@ interface QuestionValues {
   status?: VersionStatus;
   kind?: QuestionKind;
   tier?: Tier;
+  option?: string;
   body?: QuestionBody;
   expectedSeconds?: number;
   /** Its number in the subject; the next free one of this process unless given. */
@@ -74,16 +75,18 @@ export async function aQuestion(
       revision: 1,
       kind,
       tier: values.tier ?? null,
+      option: values.option ?? null,
       body,
       ...describeBody(body),
       expectedSeconds,
       authorId: author.id,
+      lastEditedBy: author.id,
       savedAt: now,
       sentAt: status === 'draft' ? null : now,
       liveAt: status === 'live' ? now : null,
     });
     if (status === 'live') await question.update({ liveVersionId: version.id });
-    await QuestionTopic.create({ questionId: question.id, topicId, position: 0 });
+    await QuestionTopic.create({ questionId: question.id, questionVersionId: version.id, topicId, position: 0 });
     return { id: question.id, versionId: version.id, number: question.number };
   });
 }

@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import { execute, withSchool } from '#server/db/scope.ts';
+import { withSchool } from '#server/db/scope.ts';
 import { School } from '#server/models/school.ts';
 import { YearGroup } from '#server/models/year-group.ts';
 import { uniqueCode } from './unique.ts';
@@ -10,14 +10,13 @@ export interface FactorySchool {
   yearGroupId: string;
 }
 
-/** A school with one year group, and the directory entry its sign-in address needs. */
+/** A school with one year group. The database enters it in the directory of sign-in addresses by itself. */
 export async function aSchool(
   values: Partial<{ zone: string; isDemo: boolean; seasonEndsOn: string }> = {},
 ): Promise<FactorySchool> {
   const id = randomUUID();
   const code = uniqueCode('school');
   return withSchool(id, async () => {
-    await execute('INSERT INTO school_directory (code, school_id) VALUES ($1, $2)', [code, id]);
     await School.create({
       schoolId: id,
       name: `School ${code}`,

@@ -8,7 +8,7 @@ const SHOWN = 20;
 
 let faults = 0;
 for (const schoolId of await allSchoolIds()) {
-  const report = await withSchool(schoolId, verifyLog);
+  const report = await withSchool(schoolId, verifyLog, { isSnapshot: true });
   faults += report.faults.length;
   console.log(
     `School ${schoolId}: ${report.students} students, ${report.answers} answers, ${report.states} memory states, ` +

@@ -1,9 +1,18 @@
 import { Client } from 'pg';
 import { Umzug } from 'umzug';
 import { migrations } from '#server/migrations/index.ts';
+import type { Migration } from '#server/migrations/migration.ts';
 
 /** Any number, the same in every process: the lock that lets one process migrate at a time. */
 const MIGRATION_LOCK = 5_214_027;
+
+/** A lock that cannot be had fails the migration soon, rather than queue every request behind it. */
+async function setTimeouts(client: Client, { lockTimeoutMs = 3000, statementTimeoutMs = 60_000 }: Migration) {
+  await client.query("SELECT set_config('lock_timeout', $1, true), set_config('statement_timeout', $2, true)", [
+    String(lockTimeoutMs),
+    String(statementTimeoutMs),
+  ]);
+}
 
 /**
  * Brings a database to the newest shape. Safe to run from two processes at once: the second waits, then finds
@@ -26,6 +35,7 @@ export async function migrate(ownerUrl: string): Promise<string[]> {
         up: async () => {
           await client.query('BEGIN');
           try {
+            await setTimeouts(client, migration);
             await migration.up(run);
             await client.query('COMMIT');
           } catch (error) {

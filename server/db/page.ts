@@ -7,7 +7,18 @@ export interface Cursor {
   id: string;
 }
 
-const cursorSchema = z.tuple([z.string(), z.string().regex(/^-?\d{1,18}(\.\d{1,12})?$/), z.guid()]);
+const LARGEST_INTEGER = 2 ** 31 - 1;
+
+/** What a sort key may be, by the PostgreSQL type that the list compares it as: a crafted one must not reach a cast. */
+const cursorKeys = {
+  integer: z
+    .string()
+    .regex(/^-?\d{1,10}$/)
+    .refine((key) => Math.abs(Number(key)) <= LARGEST_INTEGER),
+  bigint: z.string().regex(/^-?\d{1,18}$/),
+  numeric: z.string().regex(/^-?\d{1,18}(\.\d{1,12})?$/),
+};
+export type CursorKey = keyof typeof cursorKeys;
 
 const parseJson = (text: string): unknown => {
   try {
@@ -18,10 +29,11 @@ const parseJson = (text: string): unknown => {
 };
 
 /** @throws Problem 422 at `cursor` where it is not one of ours, or belongs to a list in another order */
-export function readCursor(sort: string, cursor: string | undefined): Cursor | null {
+export function readCursor(sort: string, key: CursorKey, cursor: string | undefined): Cursor | null {
   if (cursor === undefined) return null;
-  const parsed = cursorSchema.safeParse(parseJson(Buffer.from(cursor, 'base64url').toString('utf8')));
-  if (!parsed.success || parsed.data[0] !== sort) {
+  const schema = z.tuple([z.literal(sort), cursorKeys[key], z.guid()]);
+  const parsed = schema.safeParse(parseJson(Buffer.from(cursor, 'base64url').toString('utf8')));
+  if (!parsed.success) {
     throw unprocessable([{ pointer: '#/cursor', detail: 'This page is no longer there. Start from the first one.' }]);
   }
   return { key: parsed.data[1], id: parsed.data[2] };

@@ -1,5 +1,5 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
-import { QueryTypes } from 'sequelize';
+import { QueryTypes, Transaction } from 'sequelize';
 import { sequelize } from './sequelize.ts';
 
 /** One school, one transaction, one moment. Everything a service does happens inside a scope. */
@@ -25,12 +25,12 @@ const sqlState = (error: unknown): string | undefined =>
 /**
  * Opens a transaction in which PostgreSQL shows this school's rows only, and runs `work` in it. Model calls and
  * `select` join by themselves. Inside the same school's scope it simply runs; another school's is refused.
- * `options.now` lets seeds and tests choose the moment.
+ * `options.now` lets seeds and tests choose the moment; `isSnapshot` shows every statement the same state of the rows.
  */
 export async function withSchool<T>(
   schoolId: string,
   work: (scope: SchoolScope) => Promise<T>,
-  options: { requestId?: string; now?: Date } = {},
+  options: { requestId?: string; now?: Date; isSnapshot?: boolean } = {},
 ): Promise<T> {
   const open = current.getStore();
   if (open) {
@@ -46,7 +46,8 @@ export async function withSchool<T>(
       afterCommit: (job) => later.push(job),
     };
     try {
-      const result = await sequelize.transaction(async () => {
+      const isolationLevel = options.isSnapshot ? Transaction.ISOLATION_LEVELS.REPEATABLE_READ : undefined;
+      const result = await sequelize.transaction({ isolationLevel }, async () => {
         await sequelize.query("SELECT set_config('app.school_id', $1, true)", { bind: [schoolId] });
         return current.run(scope, () => work(scope));
       });

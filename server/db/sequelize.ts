@@ -1,6 +1,7 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
 import pg from 'pg';
 import { Sequelize } from 'sequelize';
+import { readDatabaseConfig } from '#server/config.ts';
 import { PatientClient } from './patient-client.ts';
 
 /** Milliseconds a statement, a lock and an idle transaction may take before PostgreSQL ends them. */
@@ -19,15 +20,14 @@ const namespace = {
 };
 Sequelize.useCLS(namespace);
 
-const address = process.env.DATABASE_URL;
-if (!address) throw new Error('DATABASE_URL is not set: it is the postgres:// address of the app role.');
+const { DATABASE_URL, DATABASE_POOL } = readDatabaseConfig(process.env);
 
 /** The one connection pool of the app. Used through `withSchool`; see scope.ts. */
-export const sequelize = new Sequelize(address, {
+export const sequelize = new Sequelize(DATABASE_URL, {
   dialect: 'postgres',
   dialectModule: { ...pg, Client: PatientClient },
   logging: false,
-  pool: { max: Number(process.env.DATABASE_POOL ?? 10), min: 0, acquire: 3000, idle: 10_000 },
+  pool: { max: DATABASE_POOL, min: 0, acquire: 3000, idle: 10_000 },
   define: { underscored: true, timestamps: false },
   dialectOptions: { ...TIMEOUTS, application_name: 'plait' },
 });

@@ -10,6 +10,7 @@ import {
 } from 'sequelize';
 import { busy, Problem, stale } from '#server/errors.ts';
 import type { ProblemDetails } from '#shared/schemas/common.ts';
+import { requestFacts } from './request-log.ts';
 
 interface ParserError {
   status: number;
@@ -87,8 +88,9 @@ export function problemHandler(log: Logger): ErrorRequestHandler {
   return (error, request, response, next) => {
     if (response.headersSent) return next(error);
     const problem = known(error);
-    if (!problem) log.error({ err: error, requestId: request.id }, 'unexpected error');
-    else if (problem.status >= 500) log.warn({ err: error, requestId: request.id }, 'not available');
+    const facts = () => ({ err: error, requestId: request.id, ...requestFacts(request, response) });
+    if (!problem) log.error(facts(), 'unexpected error');
+    else if (problem.status >= 500) log.warn(facts(), 'not available');
     sendProblem(
       response,
       problem ?? new Problem(500, 'unexpected', 'Something went wrong at our end. Nothing you did is lost.'),

@@ -16,7 +16,7 @@ interface Input<P, Q, B> {
 }
 
 interface Common<P, Q, B> {
-  method: 'get' | 'post' | 'put' | 'patch' | 'delete';
+  method: 'get' | 'post' | 'put' | 'delete';
   /** Below /api, Express 5 syntax. */
   path: string;
   params?: P;

@@ -25,7 +25,7 @@ export function dataOnly(publicOrigin: string): RequestHandler {
   const isHttps = publicOrigin.startsWith('https:');
   return (request, _response, next) => {
     if (isHttps && !request.secure) {
-      throw new Problem(403, 'not-secure', 'Plait answers over https only. See README, Deploying: TRUST_PROXY.');
+      throw new Problem(403, 'not-secure', 'Plait answers over https only. See TRUST_PROXY in the README.');
     }
     if (WINDOWS.has(request.get('sec-fetch-dest') ?? '')) {
       throw new Problem(403, 'not-a-page', 'This address is not a page.');

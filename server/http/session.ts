@@ -105,8 +105,12 @@ export async function startSession(
   request.session.seenAt = now;
   request.session.lifetime = lifetime;
   // Without Max-Age the cookie goes when the browser closes: right for a device several people use.
-  if (lifetime === OWN_DEVICE) request.session.cookie.maxAge = lifetime.absolute;
+  if (lifetime.absolute === OWN_DEVICE.absolute) request.session.cookie.maxAge = lifetime.absolute;
 }
+
+/** Goes on under a new id, after a change of password, as long as the session was meant to last. The old row is dead. */
+export const renewSession = (request: Request, user: SessionUser, now: number): Promise<void> =>
+  startSession(request, user, request.session.lifetime ?? SHARED_DEVICE, now);
 
 /** Ends the session on the server and tells the browser to forget what it kept. */
 export async function endSession(request: Request, response: Response, cookie: string): Promise<void> {

@@ -2,6 +2,7 @@ import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { LaunchError } from './messages.mjs';
 import { findNpm } from './npm-parent.mjs';
+import { shown } from './paths.mjs';
 import { endProcess, findByEnvironment, identify, isSameAlive } from './processes.mjs';
 import { makeStateDir } from './state-dir.mjs';
 
@@ -28,6 +29,9 @@ export function markOf(stateDir) {
  * @typedef {Identity & { url: string, npm?: Identity }} Holder the launch that has the folder, and the npm above it
  */
 
+/** @param {string} stateDir */
+const holderFile = (stateDir) => path.join(stateDir, 'running.json');
+
 /** @param {string} file @returns {Holder | undefined} */
 function readHolder(file) {
   try {
@@ -45,7 +49,7 @@ function readHolder(file) {
  */
 export async function claimState(stateDir, url) {
   makeStateDir(stateDir);
-  const file = path.join(stateDir, 'running.json');
+  const file = holderFile(stateDir);
   const holder = readHolder(file);
   const isLeftOver = holder?.npm !== undefined && !isSameAlive(holder.npm);
   if (isLeftOver) await endProcess(holder.pid, [...HOLDER_ENDING]);
@@ -63,5 +67,28 @@ export async function claimState(stateDir, url) {
   }
   const orphans = findByEnvironment(MARK, stateDir);
   await Promise.all(orphans.map((pid) => endProcess(pid, [...ENDING])));
-  return { release: () => rmSync(file, { force: true }), ended: orphans.length };
+  const release = () => {
+    if (holdsState(stateDir)) rmSync(file, { force: true });
+  };
+  return { release, ended: orphans.length };
+}
+
+/** @param {string} stateDir @returns {boolean} whether this process is still the launch that has the folder */
+export function holdsState(stateDir) {
+  const holder = readHolder(holderFile(stateDir));
+  return holder?.pid === process.pid && holder.born === identify(process.pid).born;
+}
+
+/**
+ * Ends a launch whose state folder was removed or taken over while it ran: it has nothing left to start again.
+ * @param {string} stateDir @param {import('./lifecycle.mjs').Lifecycle} lifecycle @param {(line: string) => void} say
+ * @returns {boolean} whether it ends
+ */
+export function leaveWhenReplaced(stateDir, lifecycle, say) {
+  if (holdsState(stateDir)) return false;
+  if (!lifecycle.isStopping()) {
+    say(`  ${shown(stateDir)} is no longer the folder of this launch; stopping.`);
+    void lifecycle.stop().then(() => process.exit(1));
+  }
+  return true;
 }

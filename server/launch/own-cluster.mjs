@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { existsSync, lstatSync, readFileSync, renameSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
+import { leaveWhenReplaced } from './claim.mjs';
 import { initCluster, makePassable } from './cluster.mjs';
 import { cutLog } from './log-file.mjs';
 import { LaunchError } from './messages.mjs';
@@ -98,16 +99,16 @@ export async function openOwnCluster({ stateDir, programs, lifecycle, say }) {
   }
   cutLog(logFile);
   const options = { bin, dataDir, user, logFile, settings: ['cluster_name=plait'] };
-  return { secrets, isNew, ...(await keepPostmaster(options, lifecycle, say)) };
+  return { secrets, isNew, ...(await keepPostmaster(options, stateDir, lifecycle, say)) };
 }
 
 /**
  * Starts a server and starts it again, on the same port, whenever it goes without being told to.
- * @param {import('./postmaster.mjs').PostmasterOptions} options
+ * @param {import('./postmaster.mjs').PostmasterOptions} options @param {string} stateDir
  * @param {import('./lifecycle.mjs').Lifecycle} lifecycle @param {(line: string) => void} say
  * @returns {Promise<{ port: number }>}
  */
-async function keepPostmaster(options, lifecycle, say) {
+async function keepPostmaster(options, stateDir, lifecycle, say) {
   let latest = identify(0);
   const { isStopping } = lifecycle;
   const onSpawn = (/** @type {number} */ pid) => {
@@ -125,7 +126,7 @@ async function keepPostmaster(options, lifecycle, say) {
     let running = first;
     while (true) {
       await running.exited;
-      if (isStopping()) return;
+      if (isStopping() || leaveWhenReplaced(stateDir, lifecycle, say)) return;
       say('  PostgreSQL stopped unexpectedly; starting it again.');
       for (let wait = 250; ; wait = Math.min(wait * 2, SLOWEST_RETRY_MS)) {
         try {
@@ -133,7 +134,7 @@ async function keepPostmaster(options, lifecycle, say) {
           say('  PostgreSQL is back.');
           break;
         } catch (error) {
-          if (isStopping()) return;
+          if (isStopping() || leaveWhenReplaced(stateDir, lifecycle, say)) return;
           say(`  ${error instanceof Error ? error.message : error}`);
           await sleep(wait);
         }

@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process';
 import { closeSync } from 'node:fs';
 import { setTimeout as sleep } from 'node:timers/promises';
+import { leaveWhenReplaced } from './claim.mjs';
 import { cutLog, openLog, readTail, sizeOf } from './log-file.mjs';
 import { DISK_FULL, explainOutput, LaunchError, lastLines, portTaken, Stopped } from './messages.mjs';
 import { projectRoot, shown } from './paths.mjs';
@@ -18,7 +19,7 @@ const ENDING = /** @type {const} */ ([
 
 /**
  * @typedef {{
- *   args: string[], env: NodeJS.ProcessEnv, port: number, readyUrl: string, logFile: string, command: string,
+ *   stateDir: string, args: string[], env: NodeJS.ProcessEnv, port: number, readyUrl: string, logFile: string, command: string,
  *   lifecycle: import('./lifecycle.mjs').Lifecycle, say: (line: string) => void,
  * }} ServerOptions `args` for node
  */
@@ -74,7 +75,7 @@ function failure({ port, command, logFile }, said, how) {
  * @returns {Promise<void>} when it was ready for the first time @throws LaunchError
  */
 export async function keepServer(options) {
-  const { lifecycle, logFile, say } = options;
+  const { lifecycle, logFile, say, stateDir } = options;
   lifecycle.check();
   cutLog(logFile);
   const before = sizeOf(logFile);
@@ -103,12 +104,12 @@ export async function keepServer(options) {
     while (true) {
       const began = performance.now();
       const how = await current.exited;
-      if (lifecycle.isStopping()) return;
+      if (lifecycle.isStopping() || leaveWhenReplaced(stateDir, lifecycle, say)) return;
       if (performance.now() - began > STEADY_MS) wait = 250;
       say(`  The server stopped unexpectedly (${how}); starting it again. Its log: ${shown(logFile)}`);
       await sleep(wait);
       wait = Math.min(wait * 2, SLOWEST_RETRY_MS);
-      if (lifecycle.isStopping()) return;
+      if (lifecycle.isStopping() || leaveWhenReplaced(stateDir, lifecycle, say)) return;
       current = spawnServer(options);
       const { state } = current;
       void (async () => {

@@ -89,6 +89,7 @@ export function startDev() {
       const logFile = path.join(stateDir, 'server.log');
       await steps.step('Server', async () => {
         await keepServer({
+          stateDir,
           args: [TSX, 'watch', '--clear-screen=false', path.join('server', 'main.ts')],
           env,
           port: apiPort,

@@ -50,6 +50,7 @@ export function start() {
       }
       await steps.step('Server', async () => {
         await keepServer({
+          stateDir,
           args: ['--enable-source-maps', path.join(dist, 'server', 'main.js')],
           env: { ...env, CLIENT_DIR: path.join(dist, 'client') },
           port,

@@ -16,7 +16,7 @@ export const tenancy: Migration = {
         code text PRIMARY KEY CHECK (code ~ '^[a-z0-9-]{2,40}$'),
         school_id uuid NOT NULL UNIQUE
       );
-      GRANT SELECT, INSERT, UPDATE ON school_directory TO plait_app;
+      GRANT SELECT ON school_directory TO plait_app;
 
       -- connect-pg-simple's columns; the user's ids in sess are indexed so that sessions can be ended.
       CREATE TABLE session (
@@ -47,5 +47,21 @@ export const tenancy: Migration = {
         created_at timestamptz NOT NULL DEFAULT now()
       );
       ${tenantWall('schools', ['SELECT', 'INSERT', 'UPDATE'])}
+
+      -- The directory follows the schools and is written in no other way: the wall lets a scope add its own school
+      -- alone, and a trigger's function can be called by nobody.
+      CREATE FUNCTION app.enter_school() RETURNS trigger LANGUAGE plpgsql SECURITY DEFINER
+        SET search_path = pg_catalog, pg_temp AS $$
+        BEGIN
+          IF TG_OP = 'INSERT' THEN
+            INSERT INTO public.school_directory (code, school_id) VALUES (NEW.code, NEW.school_id);
+          ELSE
+            UPDATE public.school_directory SET code = NEW.code WHERE school_id = NEW.school_id;
+          END IF;
+          RETURN NULL;
+        END $$;
+      REVOKE ALL ON FUNCTION app.enter_school() FROM PUBLIC;
+      CREATE TRIGGER enter_school AFTER INSERT OR UPDATE OF code ON schools
+        FOR EACH ROW EXECUTE FUNCTION app.enter_school();
     `),
 };

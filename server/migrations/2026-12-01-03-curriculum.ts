@@ -2,6 +2,8 @@ import type { Migration } from './migration.ts';
 import { EDITABLE, tenantWall } from './tenant-table.ts';
 
 const TIER = `text CHECK (tier IN ('foundation', 'higher'))`;
+/** A chosen part of a specification. */
+const OPTION = 'text CHECK (length(option) BETWEEN 1 AND 60)';
 
 /** Specifications, papers and their sittings, topics, and the classes that study them. */
 export const curriculum: Migration = {
@@ -24,7 +26,7 @@ export const curriculum: Migration = {
         number integer NOT NULL,
         title text NOT NULL,
         tier ${TIER},
-        option text,
+        option ${OPTION},
         minutes integer NOT NULL CHECK (minutes > 0),
         marks integer NOT NULL CHECK (marks > 0),
         PRIMARY KEY (school_id, id),
@@ -65,7 +67,7 @@ export const curriculum: Migration = {
         number text NOT NULL,
         title text NOT NULL,
         tier ${TIER},
-        option text,
+        option ${OPTION},
         position integer NOT NULL,
         PRIMARY KEY (school_id, id),
         UNIQUE (school_id, specification_id, number),
@@ -124,7 +126,7 @@ export const curriculum: Migration = {
         class_id uuid NOT NULL,
         user_id uuid NOT NULL,
         tier ${TIER},
-        option text,
+        option ${OPTION},
         valid_from date NOT NULL,
         valid_to date,
         PRIMARY KEY (school_id, id),

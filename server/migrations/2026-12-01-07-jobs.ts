@@ -7,6 +7,8 @@ const plan = (): string => PgBoss.getConstructionPlans('pgboss').replace(/^\s*(B
 /** The job queue's own tables. The app may use them; only the owner may change their shape. */
 export const jobs: Migration = {
   name: '2026-12-01-07-jobs',
+  // The library's whole plan goes as one statement.
+  statementTimeoutMs: 300_000,
   up: (run) =>
     run(`
       ${plan()}

@@ -14,12 +14,14 @@ export class QuestionVersion extends Model<InferAttributes<QuestionVersion>, Inf
   declare revision: number;
   declare kind: QuestionKind;
   declare tier: CreationOptional<Tier | null>;
+  declare option: CreationOptional<string | null>;
   declare body: DraftBody;
   declare searchText: string;
   declare excerpt: string;
   declare maxMarks: number;
   declare expectedSeconds: number;
   declare authorId: string;
+  declare lastEditedBy: string;
   declare reviewerId: CreationOptional<string | null>;
   declare reviewComment: CreationOptional<string | null>;
   declare savedAt: Date;
@@ -36,12 +38,14 @@ QuestionVersion.init(
     revision: required(DataTypes.INTEGER),
     kind: required(DataTypes.TEXT),
     tier: { type: DataTypes.TEXT, allowNull: true },
+    option: { type: DataTypes.TEXT, allowNull: true },
     body: required(DataTypes.JSONB),
     searchText: required(DataTypes.TEXT),
     excerpt: required(DataTypes.TEXT),
     maxMarks: required(DataTypes.INTEGER),
     expectedSeconds: required(DataTypes.INTEGER),
     authorId: reference(),
+    lastEditedBy: reference(),
     reviewerId: optionalReference(),
     reviewComment: { type: DataTypes.TEXT, allowNull: true },
     savedAt: required(DataTypes.DATE),

@@ -17,6 +17,6 @@ export function authorize<Facts, Action extends string>(
   facts: Facts,
 ): void {
   if (policy[action](actor, facts)) return;
-  if (policy.read && action !== 'create' && !policy.read(actor, facts)) throw notFound();
+  if (policy.read && !policy.read(actor, facts)) throw notFound();
   throw forbidden();
 }

@@ -1,26 +1,11 @@
+import { decidedPoints } from '#shared/domain/marking/asked-question.ts';
 import { nextWords } from '#shared/domain/schedule/next-words.ts';
 import { reasonWords } from '#shared/domain/schedule/reason.ts';
 import type { HowSure } from '#shared/schemas/how-sure.ts';
 import type { MarkedPart } from '#shared/schemas/marked-part.ts';
-import type { AnswerResultDto, AskedQuestionDto, SetItemDto } from '#shared/schemas/practice.ts';
-import { bodyMarks, partMarks, type QuestionBody, type QuestionKind } from '#shared/schemas/question-body.ts';
+import type { AnswerResultDto, SetItemDto } from '#shared/schemas/practice.ts';
+import { bodyMarks, type QuestionBody } from '#shared/schemas/question-body.ts';
 import type { Reason } from '#shared/schemas/reason.ts';
-
-/** A question without its scheme, topic or anything an answer could be read from. */
-export const presentAsked = (number: number, kind: QuestionKind, body: QuestionBody): AskedQuestionDto => ({
-  number,
-  kind,
-  stem: body.stem,
-  maxMarks: bodyMarks(body),
-  parts: body.parts.map((part) => ({
-    prompt: part.prompt,
-    lines: part.lines,
-    marks: partMarks(part),
-    answerLabel: part.answerLabel ?? null,
-    unit: part.answer.kind === 'number' && !part.answer.isUnitRequired ? (part.answer.unit ?? null) : null,
-    answerKind: part.answer.kind,
-  })),
-});
 
 export const presentSubject = ({ id, code, name, strand }: SetItemDto['subject']): SetItemDto['subject'] => ({
   id,
@@ -78,15 +63,7 @@ export function presentResult(facts: ResultFacts): AnswerResultDto {
         markedBy: standing?.markedBy ?? 'student',
         words: standing?.words ?? '',
         modelAnswer: part.modelAnswer,
-        points: part.points.map((point, at) => ({
-          code: point.code ?? null,
-          text: point.text,
-          marks: point.marks,
-          allow: point.allow ?? [],
-          ignore: point.ignore ?? [],
-          reject: point.reject ?? [],
-          isEarned: standing?.earned[at] ?? null,
-        })),
+        points: decidedPoints(part, standing?.earned),
       };
     }),
     guidance: body.guidance ?? null,

@@ -46,6 +46,7 @@ export interface ReviewRow {
   kind: QuestionKind;
   max_marks: number;
   author_id: string;
+  last_edited_by: string;
   author: string;
   sent_at: Date;
 }
@@ -62,5 +63,5 @@ export const presentReviewRow = (row: ReviewRow, userId: string): ReviewRowDto =
   maxMarks: row.max_marks,
   author: row.author,
   sentAt: row.sent_at.toISOString(),
-  isOwn: row.author_id === userId,
+  isOwn: [row.author_id, row.last_edited_by].includes(userId),
 });

@@ -33,6 +33,7 @@ function presentVersion(version: QuestionVersion, names: Map<string, string>): Q
     revision: version.revision,
     kind: version.kind,
     tier: version.tier,
+    option: version.option,
     expectedSeconds: version.expectedSeconds,
     maxMarks: version.maxMarks,
     body: version.body,

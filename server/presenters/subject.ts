@@ -13,12 +13,14 @@ export const presentSubjectRef = ({
 
 export interface SubjectRow extends SubjectRefDto {
   specifications: SubjectDto['specifications'];
+  options: string[];
 }
 
 /** A subject as the people who teach it see it. */
 export const presentSubject = (row: SubjectRow, actor: Actor): SubjectDto => ({
   ...presentSubjectRef(row),
   specifications: row.specifications,
+  options: row.options,
   can: {
     writeQuestions: subjectPolicy.writeQuestions(actor, { subjectId: row.id }),
     manageTopics: subjectPolicy.manageTopics(actor, { subjectId: row.id }),

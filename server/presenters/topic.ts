@@ -8,6 +8,7 @@ export interface TopicRow {
   number: string;
   title: string;
   tier: Tier | null;
+  option: string | null;
   weights: TopicDto['weights'];
   live_questions: number;
   all_questions: number;
@@ -22,6 +23,7 @@ export const presentTopic = (row: TopicRow): TopicDto => ({
   number: row.number,
   title: row.title,
   tier: row.tier,
+  option: row.option,
   weights: row.weights,
   liveQuestions: row.live_questions,
   allQuestions: row.all_questions,

@@ -10,11 +10,12 @@ import {
   endSession,
   type Lifetime,
   OWN_DEVICE,
+  renewSession,
   type SessionUser,
   SHARED_DEVICE,
   startSession,
 } from '#server/http/session.ts';
-import { changePassword } from '#server/services/people/change-password.ts';
+import { type CountTry, changePassword } from '#server/services/people/change-password.ts';
 import { showMe, showMeTo } from '#server/services/people/show-me.ts';
 import { rolesOf } from '#server/services/people/sign-in.ts';
 import { type DemoPeople, showSignInPage } from '#server/services/people/sign-in-page.ts';
@@ -56,11 +57,15 @@ export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: A
     await startSession(request, user, await lifetimeFor(user, isOwnDevice), clock());
     return showMeTo(user);
   };
+  // One account is one counter, whichever door is tried.
+  const countTries =
+    (request: Request): CountTry =>
+    (schoolCode, name, verify) =>
+      limits.attempt(`${schoolCode}/${name.toLowerCase()}`, request.ip ?? '', verify);
   const signIn = async (body: SignIn, request: Request) => {
     // The strategy reads the request's body: give it the parsed one.
     request.body = body;
-    const account = `${body.schoolCode}/${body.name.toLowerCase()}`;
-    const user = await limits.attempt(account, request.ip ?? '', () => authenticate(passport, request));
+    const user = await countTries(request)(body.schoolCode, body.name, () => authenticate(passport, request));
     if (!user) {
       throw new Problem(
         401,
@@ -108,7 +113,10 @@ export function accountRoutes({ passport, limits, pool, cookie, clock, demo }: A
       access: 'session',
       body: changePasswordSchema,
       run: async ({ body }, request, user) => {
-        await changePassword(user, body, String(request.id));
+        await changePassword(user, body, countTries(request), String(request.id));
+        // No Clear-Site-Data: the person goes on here, and clearing storage would lose answers not yet sent. Nothing
+        // of theirs is in the browser's cache, since the API forbids keeping any.
+        await renewSession(request, user, clock());
         await endOtherSessions(pool, user.userId, request.sessionID);
       },
     }),

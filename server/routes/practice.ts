@@ -2,7 +2,6 @@ import { z } from 'zod';
 import { type Route, route } from '#server/http/registry.ts';
 import { handIn } from '#server/services/practice/hand-in.ts';
 import { listMyTopics } from '#server/services/practice/list-my-topics.ts';
-import { listSittings } from '#server/services/practice/list-sittings.ts';
 import { openSet } from '#server/services/practice/open-set.ts';
 import { selfMark } from '#server/services/practice/self-mark.ts';
 import { showSet } from '#server/services/practice/show-set.ts';
@@ -54,10 +53,4 @@ export const practiceRoutes: Route[] = [
     run: (scope, { params }) => showSummary(scope, params.id),
   }),
   route({ method: 'get', path: '/my-topics', access: ['student'], run: listMyTopics }),
-  route({
-    method: 'get',
-    path: '/my-sittings',
-    access: ['student'],
-    run: async (scope) => ({ items: await listSittings(scope) }),
-  }),
 ];

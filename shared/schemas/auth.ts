@@ -20,15 +20,16 @@ export type SignInPageDto = z.output<typeof signInPageSchema>;
 
 /** Longest password a sign-in form may send; what a new one must be is the password rule's matter. */
 const PASSWORD_LIMIT = 128;
+const TOO_LONG = 'That is too long.';
 
 export const signInSchema = z.strictObject({
   schoolCode: schoolCodeSchema,
   /** School username or e-mail address. */
-  name: z.string().trim().min(1, 'Type your username or e-mail address.').max(200),
+  name: z.string().trim().min(1, 'Type your username or e-mail address.').max(200, TOO_LONG),
   password: z
     .string()
     .min(1, 'Type your password.')
-    .max(PASSWORD_LIMIT * 4),
+    .max(PASSWORD_LIMIT * 4, TOO_LONG),
   isOwnDevice: z.boolean(),
 });
 export type SignIn = z.output<typeof signInSchema>;
@@ -39,11 +40,11 @@ export const changePasswordSchema = z.strictObject({
   current: z
     .string()
     .min(1, 'Type your password as it is now.')
-    .max(PASSWORD_LIMIT * 4),
+    .max(PASSWORD_LIMIT * 4, TOO_LONG),
   next: z
     .string()
     .min(1, 'Type a new password.')
-    .max(PASSWORD_LIMIT * 4),
+    .max(PASSWORD_LIMIT * 4, TOO_LONG),
 });
 export type ChangePassword = z.output<typeof changePasswordSchema>;
 

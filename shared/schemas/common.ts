@@ -25,6 +25,14 @@ export const pageOf = <T extends z.ZodType>(item: T) =>
 export const tierSchema = z.enum(['foundation', 'higher']);
 export type Tier = z.output<typeof tierSchema>;
 
+/** A chosen part of a specification, as the school names it: "Set text: The Glass Orchard". Null for all students. */
+export const optionSchema = z
+  .string()
+  .trim()
+  .min(1, 'Name the option.')
+  .max(60, 'Use at most 60 characters.')
+  .nullable();
+
 /** RFC 9457 problem details, as every refusal is sent. */
 export const problemSchema = z.object({
   type: z.string(),

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { daySchema, localTimeSchema, tierSchema } from './common.ts';
+import { daySchema, localTimeSchema, optionSchema, tierSchema } from './common.ts';
 
 /** A subject in the fewest words a screen needs. `strand` is its colour label: en, ma, bi … */
 export const subjectRefSchema = z.object({ id: z.uuid(), code: z.string(), name: z.string(), strand: z.string() });
@@ -18,9 +18,11 @@ export const subjectSchema = subjectRefSchema.extend({
     z.object({
       id: z.uuid(),
       name: z.string(),
-      papers: z.array(paperRefSchema.extend({ tier: tierSchema.nullable() })),
+      papers: z.array(paperRefSchema.extend({ tier: tierSchema.nullable(), option: z.string().nullable() })),
     }),
   ),
+  /** Options in use in its specifications, by papers, topics and entries. */
+  options: z.array(z.string()),
   can: z.object({ writeQuestions: z.boolean(), manageTopics: z.boolean(), readItemStatistics: z.boolean() }),
 });
 export type SubjectDto = z.output<typeof subjectSchema>;
@@ -37,6 +39,7 @@ export const topicSchema = z.object({
   number: z.string(),
   title: z.string(),
   tier: tierSchema.nullable(),
+  option: z.string().nullable(),
   weights: z.array(z.object({ paperId: z.uuid(), paperTitle: z.string(), marks: z.int() })),
   liveQuestions: z.int(),
   allQuestions: z.int(),
@@ -54,6 +57,7 @@ export const createTopicSchema = z.strictObject({
   number: z.string().trim().min(1, 'Give the topic its number.').max(20),
   title: z.string().trim().min(1, 'Give the topic a title.').max(200),
   tier: tierSchema.nullable(),
+  option: optionSchema.default(null),
   /** Marks that the topic usually carries in each paper. */
   weights: z.array(z.strictObject({ paperId: z.uuid(), marks: z.int().min(0).max(500) })).max(20),
 });
@@ -65,6 +69,7 @@ export const setTaughtSchema = z.strictObject({ taughtOn: daySchema.nullable() }
 /** One dated occurrence of a paper. Date and time are the school's wall clock. */
 export const sittingSchema = z.object({
   id: z.uuid(),
+  paperId: z.uuid(),
   subject: subjectRefSchema,
   paperTitle: z.string(),
   season: z.string(),
@@ -72,6 +77,7 @@ export const sittingSchema = z.object({
   startsAt: localTimeSchema,
   /** Length for this student, access arrangements included. */
   minutes: z.int(),
+  hasRestBreaks: z.boolean(),
   daysAway: z.int(),
   /** Where the date came from. */
   source: z.string(),

@@ -134,12 +134,17 @@ export const selfMarkSchema = z.strictObject({
 });
 export type SelfMark = z.output<typeof selfMarkSchema>;
 
+/** A topic by what could be recalled of it on the day of its paper, 0–100: an estimate. */
+const topicStandingSchema = z.object({ recallOnDay: z.int(), standing: standingSchema });
+
 /** How a set went. */
 export const setSummarySchema = z.object({
   id: z.uuid(),
   kind: setKindSchema,
   on: daySchema,
   answered: z.int(),
+  /** Answers that wait for the student's own marking: in no sum until then. */
+  waiting: z.int(),
   marks: z.int(),
   maxMarks: z.int(),
   minutes: z.int(),
@@ -162,9 +167,9 @@ export const setSummarySchema = z.object({
         topic: topicRefSchema,
         marks: z.int(),
         maxMarks: z.int(),
-        /** Expected recall, 0–100, before the set and after it; null where nothing had been attempted. */
-        recallBefore: z.int().nullable(),
-        recallAfter: z.int().nullable(),
+        /** As it stood before the set and stands after it; null where nothing had been attempted. */
+        before: topicStandingSchema.nullable(),
+        after: topicStandingSchema.nullable(),
         returnsOn: daySchema.nullable(),
       }),
     )
@@ -215,8 +220,10 @@ export const myTopicSchema = z.object({
   subject: subjectRefSchema,
   topic: topicRefSchema,
   standing: standingSchema,
-  /** Expected recall on the day of its paper, 0–100, over the questions attempted; null where none was. */
-  recall: z.int().nullable(),
+  /** Expected recall today, 0–100, over the questions attempted; null where none was. */
+  recallNow: z.int().nullable(),
+  /** The same on the day of its next paper if practice stopped now: what the standing goes by. */
+  recallOnDay: z.int().nullable(),
   attempted: z.int(),
   questions: z.int(),
   lastPractisedOn: daySchema.nullable(),

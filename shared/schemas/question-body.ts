@@ -43,7 +43,10 @@ export const textSpecSchema = z.strictObject({
   kind: z.literal('text'),
   accept: z.array(shortText).min(1).max(40),
   reject: z.array(shortText).max(40).optional(),
-  /** `wrong`: only the listed answers earn marks. `selfMark`: the student marks it against the scheme. */
+  /**
+   * `wrong`: on a part of one mark, only the listed answers earn it. `selfMark`: the student marks it against the
+   * scheme; so too on a part of several marks, whatever this says, for an unlisted answer may earn some of them.
+   */
   unlisted: z.enum(['wrong', 'selfMark']),
 });
 

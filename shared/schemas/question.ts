@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { instantSchema, pageOf, pageQuerySchema, tierSchema } from './common.ts';
+import { instantSchema, optionSchema, pageOf, pageQuerySchema, tierSchema } from './common.ts';
 import { subjectRefSchema } from './curriculum.ts';
 import { questionBodySchema, questionKindSchema } from './question-body.ts';
 
@@ -65,6 +65,7 @@ export type DraftBody = z.output<typeof draftBodySchema>;
 const draftFields = {
   kind: questionKindSchema,
   tier: tierSchema.nullable(),
+  option: optionSchema.default(null),
   expectedSeconds: z.int().min(20).max(1800),
   topicIds: z.array(z.uuid()).max(6),
   body: draftBodySchema,
@@ -72,11 +73,15 @@ const draftFields = {
 
 /** The client makes the id, so that a retried request cannot make two questions. */
 export const createQuestionSchema = z.strictObject({ id: z.uuid(), subjectId: z.uuid(), ...draftFields });
-export type CreateQuestion = z.output<typeof createQuestionSchema>;
+/** As a client sends it; `NewQuestion` is what the server has read of it, defaults filled in. */
+export type CreateQuestion = z.input<typeof createQuestionSchema>;
+export type NewQuestion = z.output<typeof createQuestionSchema>;
 
 /** `revision` is the one the writer last saw; a stale one is answered 409. */
 export const saveDraftSchema = z.strictObject({ revision: z.int().min(0), ...draftFields });
-export type SaveDraft = z.output<typeof saveDraftSchema>;
+/** As a client sends it; `SavedDraft` is what the server has read of it, defaults filled in. */
+export type SaveDraft = z.input<typeof saveDraftSchema>;
+export type SavedDraft = z.output<typeof saveDraftSchema>;
 
 export const revisionSchema = z.strictObject({ revision: z.int().min(0) });
 export const returnDraftSchema = z.strictObject({
@@ -103,6 +108,7 @@ export const questionVersionSchema = z.object({
   revision: z.int(),
   kind: questionKindSchema,
   tier: tierSchema.nullable(),
+  option: z.string().nullable(),
   expectedSeconds: z.int(),
   maxMarks: z.int(),
   body: draftBodySchema,
@@ -122,6 +128,7 @@ export const questionSchema = z.object({
   id: z.uuid(),
   number: z.int(),
   subject: subjectRefSchema,
+  /** Of `current`, the version being worked on. */
   topics: z.array(topicRef),
   current: questionVersionSchema,
   live: questionVersionSchema.nullable(),
@@ -192,6 +199,7 @@ export const reviewRowSchema = z.object({
   maxMarks: z.int(),
   author: z.string(),
   sentAt: instantSchema,
+  /** True for whoever wrote it or saved it last: somebody else approves it. */
   isOwn: z.boolean(),
 });
 export const reviewPageSchema = pageOf(reviewRowSchema);

@@ -1,7 +1,7 @@
 import { lazy, Suspense, useEffect, useRef, useState } from 'react';
 import { Link, Outlet, useLocation, useNavigation, useNavigationType } from 'react-router-dom';
 import { PageSkeleton } from '#src/components/skeleton.tsx';
-import { countUnsent } from '#src/lib/unsent.ts';
+import { hasKept } from '#src/lib/unsent.ts';
 import { useMe } from '#src/queries/me.ts';
 import { Brand } from './brand.tsx';
 import { NameMenu } from './name-menu.tsx';
@@ -59,7 +59,7 @@ export function LayoutShell() {
   const main = useArrival(pathname);
   const places = placesOf(me);
   // Asked once: answers are only left behind by leaving the runner, which brings this frame back.
-  const [hasUnsent] = useState(() => countUnsent(me.id) > 0);
+  const [hasUnsent] = useState(() => hasKept(me.id));
   const hasTabBar = me.can.practise;
   return (
     <div className="flex min-h-screen flex-col">

@@ -1,4 +1,6 @@
 import { lazy, Suspense, useEffect, useState } from 'react';
+import type { MeDto } from '#shared/schemas/auth.ts';
+import { roleWords } from '#shared/schemas/role.ts';
 import { useDisclosure } from '#src/lib/use-disclosure.ts';
 import { useMe } from '#src/queries/me.ts';
 
@@ -8,12 +10,18 @@ const NamePanel = lazy(() => loadPanel().then((module) => ({ default: module.Nam
 /** Once the page has settled, what the menu needs is fetched, so that it also opens offline. */
 const PRELOAD_AFTER_MS = 3000;
 
+/** "11S", "Mathematics", "Carer of Safa Hussain". */
+function scopeWords(membership: MeDto['memberships'][number] | undefined): string | null {
+  if (!membership?.scope) return null;
+  return membership.role === 'carer' ? `${roleWords.carer} of ${membership.scope}` : membership.scope;
+}
+
 /** The name at the top right, with the person's own settings under it. */
 export function NameMenu() {
   const me = useMe();
   const { isOpen, frame, button, toggle, close } = useDisclosure();
   const [wasOpened, setWasOpened] = useState(false);
-  const scope = me.memberships.find((membership) => membership.scope)?.scope;
+  const scope = scopeWords(me.memberships.find((membership) => membership.scope));
   useEffect(() => {
     const timer = setTimeout(() => void loadPanel().catch(() => undefined), PRELOAD_AFTER_MS);
     return () => clearTimeout(timer);

@@ -3,6 +3,7 @@ import { Link, useNavigate } from 'react-router-dom';
 import { ConfirmDialog } from '#src/components/dialog.tsx';
 import { Segmented } from '#src/components/segmented.tsx';
 import { hideTime, isTimeHidden } from '#src/lib/hidden-time.ts';
+import { kept } from '#src/lib/kept.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { chooseTheme, chosenTheme, type ThemeChoice } from '#src/lib/theme.ts';
@@ -49,8 +50,13 @@ function useLeave() {
       },
     });
   };
-  const unsent = countUnsent(me.id);
-  return { isAsking, setIsAsking, leave, unsent, signOut, ask: () => (unsent > 0 ? setIsAsking(true) : leave()) };
+  const ask = async () => {
+    // Other tabs of the same device may have kept answers since.
+    await kept.refresh(me.id);
+    if (countUnsent(me.id) > 0) setIsAsking(true);
+    else leave();
+  };
+  return { isAsking, setIsAsking, leave, unsent: countUnsent(me.id), signOut, ask: () => void ask() };
 }
 
 interface NamePanelProps {
@@ -95,8 +101,8 @@ export function NamePanel({ onClose }: NamePanelProps) {
           onConfirm={leave}
           onClose={() => setIsAsking(false)}
         >
-          {unsent === 1 ? 'One answer is' : `${unsent} answers are`} kept on this device and not sent yet. Signing out
-          removes {unsent === 1 ? 'it' : 'them'}.
+          {unsent === 1 ? 'One answer is' : `${unsent} answers are`} kept here and not sent yet. Signing out removes{' '}
+          {unsent === 1 ? 'it' : 'them'}.
         </ConfirmDialog>
       ) : null}
     </>

@@ -1,5 +1,6 @@
 import { type LoaderFunctionArgs, redirect } from 'react-router-dom';
 import type { MeDto } from '#shared/schemas/auth.ts';
+import { openKept } from '#src/lib/kept.ts';
 import { isSignedOut, queryClient } from '#src/lib/query-client.ts';
 import { signInPath } from '#src/lib/sign-in-path.ts';
 import { meKeys, meQuery } from '#src/queries/me.ts';
@@ -16,9 +17,10 @@ async function loadMe(request: Request): Promise<MeDto> {
   }
 }
 
-/** Loader of every layout behind the sign-in. */
+/** Loader of every layout behind the sign-in. What the person left unsent is at hand before any page is drawn. */
 export async function requireMe({ request }: LoaderFunctionArgs): Promise<null> {
-  await loadMe(request);
+  const { id } = await loadMe(request);
+  await openKept(id);
   return null;
 }
 

@@ -13,7 +13,7 @@ export const partLetter = (index: number): string => `(${String.fromCharCode(97 
 export const marksWords = (marks: number): string => `[${marks} ${marks === 1 ? 'mark' : 'marks'}]`;
 
 /** The place for an answer as the printed page has it, blank. */
-export function BlankAnswer({ part }: { part: AskedPart }) {
+function BlankAnswer({ part }: { part: AskedPart }) {
   if (part.answerKind !== 'number' && !part.answerLabel) return <RuledLines lines={part.lines} />;
   return (
     <div aria-hidden="true">

@@ -1,88 +1,39 @@
-import { type ComponentPropsWithRef, type ReactNode, useId } from 'react';
+import type { ComponentPropsWithRef } from 'react';
+import { FieldError, FieldFrame, FieldHint, type FieldShape, join, useFieldParts } from './field-frame.tsx';
 
-interface FieldShape {
-  label: ReactNode;
-  /** Said under the label, before the reader types. */
-  hint?: ReactNode;
-  /** Said under the field; makes it invalid. */
-  error?: string | undefined;
-  /** Kept for screen readers only, where a heading beside the field already names it. */
-  isLabelHidden?: boolean;
-  isSmall?: boolean;
-  /** Classes of the whole field, for its place in a grid. */
-  frameClass?: string;
-}
-
-interface FrameProps extends FieldShape {
-  id: string;
-  children: ReactNode;
-}
-
-const join = (...names: (string | false | undefined)[]) => names.filter(Boolean).join(' ');
-
-const describedBy = (id: string, { hint, error }: FieldShape) =>
-  join(hint ? `${id}-hint` : undefined, error ? `${id}-error` : undefined) || undefined;
-
-const inputClass = ({ error, isSmall }: FieldShape, more?: string) =>
-  join('inp', isSmall && 'sm max-md:!min-h-11', error && 'bad', more);
-
-/** Label above, hint under the label, control, error under the control. */
-export function FieldFrame({ id, label, hint, error, isLabelHidden, isSmall, frameClass, children }: FrameProps) {
-  return (
-    <div className={join('field min-w-0', frameClass)}>
-      <label htmlFor={id} className={isLabelHidden ? 'sr-only' : isSmall ? 'text-sm !font-medium' : undefined}>
-        {label}
-      </label>
-      {hint ? (
-        <p id={`${id}-hint`} className="hint mb-1.5">
-          {hint}
-        </p>
-      ) : null}
-      {children}
-      {error ? (
-        <p id={`${id}-error`} className="err mt-1">
-          {error}
-        </p>
-      ) : null}
-    </div>
-  );
+/** Splits what the frame shows from what the control itself takes. */
+function split<Props extends FieldShape & { className?: string | undefined; id?: string | undefined }>(props: Props) {
+  const { label, hint, error, isLabelHidden, isSmall, frameClass, aside, className, ...control } = props;
+  const look = join('inp', isSmall && 'sm max-md:!min-h-11', error && 'bad');
+  return { frame: { label, hint, error, isLabelHidden, isSmall, frameClass, aside }, control, look, className };
 }
 
 /** A one-line input with everything that belongs to it. Takes what `register()` gives. */
 export function Field(props: FieldShape & ComponentPropsWithRef<'input'>) {
-  const { label, hint, error, isLabelHidden, isSmall, frameClass, className, ...input } = props;
-  const ownId = useId();
-  const id = input.id ?? ownId;
+  const { frame, control, look, className } = split(props);
+  const { id, aria } = useFieldParts(props.id, props);
   return (
-    <FieldFrame {...{ id, label, hint, error, isLabelHidden, isSmall, frameClass }}>
-      <input
-        {...input}
-        id={id}
-        className={inputClass(props, className)}
-        aria-invalid={error ? true : undefined}
-        aria-describedby={describedBy(id, props)}
-      />
+    <FieldFrame {...frame} id={id}>
+      <input {...control} {...aria} className={join(look, className)} />
     </FieldFrame>
   );
 }
 
 /** A field of several lines; it grows with its text where the browser can. */
 export function TextArea(props: FieldShape & ComponentPropsWithRef<'textarea'>) {
-  const { label, hint, error, isLabelHidden, isSmall, frameClass, className, rows = 2, ...input } = props;
-  const ownId = useId();
-  const id = input.id ?? ownId;
+  const { frame, control, look, className } = split(props);
+  const { id, aria } = useFieldParts(props.id, props);
+  const rows = props.rows ?? 2;
   // A field that grows with its text forgets its rows, so they become its least height.
-  const minHeight = rows > 1 ? `${rows * (isSmall ? 1.125 : 1.375) + 1}rem` : undefined;
+  const minHeight = rows > 1 ? `${rows * (props.isSmall ? 1.125 : 1.375) + 1}rem` : undefined;
   return (
-    <FieldFrame {...{ id, label, hint, error, isLabelHidden, isSmall, frameClass }}>
+    <FieldFrame {...frame} id={id}>
       <textarea
-        {...input}
+        {...control}
+        {...aria}
         rows={rows}
-        style={{ minHeight, ...input.style }}
-        id={id}
-        className={inputClass(props, join('block [field-sizing:content]', className))}
-        aria-invalid={error ? true : undefined}
-        aria-describedby={describedBy(id, props)}
+        style={{ minHeight, ...props.style }}
+        className={join(look, 'block [field-sizing:content]', className)}
       />
     </FieldFrame>
   );
@@ -90,20 +41,11 @@ export function TextArea(props: FieldShape & ComponentPropsWithRef<'textarea'>) 
 
 /** A native select; its options are the children. */
 export function Select(props: FieldShape & ComponentPropsWithRef<'select'>) {
-  const { label, hint, error, isLabelHidden, isSmall, frameClass, className, children, ...input } = props;
-  const ownId = useId();
-  const id = input.id ?? ownId;
+  const { frame, control, look, className } = split(props);
+  const { id, aria } = useFieldParts(props.id, props);
   return (
-    <FieldFrame {...{ id, label, hint, error, isLabelHidden, isSmall, frameClass }}>
-      <select
-        {...input}
-        id={id}
-        className={inputClass(props, className)}
-        aria-invalid={error ? true : undefined}
-        aria-describedby={describedBy(id, props)}
-      >
-        {children}
-      </select>
+    <FieldFrame {...frame} id={id}>
+      <select {...control} {...aria} className={join(look, className)} />
     </FieldFrame>
   );
 }
@@ -112,31 +54,19 @@ type CheckBoxProps = Pick<FieldShape, 'label' | 'hint' | 'error' | 'frameClass'>
 
 /** One tick box, its label at the right. */
 export function CheckBox({ label, hint, error, frameClass, className, ...input }: CheckBoxProps) {
-  const ownId = useId();
-  const id = input.id ?? ownId;
+  const { id, aria } = useFieldParts(input.id, { hint, error });
   return (
     <div className={frameClass}>
       <label htmlFor={id} className="inline-flex min-h-9 max-md:min-h-11 items-center gap-2.5">
-        <input
-          {...input}
-          type="checkbox"
-          id={id}
-          className={join('size-4 flex-none', className)}
-          aria-invalid={error ? true : undefined}
-          aria-describedby={describedBy(id, { label, hint, error })}
-        />
+        <input {...input} {...aria} type="checkbox" className={join('size-4 flex-none', className)} />
         <span>{label}</span>
       </label>
-      {hint ? (
-        <p id={`${id}-hint`} className="hint pl-[1.625rem]">
-          {hint}
-        </p>
-      ) : null}
-      {error ? (
-        <p id={`${id}-error`} className="err pl-[1.625rem]">
-          {error}
-        </p>
-      ) : null}
+      <FieldHint id={id} className="pl-[1.625rem]">
+        {hint}
+      </FieldHint>
+      <FieldError id={id} className="pl-[1.625rem]">
+        {error}
+      </FieldError>
     </div>
   );
 }

@@ -63,7 +63,7 @@ export function MarkScheme({ points, isDrawn = false }: MarkSchemeProps) {
           className={`grid items-baseline py-2 border-b border-rule-soft ${isDecided ? 'grid-cols-[1.75rem_2.25rem_1fr]' : 'grid-cols-[2.25rem_1fr]'}`}
         >
           {isDecided ? (
-            <span className="self-start pt-0.5">
+            <span className="relative top-[.2rem]">
               <Sign isEarned={point.isEarned} isDrawn={isDrawn} />
             </span>
           ) : null}

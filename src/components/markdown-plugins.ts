@@ -40,15 +40,23 @@ function replaceWhere(node: Node, replace: (child: Node) => ElementContent | nul
   });
 }
 
-/** Makes `$$…$$` a display formula also where it stands on one line of its own. */
+/**
+ * Makes `$$…$$` a display formula also where it stands on one line of its own, and draws it at full size where it
+ * stands among words, as in the lists, which have a question on one line.
+ */
 export const remarkOneLineDisplay = () => (tree: MarkdownRoot, file: VFile) => {
   const source = String(file);
   for (const block of tree.children) {
-    if (block.type !== 'paragraph' || block.children.length !== 1) continue;
-    const [only] = block.children;
-    const start = only?.position?.start.offset;
-    if (!only || String(only.type) !== 'inlineMath' || start === undefined || !source.startsWith('$$', start)) continue;
-    only.data = { ...only.data, hProperties: { className: ['language-math', 'math-display'] } };
+    if (block.type !== 'paragraph') continue;
+    for (const node of block.children) {
+      const start = node.position?.start.offset;
+      if (String(node.type) !== 'inlineMath' || start === undefined || !source.startsWith('$$', start)) continue;
+      if (block.children.length === 1) {
+        node.data = { ...node.data, hProperties: { className: ['language-math', 'math-display'] } };
+      } else if ('value' in node) {
+        node.data = { ...node.data, hChildren: [{ type: 'text', value: `\\displaystyle ${node.value}` }] };
+      }
+    }
   }
 };
 

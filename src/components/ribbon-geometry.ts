@@ -1,5 +1,5 @@
 /** `next` not asked yet, `now` on the page, `done` answered. */
-export type LobeState = 'next' | 'now' | 'done';
+type LobeState = 'next' | 'now' | 'done';
 
 export interface RibbonItem {
   /** The two letters on the strand. */

@@ -17,7 +17,7 @@ export function RibbonRows(props: ComponentProps<typeof Ribbon>) {
   }, [items]);
   if (rows.length <= 1) return <Ribbon {...props} />;
   return (
-    <div className="grid gap-2">
+    <div className="grid gap-2 w-full">
       {rows.map((row) => (
         <Ribbon
           key={row.from}

@@ -97,7 +97,7 @@ function LobeText({ lobe, hasLabel, fontSize }: { lobe: Lobe; hasLabel: boolean;
           fontSize={fontSize}
           fontWeight="750"
           letterSpacing=".3"
-          style={{ fill: isSolid ? l : e }}
+          style={{ fill: isSolid ? l : item.state === 'now' ? 'var(--ink)' : e }}
         >
           {item.code}
         </text>

@@ -12,7 +12,7 @@ interface SegmentedProps<Value extends string> {
 export function Segmented<Value extends string>({ label, options, value, onChange }: SegmentedProps<Value>) {
   const name = useId();
   return (
-    <fieldset className="seg max-w-full overflow-x-auto">
+    <fieldset className="seg min-w-0 max-w-full overflow-x-auto">
       <legend className="sr-only">{label}</legend>
       {options.map((option) => (
         <label

@@ -31,16 +31,3 @@ export function PageSkeleton() {
     </div>
   );
 }
-
-/** A sheet on its way. */
-export function SheetSkeleton() {
-  return (
-    <div role="status" aria-busy="true" className="late sheet max-w-[62rem] mx-auto p-8 grid gap-4">
-      <span className="sr-only">Loading the question</span>
-      <span aria-hidden="true" className="block h-[22px] w-28 rounded-sm bg-sunk" />
-      <span aria-hidden="true" className="block h-4 w-4/5 rounded-sm bg-sunk" />
-      <span aria-hidden="true" className="block h-4 w-3/5 rounded-sm bg-sunk" />
-      <span aria-hidden="true" className="block h-40" />
-    </div>
-  );
-}

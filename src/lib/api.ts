@@ -30,7 +30,7 @@ export class NetworkError extends Error {
 export const isTransient = (error: unknown): boolean =>
   error instanceof NetworkError || (error instanceof ProblemError && (error.status >= 500 || error.status === 429));
 
-type Method = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
+type Method = 'GET' | 'POST' | 'PUT' | 'DELETE';
 
 async function request(method: Method, path: string, body: unknown, signal?: AbortSignal): Promise<Response> {
   try {
@@ -94,6 +94,5 @@ export const api = {
   },
   post: send('POST'),
   put: send('PUT'),
-  patch: send('PATCH'),
   delete: send('DELETE'),
 };

@@ -1,28 +1,16 @@
-const PREFIX = 'plait.answers.';
+import { kept } from './kept.ts';
+import { refusedPrefix } from './kept-keys.ts';
 
-/** Where the answers of one person's set wait until the server has them. */
-export const unsentKey = (userId: string, setId: string): string => `${PREFIX}${userId}.${setId}`;
+const answersOf = (userId: string): string[] => kept.entries(`plait.answers.${userId}.`).map(([key]) => key);
 
-function unsentKeys(userId: string): string[] {
-  try {
-    return Object.keys(sessionStorage).filter((key) => key.startsWith(`${PREFIX}${userId}.`));
-  } catch {
-    return [];
-  }
-}
+/** The sets of a person with answers that wait. */
+export const unsentSets = (userId: string): string[] => [
+  ...new Set(answersOf(userId).map((key) => key.split('.')[3] ?? '')),
+];
 
-/** The sets of a person with answers that wait on this device. */
-export const unsentSets = (userId: string): string[] =>
-  unsentKeys(userId).map((key) => key.slice(unsentKey(userId, '').length));
+/** How many answers of a person wait. */
+export const countUnsent = (userId: string): number => answersOf(userId).length;
 
-/** How many answers of a person wait on this device. */
-export function countUnsent(userId: string): number {
-  return unsentKeys(userId).reduce((count, key) => {
-    try {
-      const kept: unknown = JSON.parse(sessionStorage.getItem(key) ?? '[]');
-      return count + (Array.isArray(kept) ? kept.length : 1);
-    } catch {
-      return count + 1;
-    }
-  }, 0);
-}
+/** True where something waits to be sent or to be told. */
+export const hasKept = (userId: string): boolean =>
+  answersOf(userId).length > 0 || kept.entries(refusedPrefix(userId)).length > 0;

@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { subjectListSchema, topicListSchema } from '#shared/schemas/curriculum.ts';
+import { type CreateTopic, subjectListSchema, topicListSchema, topicSchema } from '#shared/schemas/curriculum.ts';
 import { api } from '#src/lib/api.ts';
 
 export const curriculumKeys = {
@@ -25,7 +25,19 @@ export const topicsQuery = (subjectId: string) =>
     select: (list) => list.items,
   });
 
-export interface TaughtChange {
+/** Adds a topic, and reads the subject's topics and options again. Done once the list shows it. */
+export function useCreateTopic(subjectId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (input: CreateTopic) => api.post(`/subjects/${subjectId}/topics`, input, topicSchema),
+    onSuccess: async () => {
+      void client.invalidateQueries({ queryKey: curriculumKeys.subjects() });
+      await client.invalidateQueries({ queryKey: curriculumKeys.topics(subjectId) });
+    },
+  });
+}
+
+interface TaughtChange {
   classId: string;
   topicId: string;
   /** Null takes the date away. */

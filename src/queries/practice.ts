@@ -51,7 +51,7 @@ export const summaryQuery = (id: string) =>
   });
 
 /** What an answer changes elsewhere is read again at the next visit. */
-function forgetOverviews(): void {
+export function forgetOverviews(): void {
   for (const queryKey of [practiceKeys.today(), practiceKeys.topics()]) {
     void queryClient.invalidateQueries({ queryKey, refetchType: 'none' });
   }

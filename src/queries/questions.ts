@@ -32,6 +32,9 @@ export const questionQuery = (id: string) =>
     refetchOnReconnect: false,
   });
 
+/** The question as the server has it now, without showing it: a form that is open keeps what was typed. */
+export const readQuestion = (id: string): Promise<QuestionDto> => api.get(`/questions/${id}`, questionSchema);
+
 export const questionListQuery = (filter: QuestionFilter) =>
   queryOptions({
     queryKey: questionKeys.list(filter),

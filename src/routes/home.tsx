@@ -40,7 +40,12 @@ export function Component() {
             {keyed(me.memberships, ({ role, scope }) => `${role} ${scope ?? ''}`).map(({ key, item }) => (
               <li key={key} className="py-2 border-b border-rule-soft first:pt-0 last:border-b-0 last:pb-0">
                 <b className="font-semibold">{roleWords[item.role]}</b>
-                {item.scope ? <span className="text-ink-2">, {item.scope}</span> : null}
+                {item.scope ? (
+                  <span className="text-ink-2">
+                    {item.role === 'carer' ? ' of ' : ', '}
+                    {item.scope}
+                  </span>
+                ) : null}
               </li>
             ))}
           </ul>

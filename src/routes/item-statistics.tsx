@@ -67,7 +67,7 @@ function SubjectStatistics({ subject, subjects }: { subject: SubjectDto; subject
       <div className="mb-6 flex flex-wrap items-end justify-between gap-4">
         <div className="min-w-0">
           <p className="mb-1.5 flex items-center gap-2 text-ink-2">
-            <StrandLabel subject={subject} /> {subject.name}
+            <StrandLabel subject={subject} /> <span className="min-w-0">{subject.name}</span>
           </p>
           <h1>Item statistics</h1>
           <p className="mt-1.5 max-w-[44rem] text-md text-ink-2">

@@ -1,4 +1,5 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
+import { useEffect } from 'react';
 import { Link, type LoaderFunctionArgs, useLocation, useParams } from 'react-router-dom';
 import { z } from 'zod';
 import { dayWords } from '#shared/domain/time/words.ts';
@@ -6,8 +7,12 @@ import { setKindWords } from '#shared/schemas/practice.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { MarksBadge } from '#src/components/marks-badge.tsx';
 import { BreakTimer } from '#src/features/practice/break-timer.tsx';
+import { draftsOf } from '#src/features/practice/drafts.ts';
+import { SummaryChanges } from '#src/features/practice/summary-changes.tsx';
 import { SummaryRibbon } from '#src/features/practice/summary-ribbon.tsx';
 import { SummaryTopics } from '#src/features/practice/summary-topics.tsx';
+import { waitingWords } from '#src/features/practice/summary-words.ts';
+import { kept } from '#src/lib/kept.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { useMe } from '#src/queries/me.ts';
 import { summaryQuery } from '#src/queries/practice.ts';
@@ -25,7 +30,12 @@ const count = (number: number, word: string) => `${number} ${word}${number === 1
 export function Component() {
   const { id = '' } = useParams();
   const summary = useSuspenseQuery(summaryQuery(id)).data;
-  const { today } = useMe();
+  const { id: userId, today } = useMe();
+  const waiting = waitingWords(summary.waiting);
+  // A set that is over keeps nothing on the device, unless its student still has to mark some of it.
+  useEffect(() => {
+    if (summary.waiting === 0) draftsOf(kept, userId, id).clear();
+  }, [summary.waiting, userId, id]);
   const arrival = arrivalSchema.safeParse(useLocation().state);
   const name = setKindWords[summary.kind];
   const when = summary.on === today ? 'today' : dayWords(summary.on);
@@ -63,7 +73,16 @@ export function Component() {
           ) : (
             <>
               <SummaryRibbon summary={summary} />
+              {waiting ? (
+                <div className="note cau mb-7">
+                  <p>{waiting}</p>
+                  <Link className="btn quiet sm mt-3 max-md:!min-h-11" to={`/sets/${id}`}>
+                    Mark {summary.waiting === 1 ? 'it' : 'them'} now
+                  </Link>
+                </div>
+              ) : null}
               <SummaryTopics topics={summary.topics} today={today} />
+              <SummaryChanges topics={summary.topics} />
             </>
           )}
           {summary.unused > 0 && summary.answered > 0 ? (

@@ -10,7 +10,9 @@ import { finishSet, setQuery } from '#src/queries/practice.ts';
 export async function loader({ params }: LoaderFunctionArgs): Promise<Response | null> {
   const id = params.id ?? '';
   const set = await queryClient.ensureQueryData(setQuery(id));
-  return set.status === 'finished' ? redirect(`/sets/${id}/summary`) : null;
+  // A finished set opens again only for answers that their student has not marked yet.
+  const isOver = set.status === 'finished' && set.items.every(({ result }) => result?.state !== 'selfMark');
+  return isOver ? redirect(`/sets/${id}/summary`) : null;
 }
 
 /** The runner: /sets/:id?q=6 */

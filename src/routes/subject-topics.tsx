@@ -1,9 +1,10 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Link, type LoaderFunctionArgs, useNavigate, useParams } from 'react-router-dom';
-import { subjectParamsSchema } from '#shared/schemas/curriculum.ts';
+import { type SubjectDto, subjectParamsSchema, type TopicDto } from '#shared/schemas/curriculum.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { SubjectChoice } from '#src/components/subject-choice.tsx';
+import { AddTopic } from '#src/features/curriculum/add-topic.tsx';
 import { TopicList } from '#src/features/curriculum/topic-list.tsx';
 import { queryClient } from '#src/lib/query-client.ts';
 import { subjectWords } from '#src/lib/subject-words.ts';
@@ -33,7 +34,7 @@ export function Component() {
       <div className="mb-7 flex flex-wrap items-end justify-between gap-4">
         <div className="min-w-0">
           <p className="mb-1.5 flex items-center gap-2 text-ink-2">
-            <StrandLabel subject={subject} /> {subject.name}
+            <StrandLabel subject={subject} /> <span className="min-w-0">{subject.name}</span>
           </p>
           <h1>Topics</h1>
           <p className="mt-1.5 max-w-[40rem] text-md text-ink-2">
@@ -46,22 +47,18 @@ export function Component() {
           onChange={(id) => void navigate(`/subjects/${id}/topics`)}
         />
       </div>
-      {topics.length === 0 ? (
+      {topics.length === 0 && !subject.can.manageTopics ? (
         <EmptyState title={`No topics in ${subjectWords(subject.name)} yet`}>
           Questions, gaps and planning all hang on the topics of your specification. The head of department lists them.
         </EmptyState>
       ) : (
         subject.specifications.map((specification) => (
-          <section key={specification.id} aria-labelledby={specification.id} className="mb-10">
-            <h2 id={specification.id} className="mb-2">
-              {specification.name}
-            </h2>
-            <TopicList
-              subject={subject}
-              specification={specification}
-              topics={topics.filter((topic) => topic.specificationId === specification.id)}
-            />
-          </section>
+          <SpecificationTopics
+            key={specification.id}
+            subject={subject}
+            specification={specification}
+            topics={topics.filter((topic) => topic.specificationId === specification.id)}
+          />
         ))
       )}
       {live > 0 && hasSeveral ? (
@@ -73,5 +70,27 @@ export function Component() {
         </Link>
       </p>
     </div>
+  );
+}
+
+interface SpecificationTopicsProps {
+  subject: SubjectDto;
+  specification: SubjectDto['specifications'][number];
+  topics: TopicDto[];
+}
+
+function SpecificationTopics({ subject, specification, topics }: SpecificationTopicsProps) {
+  return (
+    <section aria-labelledby={specification.id} className="mb-10">
+      <div className="mb-2 flex flex-wrap items-end justify-between gap-x-4 gap-y-2">
+        <h2 id={specification.id}>{specification.name}</h2>
+        <AddTopic subject={subject} specification={specification} topics={topics} />
+      </div>
+      {topics.length > 0 ? (
+        <TopicList subject={subject} specification={specification} topics={topics} />
+      ) : (
+        <p className="text-ink-2">No topics yet. Questions, gaps and planning all hang on them.</p>
+      )}
+    </section>
   );
 }

@@ -41,9 +41,10 @@ describe('subjects', () => {
     expect(items[0]?.specifications).toMatchObject([
       {
         id: subject.specificationId,
-        papers: [{ id: subject.paperId, title: 'Paper 1', minutes: 90, marks: 80, tier: null }],
+        papers: [{ id: subject.paperId, title: 'Paper 1', minutes: 90, marks: 80, tier: null, option: null }],
       },
     ]);
+    expect(items.map((item) => item.options)).toEqual([[], []]);
   });
 
   test('are for teachers and heads of department', async () => {
@@ -111,6 +112,7 @@ describe('adding a topic', () => {
     number: '4.2',
     title: 'Covalent bonding',
     tier: 'higher',
+    option: null,
     weights: [{ paperId: subject.paperId, marks: 9 }],
     ...values,
   });
@@ -131,6 +133,19 @@ describe('adding a topic', () => {
     expect(numbers.filter((number) => /^(4\.|5$)/.test(number))).toEqual(['4.1', '4.2', '4.10', '5']);
     const lines = await withSchool(school.id, () => AuditEntry.findAll({ where: { objectId: input.id } }));
     expect(lines.map((line) => line.action)).toEqual(['create-topic']);
+  });
+
+  test('of an option, which the subject then offers', async () => {
+    const here = await aDepartment(app);
+    const input = aNewTopic(here, { option: 'Set text A' });
+    expect(topicSchema.parse((await add(here, input).expect(201)).body).option).toBe('Set text A');
+    await add(here, { ...input, option: 'Set text B' }).expect(409);
+    await add(here, aNewTopic(here, { number: '4.3', option: 'Set text A' })).expect(201);
+    const { option: _option, ...without } = aNewTopic(here, { number: '4.4' });
+    expect(topicSchema.parse((await add(here, without).expect(201)).body).option).toBeNull();
+    await add(here, aNewTopic(here, { number: '4.5', option: 'x'.repeat(61) })).expect(422);
+    const [subject] = await subjectsOf(here.as.teacher);
+    expect(subject?.options).toEqual(['Set text A']);
   });
 
   test('refuses at the field what does not fit', async () => {

@@ -5,8 +5,8 @@ import { FACTORY_PASSWORD } from '#seeds/factories/password.ts';
 import { aPerson, aStudent, aTeacher, type FactoryPerson } from '#seeds/factories/people.ts';
 import { aSchool, type FactorySchool } from '#seeds/factories/school.ts';
 import { problemSchema } from '#shared/schemas/common.ts';
-import { auditLines, storedSessions, trySignIn } from '#tests/support/account.ts';
-import { signedInAs, testApp } from '#tests/support/app.ts';
+import { auditLines, cookieOf, setCookie, storedSessions, trySignIn } from '#tests/support/account.ts';
+import { browser, signedInAs, testApp } from '#tests/support/app.ts';
 import { allRows } from '#tests/support/as-role.ts';
 
 const app = testApp();
@@ -32,15 +32,34 @@ async function faultOf(person: FactoryPerson, next: string, current?: string): P
   return problemSchema.parse(response.body).errors?.[0]?.pointer;
 }
 
-test('takes effect at once, ends every other session and keeps this one', async () => {
+test('takes effect at once, ends every other session and goes on here under a new id', async () => {
   const person = await aStudent(school);
-  const [here, elsewhere] = [await signedInAs(app, person), await signedInAs(app, person)];
-  await here.post('/api/me/password').send({ current: FACTORY_PASSWORD, next: NEXT }).expect(204);
+  const [here, elsewhere] = [browser(app), await signedInAs(app, person)];
+  const before = await trySignIn(app, person, { isOwnDevice: true }, here);
+  const changed = await here.post('/api/me/password').send({ current: FACTORY_PASSWORD, next: NEXT }).expect(204);
+  expect(cookieOf(changed)).toMatch(/^plait=/);
+  expect(cookieOf(changed)).not.toBe(cookieOf(before));
+  // It lasts as long as the one before, and the browser keeps what the person has not sent yet.
+  expect(setCookie(changed)).toMatch(/Expires=/);
+  expect(changed.headers).not.toHaveProperty('clear-site-data');
+  await browser(app).get('/api/me').set('Cookie', cookieOf(before)).expect(401);
   await here.get('/api/me').expect(200);
   await elsewhere.get('/api/me').expect(401);
   expect(await storedSessions(person.id)).toBe(1);
   await trySignIn(app, person).expect(401);
   await trySignIn(app, person, { password: NEXT }).expect(200);
+});
+
+test('a wrong present one counts as a failed sign-in does, at one counter with it', async () => {
+  const person = await aStudent(school);
+  const agent = await signedInAs(app, person);
+  const tried = (current: string) => agent.post('/api/me/password').send({ current, next: NEXT });
+  for (let n = 0; n < 3; n++) await tried('not the right words').expect(422);
+  for (let n = 0; n < 2; n++) await trySignIn(app, person, { password: 'not the right words' }).expect(401);
+  const refused = await tried(FACTORY_PASSWORD).expect(429);
+  expect(refused.headers['retry-after']).toMatch(/^\d+$/);
+  await trySignIn(app, person).expect(429);
+  await agent.get('/api/me').expect(200);
 });
 
 test('somebody else’s sessions go on', async () => {
@@ -119,14 +138,23 @@ test('is stored as argon2id with the parameters of the house, and an older hash 
   await trySignIn(app, person).expect(200);
 });
 
-test('is one line of the audit log, and a refused one none', async () => {
+test('is one line of the audit log, and so is a try with a wrong present one', async () => {
   const own = await aSchool();
   const person = await aStudent(own);
   const lines = async () => (await auditLines(own.id)).filter(({ action }) => action === 'change-password');
   await change(person, 'short');
   expect(await lines()).toEqual([]);
+  const refused = await change(person, NEXT, 'not the right words');
   const response = await change(person, NEXT);
   expect(await lines()).toEqual([
+    {
+      action: 'change-password',
+      outcome: 'refused',
+      actor_id: person.id,
+      object_id: person.id,
+      fields: [],
+      request_id: refused.headers['x-request-id'],
+    },
     {
       action: 'change-password',
       outcome: 'done',

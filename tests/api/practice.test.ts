@@ -192,8 +192,8 @@ describe('the end of a set', () => {
     for (const item of answered) await agent.post(`/api/sets/${set.id}/answers`).send(anAnswer(item)).expect(200);
     const finished = await agent.post(`/api/sets/${set.id}/finish`).send({}).expect(200);
     const summary = setSummarySchema.parse(finished.body);
-    expect(summary).toMatchObject({ answered: 3, marks: 3, maxMarks: 3, unused: 9, breakMinutes: 10 });
-    expect(summary.topics.every((topic) => topic.recallBefore === null && topic.recallAfter === 100)).toBe(true);
+    expect(summary).toMatchObject({ answered: 3, waiting: 0, marks: 3, maxMarks: 3, unused: 9, breakMinutes: 10 });
+    expect(summary.topics.every(({ before, after }) => before === null && after !== null)).toBe(true);
     expect((await agent.post(`/api/sets/${set.id}/finish`).send({}).expect(200)).body).toEqual(finished.body);
     const next = await openSet(agent);
     expect(next.id).not.toBe(set.id);

@@ -63,6 +63,37 @@ describe('paging', () => {
     expect(rest.at(-1)?.number).toBe(added.number);
   });
 
+  test('refuses a cursor that was made up, whatever number it holds', async () => {
+    const id = '00000000-0000-4000-8000-000000000000';
+    const made = (sort: string, key: unknown) => Buffer.from(JSON.stringify([sort, key, id])).toString('base64url');
+    const keys = ['999999999999', '1.5', '2147483648', '-', '1e9', '', 5, null, '9'.repeat(19), "1'"];
+    const lists = [
+      ['/api/questions', questionSortSchema.options],
+      ['/api/item-statistics', ['number', 'answers', 'facility', 'seconds']],
+      ['/api/review-queue', ['sent']],
+    ] as const;
+    for (const [url, sorts] of lists) {
+      for (const sort of sorts) {
+        for (const key of keys) {
+          const query = {
+            cursor: made(sort, key),
+            ...(sorts.length > 1 && { sort, subjectId: department.subject.id }),
+          };
+          const response = await department.as.teacher.get(url).query(query);
+          if (response.status === 200) continue;
+          expect([url, sort, key, response.status]).toEqual([url, sort, key, 422]);
+          expect(response.body.errors[0].pointer).toBe('#/cursor');
+        }
+      }
+    }
+    for (const key of ['999999999999', '1.5']) {
+      await department.as.teacher
+        .get('/api/questions')
+        .query({ subjectId: department.subject.id, cursor: made('number', key) })
+        .expect(422);
+    }
+  });
+
   test('refuses a cursor that is not its own', async () => {
     const { nextCursor } = await list(department, { limit: 5 });
     for (const query of [{ cursor: 'x' }, { cursor: nextCursor ?? '', sort: 'marks' }, { cursor: 'WyJudW1iZXIiXQ' }]) {

@@ -79,6 +79,7 @@ describe('beginning a question', () => {
     for (const other of [
       { ...input, body: aNumberBody('Something else.') },
       { ...input, topicIds: [] },
+      { ...input, option: 'Set text A' },
     ]) {
       const refused = await department.as.teacher.post('/api/questions').send(other).expect(409);
       expect(problemSchema.parse(refused.body).type).toBe('/problems/duplicate');
@@ -110,6 +111,16 @@ describe('beginning a question', () => {
     }
   });
 
+  test('is for every student of the specification unless an option is named', async () => {
+    const draft = await step(department.as.teacher, '', aNewQuestion(department));
+    expect(draft.current.option).toBeNull();
+    for (const option of ['', ' ', 'x'.repeat(61), 3]) {
+      const input = { ...aNewQuestion(department), option };
+      const refused = await department.as.teacher.post('/api/questions').send(input).expect(422);
+      expect(problemSchema.parse(refused.body).errors?.map((error) => error.pointer)).toEqual(['#/option']);
+    }
+  });
+
   test('takes no topic of another subject', async () => {
     const other = await aTopic(department.school, await aSubject(department.school));
     for (const topicId of [other.id, randomUUID()]) {
@@ -138,11 +149,13 @@ describe('saving a draft', () => {
     const fields = aNewQuestion(department, {
       kind: 'recallCard',
       tier: 'higher',
+      option: ' Set text A ',
       topicIds: [second.id, department.topicId],
       body: aNumberBody('Find $x^2$ where $x = 3$.', 9),
     });
     const question = await step(department.as.teacher, `/${id}/draft`, saved(fields, 0), 'put');
     expect(question.current).toMatchObject({ revision: 1, kind: 'recallCard', tier: 'higher', body: fields.body });
+    expect(question.current.option).toBe('Set text A');
     expect(question.topics.map((topic) => topic.id)).toEqual([second.id, department.topicId]);
     const list = await department.as.teacher
       .get(`/api/questions?subjectId=${department.subject.id}&q=x%5E2`)

@@ -96,6 +96,29 @@ describe('putting live', () => {
     await department.as.head.post(`/api/questions/${id}/live`).send({ revision: 0 }).expect(403);
   });
 
+  test('is nobody’s who saved it last, either', async () => {
+    const input = aNewQuestion(department);
+    const { subjectId: _subject, id, ...fields } = input;
+    await step(department.as.teacher, '', input);
+    const body = aNumberBody('What the head makes of it.');
+    await step(department.as.head, `/${id}/draft`, { ...fields, body, revision: 0 }, 'put');
+    const sent = await step(department.as.head, `/${id}/send`, { revision: 1 });
+    expect(sent.current.author.id).toBe(department.teacher.id);
+    expect(sent.can).toMatchObject({ putLive: false, returnToAuthor: true });
+    for (const agent of [department.as.head, department.as.teacher]) {
+      await agent.post(`/api/questions/${id}/live`).send({ revision: 1 }).expect(403);
+    }
+    const queue = reviewPageSchema.parse((await department.as.head.get('/api/review-queue?limit=100')).body);
+    expect(queue.items.find((row) => row.questionId === id)?.isOwn).toBe(true);
+
+    // Taking it back is theirs, and names no reviewer; once the author has saved it, the head may review.
+    const back = await step(department.as.head, `/${id}/return`, { revision: 1, comment: 'Not yet.' });
+    expect(back.current).toMatchObject({ status: 'draft', reviewer: null });
+    await step(department.as.teacher, `/${id}/draft`, { ...fields, revision: 1 }, 'put');
+    await step(department.as.teacher, `/${id}/send`, { revision: 2 });
+    await step(department.as.head, `/${id}/live`, { revision: 2 });
+  });
+
   test('of two reviewers at once one is told that the other was quicker', async () => {
     const { id } = await aQuestionInReview();
     const results = await Promise.all(
@@ -164,7 +187,8 @@ describe('newer versions', () => {
     });
     expect(second.live?.id).toBe(first.current.id);
     expect(second.can).toMatchObject({ edit: true, startVersion: false });
-    await department.as.teacher.post(`/api/questions/${first.id}/versions`).send({}).expect(409);
+    const refused = await department.as.teacher.post(`/api/questions/${first.id}/versions`).send({}).expect(409);
+    expect(problemSchema.parse(refused.body).type).toBe('/problems/under-way');
 
     await step(department.as.colleague, `/${first.id}/send`, { revision: 0 });
     const live = await step(department.as.teacher, `/${first.id}/live`, { revision: 0 });
@@ -186,7 +210,25 @@ describe('newer versions', () => {
     await step(department.as.colleague, `/${id}/send`, { revision: 0 });
     const back = await step(department.as.head, `/${id}/live`, { revision: 0 });
     expect(back.live?.version).toBe(2);
-    expect(await step(department.as.head, `/${id}/retire`)).toMatchObject({ live: null, can: { startVersion: false } });
+    expect(await step(department.as.head, `/${id}/retire`)).toMatchObject({ live: null, can: { startVersion: true } });
+  });
+
+  test('a retired question comes back by way of a new version and its review', async () => {
+    const first = await aLiveQuestion(department, { tier: 'higher', option: 'Set text A' });
+    await step(department.as.head, `/${first.id}/retire`);
+    const second = await step(department.as.teacher, `/${first.id}/versions`);
+    expect(second.current).toMatchObject({
+      version: 2,
+      status: 'draft',
+      tier: 'higher',
+      option: 'Set text A',
+      body: first.current.body,
+    });
+    expect(second.topics).toEqual(first.topics);
+    expect(second.live).toBeNull();
+    await step(department.as.teacher, `/${first.id}/send`, { revision: 0 });
+    const back = await step(department.as.colleague, `/${first.id}/live`, { revision: 0 });
+    expect(back.versions.map(({ status }) => status)).toEqual(['live', 'retired']);
   });
 });
 

@@ -455,10 +455,12 @@ interface Broken {
   whole: RegExp;
 }
 
-/** Fails one request in two ways, reads the words, then lets it through and tries again. */
-async function failsInWords({ page }: Visitor, { path, api, title, whole }: Broken): Promise<string[]> {
+type Way = 'refused' | 'unreachable';
+
+/** Fails one request, reads the words, then lets it through and tries again. */
+async function failsInWords({ page }: Visitor, { path, api, title, whole }: Broken, ways: Way[]): Promise<string[]> {
   const faults: string[] = [];
-  for (const way of ['refused', 'unreachable']) {
+  for (const way of ways) {
     await page.route(api, (route) =>
       way === 'refused'
         ? route.fulfill({ status: 500, contentType: 'application/problem+json', body: BROKEN })
@@ -504,7 +506,9 @@ test('a request that fails is said in words, and trying again works', async () =
   ] as const) {
     const visitor = await signIn(person);
     const faults: string[] = [];
-    for (const broken of list) faults.push(...(await failsInWords(visitor, broken)));
+    for (const [index, broken] of list.entries()) {
+      faults.push(...(await failsInWords(visitor, broken, index === 0 ? ['refused', 'unreachable'] : ['refused'])));
+    }
     expect(faults).toEqual([]);
     await visitor.context.close();
   }
@@ -516,7 +520,13 @@ test('on a slow network a page shows that it is coming, and quick answers never 
     { person: student, path: '/today', api: '**/api/today', words: 'Loading this page', whole: today },
     { person: student, path: '/topics', api: '**/api/my-topics', words: 'Loading this page', whole: 'Topics' },
     { person: teacher, path: '/questions', api: '**/api/questions?*', words: 'Loading questions', whole: 'Questions' },
-    { person: teacher, path: '/review', api: '**/api/review-queue*', words: 'Loading questions to review', whole: 'Review' },
+    {
+      person: teacher,
+      path: '/review',
+      api: '**/api/review-queue*',
+      words: 'Loading questions to review',
+      whole: 'Review',
+    },
   ]) {
     const visitor = await signIn(person);
     const { page, look, expectNothing } = survey(visitor);

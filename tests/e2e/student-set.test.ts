@@ -169,7 +169,10 @@ test('the morning set asks the hardest first and closes after the question at fi
   const { page, troubles, context } = await signIn(study.student, { viewport: PHONE });
   await page.clock.install();
   await page.goto('/today');
-  await page.getByText(/hardest first/).first().waitFor();
+  await page
+    .getByText(/hardest first/)
+    .first()
+    .waitFor();
   await page.getByRole('link', { name: 'Start morning set' }).click();
   for (const [index, { stem }] of hardestFirst.entries()) {
     await heading(page, `Question ${index + 1} of 6`).waitFor();

@@ -10,7 +10,7 @@ const specs: fc.Arbitrary<AnswerSpec> = fc.oneof(
   fc.record({
     kind: fc.constant('number' as const),
     value: fc.double({ min: -1e9, max: 1e9, noNaN: true }),
-    unit: fc.option(fc.constantFrom('mol/dm³', 'm/s²', '£', '%', 'people'), { nil: undefined }),
+    unit: fc.option(fc.constantFrom('mol/dm³', 'm/s²', 'kJ', 'minutes', '°C', '£', '%', 'people'), { nil: undefined }),
   }),
   fc.record({
     kind: fc.constant('text' as const),
@@ -28,6 +28,10 @@ const answers = fc.oneof(
   fc.string({ unit: 'grapheme', maxLength: 60 }),
   fc.stringMatching(/^[\d ,./^x×*eE()£%−-]{0,30}$/u),
   fc.constantFrom('osmosis', 'Osmosis.', 'osmossis', '5 m/s^2', '1.2 mol dm-3', ''),
+  fc
+    .tuple(fc.double(), fc.constantFrom('kg ms^-2', 'KJ', 'Ns', 'm', 's', 'cms', '˚', '×', '% of g'))
+    .map((typed) => typed.join(' ')),
+  fc.constantFrom('×800', 'osmoiss', 'osmosis/diffusion', 'meiosis and mitosis'),
 );
 
 test('any answer gets a sentence, marks from 0 to the part’s own, and points that agree with them', () => {
@@ -87,6 +91,10 @@ test('the longest answers that try to be slow are marked', () => {
     '^',
     'm',
     'ms^-1 ',
+    'Tmin^9',
+    '×',
+    'word-',
+    'owrd ',
     '(',
     'é',
     '½',

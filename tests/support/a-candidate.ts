@@ -10,6 +10,7 @@ export const aCandidate = (given: Partial<Candidate> & { questionId: string }): 
   memory: null,
   lastWasBelowHalf: false,
   answeredToday: null,
+  isTaken: false,
   marks: 1,
   expectedSeconds: 45,
   topicWeight: 0.1,

@@ -75,7 +75,6 @@ export const EXPECTATIONS: Record<string, Expectation> = {
   'GET /today': { passes: { own: STUDENT } },
   'POST /sets': { request: () => ({ body: { kind: 'mixed' } }), passes: { own: STUDENT } },
   'GET /my-topics': { passes: { own: STUDENT } },
-  'GET /my-sittings': { passes: { own: STUDENT } },
   'GET /sets/:id': ownSet,
   'GET /sets/:id/summary': ownSet,
   'POST /sets/:id/answers': {
@@ -109,6 +108,7 @@ export const EXPECTATIONS: Record<string, Expectation> = {
         number: randomUUID().slice(0, 8),
         title: 'Ratio',
         tier: null,
+        option: null,
         weights: [],
       } satisfies CreateTopic,
     }),

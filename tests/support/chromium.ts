@@ -17,12 +17,12 @@ interface AxeRun {
   violations: { id: string; help: string; nodes: { html: string; failureSummary?: string }[] }[];
 }
 
-/** What axe finds on the page as it stands, for WCAG 2.2 A and AA. */
-export async function axe(page: Page): Promise<AxeFinding[]> {
+/** What axe finds on the page as it stands: for WCAG 2.2 A and AA, or for some rules alone. */
+export async function axe(page: Page, rules: string[] = AXE_TAGS): Promise<AxeFinding[]> {
   if (!(await page.evaluate(() => 'axe' in window))) await page.evaluate(axeSource);
   const run = await page.evaluate(
-    (tags) => (window as unknown as { axe: { run: (o: object) => Promise<AxeRun> } }).axe.run({ runOnly: tags }),
-    AXE_TAGS,
+    (only) => (window as unknown as { axe: { run: (o: object) => Promise<AxeRun> } }).axe.run({ runOnly: only }),
+    rules,
   );
   return run.violations.map(({ id, help, nodes }) => ({
     id,

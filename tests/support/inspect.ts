@@ -7,6 +7,8 @@ const LOOKS = [
   { colorScheme: 'dark', viewport: PHONE },
   { colorScheme: 'light', viewport: PHONE },
 ] as const;
+/** What differs between light and dark; the rest is the same page and is looked at once a width. */
+const COLOUR_RULES = ['color-contrast', 'link-in-text-block'];
 /** 400 % zoom of a 1280 window, where WCAG 1.4.10 asks for no sideways scrolling. */
 const NARROW = { width: 320, height: 568 };
 
@@ -15,10 +17,15 @@ const overhang = (page: Page): Promise<string | null> =>
   page.evaluate(() => {
     const { scrollWidth, clientWidth } = document.documentElement;
     if (scrollWidth <= clientWidth) return null;
-    const outside = [...document.body.querySelectorAll('*')].filter(
-      (element) => element.getBoundingClientRect().right > clientWidth + 1,
-    );
-    return `${scrollWidth} px on ${clientWidth}: ${outside.at(-1)?.outerHTML.slice(0, 200)}`;
+    const isClipped = (element: Element): boolean =>
+      element.parentElement !== null &&
+      (getComputedStyle(element.parentElement).overflowX !== 'visible' || isClipped(element.parentElement));
+    const outside = [...document.body.querySelectorAll('*')].filter((element) => {
+      const { left, right } = element.getBoundingClientRect();
+      return Math.max(right, left + element.scrollWidth) > clientWidth + 1 && !isClipped(element);
+    });
+    const words = outside.slice(-3).map((element) => element.outerHTML.slice(0, 120));
+    return `${scrollWidth} px on ${clientWidth}: ${words.join(' … ')}`;
   });
 
 /**
@@ -36,7 +43,8 @@ export async function inspect(page: Page, name: string): Promise<string[]> {
       for (const animation of document.getAnimations()) animation.finish();
     });
     const where = `${name}, ${look.colorScheme}, ${look.viewport.width}`;
-    for (const { id, nodes } of await axe(page)) faults.push(`${where}: ${id}: ${nodes.join(' | ').slice(0, 700)}`);
+    for (const { id, nodes } of await axe(page, look.colorScheme === 'dark' ? COLOUR_RULES : undefined))
+      faults.push(`${where}: ${id}: ${nodes.join(' | ').slice(0, 700)}`);
     const wide = await overhang(page);
     if (wide) faults.push(`${where}: scrolls sideways: ${wide}`);
   }

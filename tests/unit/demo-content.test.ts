@@ -77,10 +77,13 @@ const markedWrong = (part: PartContent): (string | null)[] =>
     return outcome === 'none' ? `“${typed}” is marked wrong: ${words}` : null;
   });
 
-/** Of a text worth several marks an unlisted answer may still earn some, so the marker must not settle it. */
+/**
+ * Of a text worth several marks an unlisted answer may earn some. The marker leaves it to the student whatever the
+ * scheme says, so the scheme should say so too; a rejected answer it does settle.
+ */
 const settledTextFault = (part: PartContent): string | null =>
   part.answer.kind === 'text' && partMarks(part) > 1 && (part.answer.unlisted === 'wrong' || part.answer.reject?.length)
-    ? `an unlisted answer gets 0 of ${partMarks(part)} marks: “${part.modelAnswer}”`
+    ? `of ${partMarks(part)} marks, yet rejects answers or calls unlisted ones wrong: “${part.modelAnswer}”`
     : null;
 
 const markdownOf = ({ stem, guidance, parts }: QuestionContent): string[] => [
@@ -176,16 +179,77 @@ describe('the demo bank', () => {
   });
 });
 
+const total = (marks: Iterable<number>): number => [...marks].reduce((sum, one) => sum + one, 0);
+
+describe('the content', () => {
+  test.each(SUBJECTS)('of $name weighs its papers whole', ({ papers, topics }) => {
+    for (const { number, marks } of papers) {
+      expect(total(topics.map(({ weights }) => weights[number] ?? 0))).toBe(marks);
+    }
+  });
+});
+
 describe('every specification of the demo', () => {
-  test.each(planSubjects().flatMap(({ specifications }) => specifications))(
-    '$name weighs its papers whole',
-    ({ papers, topics }) => {
-      for (const { number, marks } of papers) {
-        expect(topics.reduce((sum, { weights }) => sum + (weights[number] ?? 0), 0)).toBe(marks);
+  const specifications = planSubjects().flatMap((subject) => subject.specifications);
+
+  test.each(specifications)('$name weighs its papers whole', ({ papers, topics }) => {
+    const numbers = topics.map(({ number }) => number);
+    expect(new Set(numbers).size).toBe(numbers.length);
+    for (const { marks, weights } of papers) {
+      expect(total(weights.values())).toBe(marks);
+      for (const number of weights.keys()) expect(numbers).toContain(number);
+    }
+  });
+
+  test.each(specifications)(
+    '$name weighs a topic in papers of those who study it, and in no other',
+    (specification) => {
+      const { papers, topics } = specification;
+      for (const { number, tier, option } of topics) {
+        const weighing = papers.filter(({ weights }) => (weights.get(number) ?? 0) > 0);
+        expect(weighing.length).toBeGreaterThan(0);
+        for (const paper of weighing) {
+          if (tier) expect(paper.tier).toBe(tier);
+          if (option) expect(paper.option).toBe(option);
+        }
       }
-      const numbers = topics.map(({ number }) => number);
-      expect(new Set(numbers).size).toBe(numbers.length);
-      for (const { weights } of topics) expect(Object.values(weights).some((marks) => marks > 0)).toBe(true);
     },
   );
+
+  test('gives mathematics and the sciences each paper in two tiers', () => {
+    const tiered = planSubjects().filter(({ content }) => ['MA', 'BI', 'CH', 'PH'].includes(content.code));
+    for (const { content, specifications: own } of tiered) {
+      for (const { papers } of own) {
+        expect(papers.map(({ number, tier }) => `${number} ${tier}`)).toEqual(
+          content.papers.flatMap(({ number }) => [`${number} foundation`, `${number} higher`]),
+        );
+      }
+      for (const paper of own[0].papers.filter(({ tier }) => tier === 'higher')) {
+        const written = content.topics.map(({ weights }) => Object.entries(weights));
+        const inPaper = written.flat().filter(([number]) => Number(number) === paper.number);
+        expect([...paper.weights.values()]).toEqual(inPaper.map(([, marks]) => marks));
+      }
+    }
+    expect(specifications.filter(({ papers }) => papers.some(({ tier }) => tier))).toHaveLength(7);
+  });
+
+  test('spreads the marks of Higher topics over the others of a Foundation paper', () => {
+    const foundation = specifications
+      .find(({ name }) => name === 'GCSE Mathematics')
+      ?.papers.filter(({ tier }) => tier === 'foundation');
+    // Paper 1: 68 marks without surds, spread over 80; 14, 12, 20, 12 and 10 come to 16.47, 14.12, 23.53, 14.12, 11.76.
+    expect([...(foundation?.[0]?.weights ?? [])]).toEqual([
+      ['1', 16],
+      ['2', 14],
+      ['4', 24],
+      ['6', 14],
+      ['8', 12],
+    ]);
+    // Paper 2: 52 without quadratics and vectors; 10, 22 and 20 come to 15.38, 33.85 and 30.77.
+    expect([...(foundation?.[1]?.weights ?? [])]).toEqual([
+      ['6', 15],
+      ['7', 34],
+      ['11', 31],
+    ]);
+  });
 });

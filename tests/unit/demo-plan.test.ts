@@ -1,6 +1,8 @@
 import { describe, expect, test } from 'vitest';
 import { demoList } from '#seeds/demo/demo-people.ts';
+import { HISTORY_OPTIONS } from '#seeds/demo/history-options.ts';
 import { STUDENT_NAMES, usernameFor } from '#seeds/demo/names.ts';
+import { isFor } from '#seeds/demo/papers.ts';
 import { allBankRows, planDemo, planPractice, studyRows } from '#seeds/demo/plan.ts';
 import { markPart } from '#shared/domain/marking/mark-part.ts';
 import { foldLog } from '#shared/domain/schedule/fold.ts';
@@ -39,7 +41,7 @@ describe('the demo school', () => {
 
   test('lets two mathematics classes of 28 practise', () => {
     expect(new Set(practice.sets.map(({ user_id }) => user_id)).size).toBe(56);
-    expect(practice.answers.length).toBeGreaterThan(25_000);
+    expect(practice.answers.length).toBeGreaterThan(22_000);
     expect(practice.answers.length).toBeLessThan(40_000);
   });
 
@@ -54,22 +56,82 @@ describe('the demo school', () => {
       for (const student of plan.students) {
         const papers = classes
           .filter(({ students }) => students.some(({ id }) => id === student.id))
-          .flatMap(({ specification }) => specification.papers.map(({ id }) => id));
+          .flatMap(({ specification, entry }) => specification.papers.filter(isFor(entry)).map(({ id }) => id));
         const times = sittings
           .filter(({ paperId }) => papers.includes(paperId))
           .map(({ on, startsAt }) => on + startsAt);
+        expect(times).toHaveLength(papers.length);
         expect(new Set(times).size).toBe(times.length);
       }
     }
   });
 
   test('has taught all but the last topics, on school days gone by', () => {
-    for (const { taught, specification } of plan.classes) {
+    for (const { taught, specification, entry } of plan.classes) {
       for (const day of taught.values())
         expect(day < TODAY && weekday(day) < 5 && daysBetween(day, TODAY) <= 470).toBe(true);
-      expect(taught.size).toBeLessThan(specification.topics.length);
-      expect(taught.size).toBeGreaterThanOrEqual(specification.topics.length - 5);
+      const followed = specification.topics.filter(isFor(entry));
+      expect([...taught.keys()]).toEqual(followed.slice(0, taught.size).map(({ id }) => id));
+      expect(followed.length - taught.size).toBeGreaterThanOrEqual(1);
+      expect(followed.length - taught.size).toBeLessThanOrEqual(2);
     }
+  });
+
+  test('sits both tiers and both options of a paper at one time', () => {
+    for (const { sittings } of plan.seasons) {
+      const timeOf = new Map(sittings.map(({ paperId, on, startsAt }) => [paperId, on + startsAt]));
+      for (const { specifications } of plan.subjects) {
+        for (const { papers } of specifications) {
+          const times = papers.map(({ id, number }) => `${number} ${timeOf.get(id)}`);
+          expect(new Set(times).size).toBe(new Set(papers.map(({ number }) => number)).size);
+        }
+      }
+    }
+  });
+
+  test('enters every student for a tier where there are two, and for one option of history', () => {
+    const entries = new Map(plan.classes.map(({ id, entry }) => [id, entry]));
+    for (const { class_id, tier, option } of study.enrolments ?? []) {
+      expect({ tier, option }).toEqual(entries.get(class_id ?? ''));
+    }
+    for (const { subjectCode, entry, specification } of plan.classes) {
+      expect(entry.tier !== null).toBe(specification.papers.some(({ tier }) => tier));
+      expect(entry.option !== null).toBe(subjectCode === 'HI');
+    }
+    const options = plan.classes.flatMap(({ entry }) => entry.option ?? []);
+    expect([...new Set(options)].sort()).toEqual([...HISTORY_OPTIONS].sort());
+  });
+
+  test('puts topics, papers and questions of history under its options', () => {
+    const topics = new Map(study.topics?.map(({ id, option }) => [id, option]));
+    const options = new Set([...topics.values(), ...(study.papers ?? []).map(({ option }) => option)]);
+    expect(options).toEqual(new Set([null, ...HISTORY_OPTIONS]));
+    const versions = new Map(bank.question_versions?.map(({ id, option }) => [id, option]));
+    for (const { question_version_id, topic_id } of bank.question_topics ?? []) {
+      expect(versions.get(question_version_id)).toBe(topics.get(topic_id));
+    }
+    expect(new Set(bank.question_topics?.map((row) => row.question_version_id)).size).toBe(versions.size);
+  });
+
+  test('practises nothing that a student is not entered for', () => {
+    const entered = new Map(
+      plan.students.map((student) => {
+        const own = plan.classes.filter(({ students }) => students.includes(student));
+        return [student.id, own.flatMap(({ specification, entry }) => specification.topics.filter(isFor(entry)))];
+      }),
+    );
+    const topicIds = new Map([...entered].map(([id, topics]) => [id, new Set(topics.map((topic) => topic.id))]));
+    const papers = new Map(study.papers?.map((paper) => [paper.id, paper]));
+    const options = new Map<string, Set<string>>();
+    const owners = new Map(practice.sets.map(({ id, user_id }) => [id, user_id ?? '']));
+    for (const { set_id, topic_id, reason } of practice.set_items) {
+      const owner = owners.get(set_id) ?? '';
+      expect(topicIds.get(owner)?.has(topic_id ?? '')).toBe(true);
+      const parsed = reasonSchema.parse(reason);
+      const option = 'paperId' in parsed && papers.get(parsed.paperId)?.option;
+      if (option) options.set(owner, (options.get(owner) ?? new Set()).add(option));
+    }
+    for (const met of options.values()) expect(met.size).toBe(1);
   });
 
   test('has questions in draft, in review and live, none put live by its author', () => {

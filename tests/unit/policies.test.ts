@@ -6,7 +6,7 @@ import { classPolicy } from '#server/policies/class-policy.ts';
 import { practicePolicy } from '#server/policies/practice-policy.ts';
 import { type QuestionFacts, questionPolicy } from '#server/policies/question-policy.ts';
 import { schoolPolicy } from '#server/policies/school-policy.ts';
-import { studentPolicy } from '#server/policies/student-policy.ts';
+import { type AnswerFacts, type StudentFacts, studentPolicy } from '#server/policies/student-policy.ts';
 import { subjectPolicy } from '#server/policies/subject-policy.ts';
 import type { Role } from '#shared/schemas/role.ts';
 
@@ -45,6 +45,16 @@ const holdings = {
   otherHeadOfYear: { as: [['headOfYear', { yearGroupId: 'year 10' }]] },
   tutor: { as: [['tutor', { tutorGroupId: '11K' }]] },
   otherTutor: { as: [['tutor', { tutorGroupId: '11L' }]] },
+  // Teaches her French, and once taught her maths: the class is left over.
+  frenchTeacher: { as: [['teacher', french]], classIds: ['french 1', 'maths 1'] },
+  // Leads French, teaches maths to others.
+  headElsewhere: {
+    as: [
+      ['headOfDepartment', french],
+      ['teacher', maths],
+    ],
+    classIds: ['maths 2'],
+  },
   senco: { as: [['senco']] },
   admin: { as: [['schoolAdmin']] },
   nobody: {},
@@ -58,30 +68,36 @@ type Person = keyof typeof holdings;
 const people = Object.keys(holdings) as Person[];
 const actor = (person: Person): Actor => anActor(person, holdings[person] as Holds);
 
-const inMaths: Person[] = ['teacher', 'colleague', 'head'];
+const inMaths: Person[] = ['teacher', 'colleague', 'head', 'headElsewhere'];
 
 const tamsin = {
   userId: 'tamsin',
   yearGroupId: 'year 11',
   tutorGroupId: '11K',
-  classIds: ['maths 1'],
-  subjectIds: ['maths'],
+  classIds: ['maths 1', 'french 1'],
+  subjectIds: ['maths', 'french'],
 };
+const mathsAnswer = { userId: 'tamsin', subjectId: 'maths', classIds: ['maths 1'] };
+const frenchAnswer = { userId: 'tamsin', subjectId: 'french', classIds: ['french 1'] };
 const question = (facts: Partial<QuestionFacts>): QuestionFacts => ({
   ...maths,
   authorId: 'teacher',
   workingAuthorId: null,
+  workingEditorId: null,
   workingStatus: null,
   isLive: false,
   isRetired: false,
   ...facts,
 });
-const draft = question({ workingAuthorId: 'teacher', workingStatus: 'draft' });
-const inReview = question({ workingAuthorId: 'teacher', workingStatus: 'inReview' });
-const headsOwn = question({ authorId: 'head', workingAuthorId: 'head', workingStatus: 'inReview' });
+const by = (userId: string) => ({ workingAuthorId: userId, workingEditorId: userId });
+const draft = question({ ...by('teacher'), workingStatus: 'draft' });
+const inReview = question({ ...by('teacher'), workingStatus: 'inReview' });
+const headsEdit = question({ ...by('teacher'), workingEditorId: 'head', workingStatus: 'inReview' });
+const headsOwn = question({ authorId: 'head', ...by('head'), workingStatus: 'inReview' });
 const live = question({ isLive: true });
-const liveWithDraft = question({ isLive: true, workingAuthorId: 'colleague', workingStatus: 'draft' });
+const liveWithDraft = question({ isLive: true, ...by('colleague'), workingStatus: 'draft' });
 const retired = question({ isRetired: true });
+const retiredWithDraft = question({ isRetired: true, ...by('colleague'), workingStatus: 'draft' });
 
 interface Row {
   noun: string;
@@ -101,28 +117,49 @@ const rowsOf =
       who,
     }));
 
-const ofStudent = rowsOf('student', studentPolicy);
+const { readAnswers, markAnswers, readAccessArrangements, ...ofWhole } = studentPolicy;
+const ofStudent = rowsOf<keyof typeof ofWhole, StudentFacts>('student', ofWhole);
+const ofAnswer = rowsOf<'readAnswers' | 'markAnswers', AnswerFacts>('student', { readAnswers, markAnswers });
+const ofArrangements = rowsOf('student', { readAccessArrangements });
 const ofPractice = rowsOf('practice', practicePolicy);
 const ofSubject = rowsOf('subject', subjectPolicy);
 const ofClass = rowsOf('class', classPolicy);
 const ofQuestion = rowsOf('question', questionPolicy);
 const ofSchool = rowsOf('school', schoolPolicy);
 
+const seesStanding: Person[] = [
+  'tamsin',
+  'carer',
+  'teacher',
+  'frenchTeacher',
+  'head',
+  'otherHead',
+  'headElsewhere',
+  'headOfYear',
+  'teacherAndCarer',
+];
+
 /** Who may do what; everybody not named may not. */
 const table: Row[] = [
   ...ofStudent('Tamsin', tamsin, {
     practise: ['tamsin'],
-    readAnswers: ['tamsin', 'teacher', 'head'],
-    readStanding: ['tamsin', 'carer', 'teacher', 'head', 'headOfYear', 'tutor', 'teacherAndCarer'],
-    markAnswers: ['teacher', 'head'],
+    readStanding: [...seesStanding, 'tutor'],
     messageCarers: ['headOfYear'],
-    readAccessArrangements: ['tamsin', 'senco'],
+  }),
+  ...ofArrangements('Tamsin', { userId: 'tamsin' }, { readAccessArrangements: ['tamsin', 'senco'] }),
+  ...ofAnswer('her maths', mathsAnswer, {
+    readAnswers: ['tamsin', 'teacher', 'head'],
+    markAnswers: ['teacher', 'head'],
+  }),
+  ...ofAnswer('her French', frenchAnswer, {
+    readAnswers: ['tamsin', 'otherHead', 'frenchTeacher', 'headElsewhere'],
+    markAnswers: ['otherHead', 'frenchTeacher', 'headElsewhere'],
   }),
   ...ofStudent(
     'a student without a tutor group',
     { ...tamsin, tutorGroupId: null },
     {
-      readStanding: ['tamsin', 'carer', 'teacher', 'head', 'headOfYear', 'teacherAndCarer'],
+      readStanding: seesStanding,
     },
   ),
   ...ofPractice('Tamsin’s', { userId: 'tamsin' }, { read: ['tamsin'], practise: ['tamsin'] }),
@@ -135,7 +172,6 @@ const table: Row[] = [
     manageTopics: ['head'],
   }),
   ...ofClass('set 1', { classId: 'maths 1', ...maths }, { read: inMaths, setTaught: ['teacher', 'head'] }),
-  ...ofQuestion('new in maths', draft, { create: inMaths, read: inMaths }),
   ...ofQuestion('the teacher’s draft', draft, {
     read: inMaths,
     edit: ['teacher', 'head'],
@@ -151,14 +187,20 @@ const table: Row[] = [
     edit: [],
     send: [],
     discardDraft: [],
-    putLive: ['colleague', 'head'],
+    putLive: ['colleague', 'head', 'headElsewhere'],
     returnToAuthor: inMaths,
     startVersion: [],
     retire: [],
   }),
+  // Who saved it last has written in it: nobody approves their own, by way of editing either.
+  ...ofQuestion('the teacher’s, edited by the head, in review', headsEdit, {
+    read: inMaths,
+    putLive: ['colleague', 'headElsewhere'],
+    returnToAuthor: inMaths,
+  }),
   ...ofQuestion('the head’s own, in review', headsOwn, {
     read: inMaths,
-    putLive: ['teacher', 'colleague'],
+    putLive: ['teacher', 'colleague', 'headElsewhere'],
     returnToAuthor: inMaths,
   }),
   ...ofQuestion('the teacher’s, live', live, {
@@ -174,7 +216,8 @@ const table: Row[] = [
     startVersion: [],
     retire: ['teacher', 'head'],
   }),
-  ...ofQuestion('retired', retired, { read: inMaths, edit: [], putLive: [], startVersion: [], retire: [] }),
+  ...ofQuestion('retired', retired, { read: inMaths, edit: [], putLive: [], startVersion: inMaths, retire: [] }),
+  ...ofQuestion('retired, with a draft', retiredWithDraft, { read: inMaths, startVersion: [], retire: [] }),
   ...ofSchool(
     'ours',
     {},
@@ -213,7 +256,7 @@ test('whatever may be done to a thing, whoever may do it may read it', () => {
   // With a class left over from a subject they no longer teach, too.
   const actors = [...people.map(actor), anActor('left over', { as: [['teacher', french]], classIds: ['maths 1'] })];
   const readers = table.filter((row) => row.action === 'read');
-  for (const row of table.filter(({ action }) => action !== 'create')) {
+  for (const row of table) {
     const reader = readers.find(({ noun, given }) => noun === row.noun && given === row.given);
     const blind = actors.filter((person) => reader && row.allows(person) && !reader.allows(person));
     expect(blind, `${row.noun}: ${row.action}`).toEqual([]);
@@ -229,14 +272,18 @@ describe('a refusal', () => {
       return error instanceof Problem ? error.status : -1;
     }
   };
-  test.each<[Person, 'edit' | 'read' | 'create', number | null]>([
+  test.each<[Person, 'edit' | 'read', number | null]>([
     ['teacher', 'edit', null],
     ['colleague', 'edit', 403],
     ['otherTeacher', 'edit', 404],
     ['tamsin', 'read', 404],
-    // Making a thing reads nothing: there is nothing to hide.
-    ['otherTeacher', 'create', 403],
   ])('%s, %s: %s', (person, action, status) => {
     expect(refusal(() => authorize(questionPolicy, action, actor(person), draft))).toBe(status);
+  });
+
+  test('of an action whose facts are fewer needs no more than those', () => {
+    const ask = (person: Person) =>
+      refusal(() => authorize(studentPolicy, 'readAccessArrangements', actor(person), { userId: 'tamsin' }));
+    expect([ask('tamsin'), ask('senco'), ask('teacher')]).toEqual([null, null, 403]);
   });
 });

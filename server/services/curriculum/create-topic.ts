@@ -22,7 +22,9 @@ const isSame = (stored: Topic, input: CreateTopic): boolean =>
   stored.specificationId === input.specificationId &&
   stored.number === input.number &&
   stored.title === input.title &&
-  stored.parentId === input.parentId;
+  stored.parentId === input.parentId &&
+  stored.tier === input.tier &&
+  stored.option === input.option;
 
 function faultsOf({ number, parentId, weights }: CreateTopic, { topics, paperIds }: Place): FieldError[] {
   const faults: FieldError[] = [];
@@ -65,7 +67,7 @@ async function present({ actor }: Scope, subjectId: string, id: string): Promise
  */
 export async function createTopic(scope: Scope, subjectId: string, input: CreateTopic): Promise<TopicDto> {
   const { actor } = scope;
-  const { id, specificationId, parentId, number, title, tier, weights } = input;
+  const { id, specificationId, parentId, number, title, tier, option, weights } = input;
   authorize(subjectPolicy, 'manageTopics', actor, { subjectId });
   // One at a time within a specification: numbers are unique there, and the order has no doubles.
   const lock = Transaction.LOCK.NO_KEY_UPDATE;
@@ -83,7 +85,7 @@ export async function createTopic(scope: Scope, subjectId: string, input: Create
   if (faults.length > 0) throw unprocessable(faults);
 
   const position = await makeRoom(specificationId, number, topics);
-  await Topic.create({ id, specificationId, parentId, number, title, tier, position });
+  await Topic.create({ id, specificationId, parentId, number, title, tier, option, position });
   await execute(
     `INSERT INTO topic_weights (school_id, id, topic_id, paper_id, marks)
      SELECT app.current_school(), gen_random_uuid(), $1, w.paper_id, w.marks

@@ -8,32 +8,43 @@ import { passwordFault } from './password-rule.ts';
 import { hashPassword, verifyPassword } from './passwords.ts';
 import { rolesOf } from './sign-in.ts';
 
+/** Counts a try at an account's password as signing in counts it; `verify` answers null for a wrong one. */
+export type CountTry = <T>(schoolCode: string, name: string, verify: () => Promise<T | null>) => Promise<T | null>;
+
 interface Found {
   name: string;
   username: string;
   password_hash: string | null;
   school: string;
+  school_code: string;
   subjects: string[];
 }
 
 /**
- * Changes one's own password, the present one given. Hashing stays outside the transaction.
- * @throws Problem 422 at `current` or `next`
+ * Changes one's own password, the present one given: guessing it is slowed as at the sign-in page. Hashing stays
+ * outside the transaction. @throws Problem 422 at `current` or `next`; 429
  */
 export async function changePassword(
   user: { userId: string; schoolId: string },
   { current, next }: ChangePassword,
+  countTry: CountTry,
   requestId?: string,
 ): Promise<void> {
   const [found] = await withSchool(user.schoolId, () =>
     select<Found>(
-      `SELECT u.name, u.username, u.password_hash, s.name AS school, ARRAY(SELECT name FROM subjects) AS subjects
+      `SELECT u.name, u.username, u.password_hash, s.name AS school, s.code AS school_code,
+         ARRAY(SELECT name FROM subjects) AS subjects
        FROM users u, schools s WHERE u.id = $1 AND u.disabled_at IS NULL`,
       [user.userId],
     ),
   );
   if (!found) throw notSignedIn();
-  if (!(await verifyPassword(found.password_hash, current))) {
+  const matches = await countTry(found.school_code, found.username, async () =>
+    (await verifyPassword(found.password_hash, current)) ? true : null,
+  );
+  if (!matches) {
+    const refused = () => recordAudit(user, 'change-password', 'user', user.userId, 'refused');
+    await withSchool(user.schoolId, refused, { requestId });
     throw unprocessable([{ pointer: '#/current', detail: 'That is not your password.' }]);
   }
   const roles = await rolesOf(user.schoolId, user.userId);

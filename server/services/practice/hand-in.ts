@@ -8,7 +8,7 @@ import { localDate } from '#shared/domain/time/zone.ts';
 import type { MarkedPart } from '#shared/schemas/marked-part.ts';
 import type { AnswerResultDto, HandIn } from '#shared/schemas/practice.ts';
 import { bodyMarks } from '#shared/schemas/question-body.ts';
-import { findSet } from './find-set.ts';
+import { changeSet } from './find-set.ts';
 import { loadResults, machineStandings } from './load-results.ts';
 import { type LoadedItem, loadSetItem } from './load-set-items.ts';
 import { rebuildMemory } from './rebuild-memory.ts';
@@ -67,7 +67,7 @@ async function markAtOnce(scope: Scope, item: LoadedItem, answerId: string, resp
  * @throws Problem 404, 409, 422
  */
 export async function handIn(scope: Scope, setId: string, sent: HandIn): Promise<AnswerResultDto> {
-  const set = await findSet(scope, setId, true);
+  const set = await changeSet(scope, setId);
   const item = await loadSetItem(setId, sent.setItemId);
   if (!item) throw notFound();
   if (sent.responses.length !== item.body.parts.length) {

@@ -2,9 +2,11 @@ import { select } from '#server/db/scope.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
 import { daysBetween } from '#shared/domain/time/calendar.ts';
 import type { SittingDto } from '#shared/schemas/curriculum.ts';
+import { STUDY } from './study-sql.ts';
 
 interface Row {
   id: string;
+  paper_id: string;
   subject_id: string;
   subject_code: string;
   subject_name: string;
@@ -14,44 +16,54 @@ interface Row {
   sat_on: string;
   starts_at: string;
   minutes: number;
-  extra_percent: number | null;
   source: string;
 }
 
 /** Most sittings one student can have ahead in a year, many times over. */
 const MOST = 200;
 
-/**
- * The acting student's sittings still to start, soonest first, each with the time they personally have. Their own
- * access arrangement is read here and shown only as their own minutes.
- */
-export async function listSittings({ actor, today, now }: Scope): Promise<SittingDto[]> {
+interface Arrangement {
+  extra_time_percent: number;
+  has_rest_breaks: boolean;
+}
+
+/** One's own access arrangement; nobody else's can be asked for here. */
+async function ownArrangement({ actor }: Scope): Promise<Arrangement | undefined> {
+  const rows = await select<Arrangement>(
+    'SELECT extra_time_percent, has_rest_breaks FROM access_arrangements WHERE user_id = $1',
+    [actor.userId],
+  );
+  return rows[0];
+}
+
+/** The acting student's sittings still to start, soonest first, each with the time they personally have. */
+export async function listSittings(scope: Scope): Promise<SittingDto[]> {
+  const { actor, today, now } = scope;
   const rows = await select<Row>(
-    `SELECT s.id, sub.id AS subject_id, sub.code AS subject_code, sub.name AS subject_name, sub.strand,
-       p.title AS paper_title, season.name AS season, to_char(s.sat_on, 'YYYY-MM-DD') AS sat_on,
-       to_char(s.starts_at, 'HH24:MI') AS starts_at, p.minutes, aa.extra_time_percent AS extra_percent, s.source
-     FROM enrolments e
-     JOIN classes c ON c.id = e.class_id
-     JOIN papers p ON p.specification_id = c.specification_id
-       AND (p.tier IS NULL OR p.tier = e.tier) AND (p.option IS NULL OR p.option = e.option)
-     JOIN sittings s ON s.paper_id = p.id
+    `WITH ${STUDY}
+     SELECT s.id, paper.id AS paper_id, sub.id AS subject_id, sub.code AS subject_code, sub.name AS subject_name,
+       sub.strand, paper.title AS paper_title, season.name AS season, to_char(s.sat_on, 'YYYY-MM-DD') AS sat_on,
+       to_char(s.starts_at, 'HH24:MI') AS starts_at, paper.minutes, s.source
+     FROM paper
+     JOIN sittings s ON s.paper_id = paper.id
      JOIN seasons season ON season.id = s.season_id
-     JOIN subjects sub ON sub.id = c.subject_id
-     LEFT JOIN access_arrangements aa ON aa.user_id = e.user_id
-     WHERE e.user_id = $1 AND e.valid_from <= $2 AND (e.valid_to IS NULL OR e.valid_to >= $2)
-       AND (s.sat_on + s.starts_at) AT TIME ZONE s.zone > $3
+     JOIN subjects sub ON sub.id = paper.subject_id
+     WHERE (s.sat_on + s.starts_at) AT TIME ZONE s.zone > $3
      ORDER BY s.sat_on, s.starts_at, sub.position, s.id
      LIMIT ${MOST}`,
     [actor.userId, today, now],
   );
+  const arrangement = await ownArrangement(scope);
   return rows.map((row) => ({
     id: row.id,
+    paperId: row.paper_id,
     subject: { id: row.subject_id, code: row.subject_code, name: row.subject_name, strand: row.strand },
     paperTitle: row.paper_title,
     season: row.season,
     on: row.sat_on,
     startsAt: row.starts_at,
-    minutes: Math.round(row.minutes * (1 + (row.extra_percent ?? 0) / 100)),
+    minutes: Math.round(row.minutes * (1 + (arrangement?.extra_time_percent ?? 0) / 100)),
+    hasRestBreaks: arrangement?.has_rest_breaks ?? false,
     daysAway: daysBetween(today, row.sat_on),
     source: row.source,
   }));

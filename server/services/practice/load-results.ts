@@ -8,28 +8,25 @@ import type { MarkedPart } from '#shared/schemas/marked-part.ts';
 import type { AnswerResultDto } from '#shared/schemas/practice.ts';
 import type { QuestionBody } from '#shared/schemas/question-body.ts';
 import type { LoadedItem } from './load-set-items.ts';
+import { MEMORY_COLUMNS, type MemoryRow, memoryOf } from './memory-row.ts';
 import { loadNextPapers } from './next-papers.ts';
 import { loadPaperTitles, loadTopics, need } from './study-facts.ts';
+import { NEWEST_MARK } from './study-sql.ts';
 
-interface AnswerRow {
+interface AnswerRow extends MemoryRow {
   id: string;
   set_item_id: string;
   how_sure: HowSure;
   responses: string[];
   marked_parts: MarkedPart[] | null;
   marks: number | null;
-  stability: number | null;
-  difficulty: number | null;
-  last_on: string | null;
 }
 
 const loadAnswers = (itemIds: readonly string[]) =>
   select<AnswerRow>(
     `SELECT a.id, a.set_item_id, a.how_sure, a.responses, m.parts AS marked_parts, m.marks,
-       ms.stability, ms.difficulty, to_char(ms.last_on, 'YYYY-MM-DD') AS last_on
-     FROM answers a
-     LEFT JOIN LATERAL (SELECT e.parts, e.marks FROM mark_events e WHERE e.answer_id = a.id
-                        ORDER BY e.sequence DESC LIMIT 1) m ON true
+       ${MEMORY_COLUMNS}
+     FROM answers a ${NEWEST_MARK}
      LEFT JOIN memory_states ms ON ms.user_id = a.user_id AND ms.question_id = a.question_id
      WHERE a.set_item_id = ANY($1)`,
     [itemIds],
@@ -74,10 +71,7 @@ export async function loadResults(
       const item = need(byItem, answer.set_item_id);
       const paper = papers.get(item.topic_id) ?? null;
       const [reasonPaper] = reasonPaperId(item);
-      const memory =
-        answer.stability === null || answer.difficulty === null || answer.last_on === null
-          ? null
-          : { stability: answer.stability, difficulty: answer.difficulty, lastOn: answer.last_on };
+      const memory = memoryOf(answer);
       const result = presentResult({
         answerId: answer.id,
         setItemId: item.id,

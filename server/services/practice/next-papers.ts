@@ -1,5 +1,6 @@
 import { select } from '#server/db/scope.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
+import { STUDY } from './study-sql.ts';
 
 export interface NextPaper {
   id: string;
@@ -18,19 +19,11 @@ export async function loadNextPapers(
   topicIds: Iterable<string>,
 ): Promise<Map<string, NextPaper>> {
   const rows = await select<Row>(
-    `SELECT DISTINCT ON (t.id) t.id AS topic_id, p.id, sub.name || ' ' || p.title AS title,
-       to_char(s.sat_on, 'YYYY-MM-DD') AS on
-     FROM enrolments e
-     JOIN classes c ON c.id = e.class_id
-     JOIN subjects sub ON sub.id = c.subject_id
-     JOIN topics t ON t.specification_id = c.specification_id
-     JOIN topic_weights w ON w.topic_id = t.id
-     JOIN papers p ON p.id = w.paper_id
-       AND (p.tier IS NULL OR p.tier = e.tier) AND (p.option IS NULL OR p.option = e.option)
-     JOIN sittings s ON s.paper_id = p.id
-     WHERE e.user_id = $1 AND t.id = ANY($4) AND e.valid_from <= $2 AND (e.valid_to IS NULL OR e.valid_to >= $2)
-       AND (s.sat_on + s.starts_at) AT TIME ZONE s.zone > $3
-     ORDER BY t.id, s.sat_on, p.id`,
+    `WITH ${STUDY}
+     SELECT topic.id AS topic_id, paper.id, sub.name || ' ' || paper.title AS title,
+       to_char(topic.exam_on, 'YYYY-MM-DD') AS on
+     FROM topic JOIN paper ON paper.id = topic.paper_id JOIN subjects sub ON sub.id = topic.subject_id
+     WHERE topic.id = ANY($4)`,
     [actor.userId, today, now, [...new Set(topicIds)]],
   );
   return new Map(rows.map(({ topic_id: topicId, id, title, on }) => [topicId, { id, title, on }]));

@@ -1,5 +1,4 @@
 import { randomUUID } from 'node:crypto';
-import { execute } from '#server/db/scope.ts';
 import { Problem } from '#server/errors.ts';
 import { PracticeSet } from '#server/models/practice-set.ts';
 import { SetItem } from '#server/models/set-item.ts';
@@ -11,9 +10,7 @@ import { type LoadedCandidate, loadCandidates } from './load-candidates.ts';
 import { BUDGET_SECONDS, loadConfusable, proposeSet } from './propose-set.ts';
 import { presentSet } from './show-set.ts';
 import { need } from './study-facts.ts';
-
-/** One opening at a time for a student: a second tab waits here, then finds the set that the first one made. */
-const waitForTurn = (userId: string) => execute('SELECT id FROM users WHERE id = $1 FOR NO KEY UPDATE', [userId]);
+import { takeTurn } from './take-turn.ts';
 
 async function createSet(scope: Scope, kind: SetKind): Promise<PracticeSet> {
   const candidates = await loadCandidates(scope);
@@ -51,7 +48,7 @@ async function createSet(scope: Scope, kind: SetKind): Promise<PracticeSet> {
  */
 export async function openSet(scope: Scope, kind: SetKind): Promise<SetDto> {
   authorize(practicePolicy, 'practise', scope.actor, { userId: scope.actor.userId });
-  await waitForTurn(scope.actor.userId);
+  await takeTurn(scope.actor.userId);
   const open = await PracticeSet.findOne({ where: { userId: scope.actor.userId, kind, finishedAt: null } });
   if (open && open.setOn === scope.today) return presentSet(scope, open);
   if (open) await open.update({ finishedAt: scope.now });

@@ -15,7 +15,7 @@ export async function loadConfusable(): Promise<[string, string][]> {
   return rows.map((row) => [row.topic_id, row.other_topic_id]);
 }
 
-/** The set that would be opened now. The same facts give the same set. */
+/** The set that would be opened now, without what waits in a set of the other kind. The same facts give the same set. */
 export const proposeSet = (
   { today, school }: Pick<Scope, 'today' | 'school'>,
   kind: SetKind,
@@ -23,7 +23,10 @@ export const proposeSet = (
   confusable: readonly [string, string][],
 ): BuiltItem[] =>
   buildSet({
-    candidates,
+    candidates: candidates.map((candidate) => ({
+      ...candidate,
+      isTaken: candidate.waitsIn !== null && candidate.waitsIn !== kind,
+    })),
     today,
     budgetSeconds: BUDGET_SECONDS[kind],
     maxSubjects: school.subjectsPerSet,

@@ -2,6 +2,7 @@ import { execute, select } from '#server/db/scope.ts';
 import { foldLog } from '#shared/domain/schedule/fold.ts';
 import { gradeOf } from '#shared/domain/schedule/grade.ts';
 import type { HowSure } from '#shared/schemas/how-sure.ts';
+import { NEWEST_MARK } from './study-sql.ts';
 
 /** One answer with its newest mark, as the logs hold them. */
 export interface LoggedAnswer {
@@ -26,16 +27,13 @@ export interface FoldedState {
   lastShare: number;
 }
 
-/** The answer log of a student for some questions, each answer with its newest mark event. */
-export const loadLog = (userId: string, questionIds: readonly string[]): Promise<LoggedAnswer[]> =>
+/** The answer log of a student, of some questions or of all, each answer with its newest mark event. */
+export const loadLog = (userId: string, questionIds: readonly string[] | null): Promise<LoggedAnswer[]> =>
   select<LoggedAnswer>(
     `SELECT a.id, a.user_id, a.question_id, i.set_id, a.given_at, to_char(a.given_on, 'YYYY-MM-DD') AS given_on,
        a.how_sure, m.marks, m.max_marks
-     FROM answers a
-     JOIN set_items i ON i.id = a.set_item_id
-     LEFT JOIN LATERAL (SELECT e.marks, e.max_marks FROM mark_events e WHERE e.answer_id = a.id
-                        ORDER BY e.sequence DESC LIMIT 1) m ON true
-     WHERE a.user_id = $1 AND a.question_id = ANY($2)
+     FROM answers a JOIN set_items i ON i.id = a.set_item_id ${NEWEST_MARK}
+     WHERE a.user_id = $1 AND ($2::uuid[] IS NULL OR a.question_id = ANY($2))
      ORDER BY a.given_at, a.id`,
     [userId, questionIds],
   );
@@ -66,7 +64,10 @@ export function foldAnswers(log: readonly LoggedAnswer[]): FoldedState | null {
   };
 }
 
-/** Replaces the stored memory of one question by the fold of its log: the log is the truth, this is its sum. */
+/**
+ * Replaces the stored memory of one question by the fold of its log: the log is the truth, this is its sum. The caller
+ * holds the student's turn, so that no answer of another set is added meanwhile.
+ */
 export async function rebuildMemory(schoolId: string, userId: string, questionId: string): Promise<FoldedState | null> {
   const state = foldAnswers(await loadLog(userId, [questionId]));
   if (!state) {

@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from 'node:util';
 import { notFound, Problem, unprocessable } from '#server/errors.ts';
 import { Answer } from '#server/models/answer.ts';
 import { MarkEvent } from '#server/models/mark-event.ts';
@@ -6,9 +7,9 @@ import { earnedMarks } from '#shared/domain/marking/earned-marks.ts';
 import type { MarkedPart } from '#shared/schemas/marked-part.ts';
 import type { AnswerResultDto, SelfMark } from '#shared/schemas/practice.ts';
 import { bodyMarks, type QuestionBody } from '#shared/schemas/question-body.ts';
-import { findSet } from './find-set.ts';
+import { changeSet } from './find-set.ts';
 import { loadResults, machineStandings } from './load-results.ts';
-import { loadSetItem } from './load-set-items.ts';
+import { type LoadedItem, loadSetItem } from './load-set-items.ts';
 import { rebuildMemory } from './rebuild-memory.ts';
 import { need } from './study-facts.ts';
 
@@ -27,33 +28,40 @@ function mergeTicks(body: QuestionBody, responses: string[], ticks: boolean[][])
   });
 }
 
+const duplicate = () => new Problem(409, 'duplicate', 'That marking was already sent with other ticks.');
+
+async function record(scope: Scope, item: LoadedItem, sent: SelfMark, parts: MarkedPart[]): Promise<void> {
+  if (await MarkEvent.findByPk(sent.id)) throw duplicate();
+  await MarkEvent.create({
+    id: sent.id,
+    answerId: sent.answerId,
+    sequence: 1,
+    source: 'student',
+    markedBy: scope.actor.userId,
+    parts,
+    marks: earnedMarks(item.body, parts),
+    maxMarks: bodyMarks(item.body),
+    markedAt: scope.now,
+  });
+  await rebuildMemory(scope.schoolId, scope.actor.userId, item.question_id);
+}
+
 /**
  * Records the student's marking of an answer that Plait could not decide. The first marking stands; sent again, it
  * gives the same response. @throws Problem 404, 409, 422
  */
 export async function selfMark(scope: Scope, setId: string, sent: SelfMark): Promise<AnswerResultDto> {
-  await findSet(scope, setId, true);
+  await changeSet(scope, setId);
   const answer = await Answer.findByPk(sent.answerId);
   const item = answer ? await loadSetItem(setId, answer.setItemId) : undefined;
   if (!answer || !item) throw notFound();
   const earlier = await MarkEvent.findOne({ where: { answerId: answer.id } });
-  if (!earlier) {
-    if (await MarkEvent.findByPk(sent.id))
-      throw new Problem(409, 'duplicate', 'That marking was sent for another answer.');
+  const isRepeat = earlier?.id === sent.id;
+  // The first marking stands, whatever another tab sends; the same request again must say the same.
+  if (!earlier || isRepeat) {
     const parts = mergeTicks(item.body, answer.responses, sent.ticks);
-    await MarkEvent.create({
-      id: sent.id,
-      answerId: answer.id,
-      sequence: 1,
-      source: 'student',
-      markedBy: scope.actor.userId,
-      parts,
-      marks: earnedMarks(item.body, parts),
-      maxMarks: bodyMarks(item.body),
-      markedAt: scope.now,
-    });
-    await rebuildMemory(scope.schoolId, scope.actor.userId, item.question_id);
+    if (earlier && !isDeepStrictEqual(earlier.parts, parts)) throw duplicate();
+    if (!earlier) await record(scope, item, sent, parts);
   }
-  const isOther = earlier !== null && earlier.id !== sent.id;
-  return need(await loadResults(scope, [item], isOther ? item.id : undefined), item.id);
+  return need(await loadResults(scope, [item], earlier && !isRepeat ? item.id : undefined), item.id);
 }

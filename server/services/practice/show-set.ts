@@ -1,7 +1,8 @@
 import { select } from '#server/db/scope.ts';
 import type { PracticeSet } from '#server/models/practice-set.ts';
-import { presentAsked, presentSubject } from '#server/presenters/practice.ts';
+import { presentSubject } from '#server/presenters/practice.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
+import { askedQuestion } from '#shared/domain/marking/asked-question.ts';
 import type { SetDto } from '#shared/schemas/practice.ts';
 import { findSet } from './find-set.ts';
 import { loadResults } from './load-results.ts';
@@ -35,7 +36,7 @@ export async function presentSet(scope: Scope, set: PracticeSet): Promise<SetDto
       id: item.id,
       position: item.position,
       subject: presentSubject(need(subjects, item.subject_id)),
-      question: presentAsked(item.number, item.kind, item.body),
+      question: askedQuestion(item.number, item.kind, item.body),
       result: results.get(item.id) ?? null,
     })),
   };

@@ -2,7 +2,7 @@ import { select } from '#server/db/scope.ts';
 import { earnedMarks } from '#shared/domain/marking/earned-marks.ts';
 import type { MarkedPart } from '#shared/schemas/marked-part.ts';
 import { bodyMarks, type QuestionBody } from '#shared/schemas/question-body.ts';
-import { type FoldedState, foldAnswers, type LoggedAnswer } from './rebuild-memory.ts';
+import { type FoldedState, foldAnswers, type LoggedAnswer, loadLog } from './rebuild-memory.ts';
 
 /** Something in the database that the log does not bear out. Ids only. */
 export interface LogFault {
@@ -32,18 +32,6 @@ interface MarkRow {
 
 const studentsWithAnswers = () =>
   select<{ user_id: string }>('SELECT user_id FROM answers UNION SELECT user_id FROM memory_states ORDER BY user_id');
-
-const wholeLog = (userId: string) =>
-  select<LoggedAnswer>(
-    `SELECT a.id, a.user_id, a.question_id, i.set_id, a.given_at, to_char(a.given_on, 'YYYY-MM-DD') AS given_on,
-       a.how_sure, m.marks, m.max_marks
-     FROM answers a
-     JOIN set_items i ON i.id = a.set_item_id
-     LEFT JOIN LATERAL (SELECT e.marks, e.max_marks FROM mark_events e WHERE e.answer_id = a.id
-                        ORDER BY e.sequence DESC LIMIT 1) m ON true
-     WHERE a.user_id = $1 ORDER BY a.given_at, a.id`,
-    [userId],
-  );
 
 const storedStates = (userId: string) =>
   select<StateRow>(
@@ -98,12 +86,13 @@ const compareMarks = (userId: string, rows: readonly MarkRow[]): LogFault[] =>
 
 /**
  * Proves of one school that every memory state is the fold of the answer log, and that every mark is the sum of the
- * mark points earned. Reads only; runs inside withSchool.
+ * mark points earned. That no answer counts twice is the database's unique key on set items. Reads only; runs inside
+ * withSchool, with one snapshot for all its statements where the school is at work.
  */
 export async function verifyLog(): Promise<LogReport> {
   const report: LogReport = { students: 0, answers: 0, states: 0, faults: [] };
   for (const { user_id: userId } of await studentsWithAnswers()) {
-    const log = await wholeLog(userId);
+    const log = await loadLog(userId, null);
     const states = await storedStates(userId);
     report.students += 1;
     report.answers += log.length;

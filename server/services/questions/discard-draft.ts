@@ -10,10 +10,8 @@ import { authorizeStep, lockQuestion } from './load-question.ts';
 export async function discardDraft({ actor }: Scope, id: string, revision: number): Promise<void> {
   const loaded = await lockQuestion(id);
   const draft = authorizeStep(actor, loaded, 'discardDraft', { status: 'draft', revision });
+  await QuestionTopic.destroy({ where: { questionVersionId: draft.id } });
   await draft.destroy();
-  if (loaded.versions.length === 1) {
-    await QuestionTopic.destroy({ where: { questionId: id } });
-    await loaded.question.destroy();
-  }
+  if (loaded.versions.length === 1) await loaded.question.destroy();
   await recordAudit(actor, 'discard-draft', 'question', id, 'done');
 }

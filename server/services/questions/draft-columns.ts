@@ -1,23 +1,25 @@
 import { select } from '#server/db/scope.ts';
 import { unprocessable } from '#server/errors.ts';
 import { QuestionTopic } from '#server/models/question-topic.ts';
-import type { SaveDraft } from '#shared/schemas/question.ts';
+import type { QuestionVersion } from '#server/models/question-version.ts';
+import type { SavedDraft } from '#shared/schemas/question.ts';
 import { describeBody } from './describe-body.ts';
 
-export type DraftFields = Omit<SaveDraft, 'revision'>;
+export type DraftFields = Omit<SavedDraft, 'revision'>;
 
 /** The columns of a version that a draft fills. */
-export const draftColumns = ({ kind, tier, expectedSeconds, body }: Omit<DraftFields, 'topicIds'>) => ({
+export const draftColumns = ({ kind, tier, option, expectedSeconds, body }: Omit<DraftFields, 'topicIds'>) => ({
   kind,
   tier,
+  option,
   expectedSeconds,
   body,
   ...describeBody(body),
 });
 
-/** Ids of a question's topics, the leading one first. */
-export async function topicIdsOf(questionId: string): Promise<string[]> {
-  const rows = await QuestionTopic.findAll({ where: { questionId }, order: [['position', 'ASC']] });
+/** Ids of a version's topics, the leading one first. */
+export async function topicIdsOf(questionVersionId: string): Promise<string[]> {
+  const rows = await QuestionTopic.findAll({ where: { questionVersionId }, order: [['position', 'ASC']] });
   return rows.map((row) => row.topicId);
 }
 
@@ -36,10 +38,19 @@ export async function checkTopics(subjectId: string, topicIds: string[]): Promis
   return chosen;
 }
 
-/** Puts a question under these topics, in this order, and under no other. */
-export async function replaceTopics(questionId: string, topicIds: string[]): Promise<void> {
-  const present = await topicIdsOf(questionId);
+type VersionRef = Pick<QuestionVersion, 'id' | 'questionId'>;
+
+/** Puts a new version under these topics, in this order. */
+export async function addTopics({ id, questionId }: VersionRef, topicIds: string[]): Promise<void> {
+  await QuestionTopic.bulkCreate(
+    topicIds.map((topicId, position) => ({ questionId, questionVersionId: id, topicId, position })),
+  );
+}
+
+/** Puts a draft under these topics, in this order, and under no other; other versions keep theirs. */
+export async function replaceTopics(draft: VersionRef, topicIds: string[]): Promise<void> {
+  const present = await topicIdsOf(draft.id);
   if (present.length === topicIds.length && present.every((id, at) => id === topicIds[at])) return;
-  await QuestionTopic.destroy({ where: { questionId } });
-  await QuestionTopic.bulkCreate(topicIds.map((topicId, position) => ({ questionId, topicId, position })));
+  await QuestionTopic.destroy({ where: { questionVersionId: draft.id } });
+  await addTopics(draft, topicIds);
 }

@@ -7,7 +7,7 @@ import type { Scope } from '#server/services/people/load-scope.ts';
 import { loadFigures } from '#server/services/statistics/version-figures.ts';
 import type { ListQuestions, QuestionPageDto, VersionStatus } from '#shared/schemas/question.ts';
 import type { QuestionKind } from '#shared/schemas/question-body.ts';
-import { FACETS, PAGES, TOTAL } from './list-sql.ts';
+import { FACETS, KEYS, PAGES, TOTAL } from './list-sql.ts';
 import { searchWords } from './search-words.ts';
 
 interface Facet {
@@ -33,7 +33,7 @@ const authorsOf = (facets: Facet[]) =>
 export async function listQuestions({ actor }: Scope, query: ListQuestions): Promise<QuestionPageDto> {
   const { subjectId, status = null, kind = null, authorId = null, topicId = null, sort, limit } = query;
   authorize(subjectPolicy, 'read', actor, { subjectId });
-  const cursor = readCursor(sort, query.cursor);
+  const cursor = readCursor(sort, KEYS[sort].type, query.cursor);
   const { patterns, number } = searchWords(query.q);
   const filters = [subjectId, status, kind, authorId, topicId, patterns, number];
 

@@ -14,7 +14,7 @@ const WAITING = `question_versions v JOIN questions q ON q.id = v.question_id
 const PAGE = `
   WITH page AS (
     SELECT v.id AS sort_id, ${KEY} AS sort_key, v.question_id, q.number, v.version, v.excerpt, q.subject_id, v.kind,
-      v.max_marks, v.author_id, v.sent_at
+      v.max_marks, v.author_id, v.last_edited_by, v.sent_at
     FROM ${WAITING} AND ($2::text IS NULL OR (${KEY}, v.id) > ($2::bigint, $3::uuid))
     ORDER BY sort_key, sort_id LIMIT $4
   )
@@ -24,7 +24,7 @@ const PAGE = `
   JOIN users u ON u.id = page.author_id
   JOIN subjects s ON s.id = page.subject_id
   LEFT JOIN LATERAL (SELECT k.title FROM question_topics x JOIN topics k ON k.id = x.topic_id
-                     WHERE x.question_id = page.question_id ORDER BY x.position, k.id LIMIT 1) t ON true
+                     WHERE x.question_version_id = page.sort_id ORDER BY x.position, k.id LIMIT 1) t ON true
   ORDER BY page.sort_key, page.sort_id`;
 const TOTAL = `SELECT count(*)::int AS total FROM ${WAITING}`;
 const SORT = 'sent';
@@ -34,7 +34,7 @@ export async function listReviews(
   { actor }: Scope,
   query: z.output<typeof pageQuerySchema>,
 ): Promise<z.output<typeof reviewPageSchema>> {
-  const cursor = readCursor(SORT, query.cursor);
+  const cursor = readCursor(SORT, 'bigint', query.cursor);
   const subjectIds = readableSubjectIds(actor);
   const bind = [subjectIds, cursor?.key ?? null, cursor?.id ?? null, query.limit + 1];
   const { items, nextCursor } = cutPage(SORT, await select<ReviewRow>(PAGE, bind), query.limit);

@@ -1,3 +1,4 @@
+import type { CursorKey } from '#server/db/page.ts';
 import { figuresSql } from '#server/services/statistics/version-figures.ts';
 import type { ListQuestions } from '#shared/schemas/question.ts';
 
@@ -9,17 +10,18 @@ const NEWEST = `JOIN LATERAL (SELECT w.* FROM question_versions w WHERE w.questi
 
 /**
  * The list's filters; each bound value may be null, which lets everything pass: $1 subject, $2 status, $3 kind,
- * $4 author, $5 topic, $6 patterns of the words searched for, $7 the question number they may stand for.
+ * $4 author, $5 topic of the newest or the live version, $6 patterns of the words searched for, $7 the question number they may stand for.
  */
 const FILTERS = `q.subject_id = $1
   AND ($2::text IS NULL OR v.status = $2)
   AND ($3::text IS NULL OR v.kind = $3)
   AND ($4::uuid IS NULL OR v.author_id = $4)
-  AND ($5::uuid IS NULL OR EXISTS (SELECT 1 FROM question_topics x WHERE x.question_id = q.id AND x.topic_id = $5))
+  AND ($5::uuid IS NULL OR EXISTS (SELECT 1 FROM question_topics x
+    WHERE x.topic_id = $5 AND x.question_version_id IN (v.id, q.live_version_id)))
   AND ($6::text[] IS NULL OR v.search_text LIKE ALL ($6) OR q.number = $7)`;
 
 /** Every order runs upwards, so that one comparison finds the next page; the id settles what is equal. */
-const KEYS: Record<QuestionSort, { key: string; type: string }> = {
+export const KEYS: Record<QuestionSort, { key: string; type: CursorKey }> = {
   number: { key: 'q.number', type: 'integer' },
   newest: { key: '-(extract(epoch FROM v.saved_at) * 1000000)::bigint', type: 'bigint' },
   marks: { key: 'v.max_marks', type: 'integer' },
@@ -45,7 +47,7 @@ const pageSql = (sort: QuestionSort): string => {
     FROM page
     JOIN users u ON u.id = page.author_id
     LEFT JOIN LATERAL (SELECT k.title FROM question_topics x JOIN topics k ON k.id = x.topic_id
-                       WHERE x.question_id = page.sort_id ORDER BY x.position, k.id LIMIT 1) t ON true
+                       WHERE x.question_version_id = page.version_id ORDER BY x.position, k.id LIMIT 1) t ON true
     ORDER BY page.sort_key, page.sort_id`;
 };
 

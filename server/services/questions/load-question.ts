@@ -43,6 +43,7 @@ export const questionFacts = ({ question, working }: LoadedQuestion): QuestionFa
   subjectId: question.subjectId,
   authorId: question.authorId,
   workingAuthorId: working?.authorId ?? null,
+  workingEditorId: working?.lastEditedBy ?? null,
   workingStatus: working?.status ?? null,
   isLive: question.liveVersionId !== null,
   isRetired: question.retiredAt !== null,
@@ -60,7 +61,12 @@ export function authorizeStep(
   seen: { status: 'draft' | 'inReview'; revision: number },
 ): QuestionVersion {
   const { working, newest } = loaded;
-  const facts = { ...questionFacts(loaded), workingStatus: seen.status, workingAuthorId: newest.authorId };
+  const facts = {
+    ...questionFacts(loaded),
+    workingStatus: seen.status,
+    workingAuthorId: newest.authorId,
+    workingEditorId: newest.lastEditedBy,
+  };
   authorize(questionPolicy, action, actor, facts);
   if (working?.status !== seen.status || working.revision !== seen.revision) throw stale();
   return working;

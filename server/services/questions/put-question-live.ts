@@ -5,7 +5,8 @@ import { authorizeStep, lockQuestion } from './load-question.ts';
 import { showQuestion } from './show-question.ts';
 
 /**
- * Puts the version in review before students, in place of the live one. Never by its own author.
+ * Puts the version in review before students, in place of the live one. Never by its own author,
+ * nor by whoever saved it last.
  * @throws Problem 404, 403; 409 `stale`
  */
 export async function putQuestionLive(scope: Scope, id: string, revision: number): Promise<QuestionDto> {

@@ -15,7 +15,7 @@ import { showQuestion } from './show-question.ts';
 export async function sendForReview(scope: Scope, id: string, revision: number): Promise<QuestionDto> {
   const { actor, now } = scope;
   const draft = authorizeStep(actor, await lockQuestion(id), 'send', { status: 'draft', revision });
-  const checked = checkReviewable(draft.kind, { topicIds: await topicIdsOf(id), body: draft.body });
+  const checked = checkReviewable(draft.kind, { topicIds: await topicIdsOf(draft.id), body: draft.body });
   if (checked.faults) throw unprocessable(checked.faults);
   await draft.update({ status: 'inReview', sentAt: now, body: checked.body, ...describeBody(checked.body) });
   await recordAudit(actor, 'send-question', 'question', id, 'done', ['status']);

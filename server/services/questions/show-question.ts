@@ -13,7 +13,7 @@ import { loadQuestion, questionFacts } from './load-question.ts';
 const TOPICS = `
   SELECT t.id, t.number, t.title, s.name AS specification
   FROM question_topics x JOIN topics t ON t.id = x.topic_id JOIN specifications s ON s.id = t.specification_id
-  WHERE x.question_id = $1 ORDER BY x.position, t.id`;
+  WHERE x.question_version_id = $1 ORDER BY x.position, t.id`;
 
 /** A question with the version being worked on, the live one, and what may be done. @throws Problem 404 */
 export async function showQuestion({ actor }: Scope, id: string): Promise<QuestionDto> {
@@ -23,7 +23,7 @@ export async function showQuestion({ actor }: Scope, id: string): Promise<Questi
   authorize(questionPolicy, 'read', actor, facts);
 
   const subject = await Subject.findByPk(question.subjectId, { rejectOnEmpty: notFound() });
-  const topics = await select<QuestionDto['topics'][number]>(TOPICS, [id]);
+  const topics = await select<QuestionDto['topics'][number]>(TOPICS, [newest.id]);
   const people = versions.flatMap(({ authorId, reviewerId }) => (reviewerId ? [authorId, reviewerId] : [authorId]));
   const users = await User.findAll({ where: { id: [...new Set(people)] }, attributes: ['id', 'name'] });
   const names = new Map(users.map((user) => [user.id, user.name]));

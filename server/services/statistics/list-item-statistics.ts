@@ -20,17 +20,20 @@ const KEYS: Record<Sort, string> = {
   seconds: 'coalesce(-round(f.median_seconds::numeric, 6), 1)',
 };
 
+/** The version whose topics a question counts under: the live one, so that its older versions stand beside it. */
+const SHOWN = 'coalesce(q.live_version_id, v.id)';
+
 /** $1 the subject, $2 a topic or null, $3 and $4 the cursor, $5 how many rows. `total` counts all pages. */
 const pageSql = (sort: Sort): string => `
   WITH figures AS (${figuresSql('a.question_id IN (SELECT s.id FROM questions s WHERE s.subject_id = $1)')}),
   answered AS (
-    SELECT v.id AS sort_id, ${KEYS[sort]} AS sort_key, v.question_id, q.number, v.version, v.excerpt, v.max_marks,
+    SELECT v.id AS sort_id, ${KEYS[sort]} AS sort_key, v.question_id, ${SHOWN} AS shown_id, q.number, v.version, v.excerpt, v.max_marks,
       f.students, f.answers, f.facility, f.median_seconds
     FROM figures f
     JOIN question_versions v ON v.id = f.version_id
     JOIN questions q ON q.id = v.question_id
     WHERE $2::uuid IS NULL
-      OR EXISTS (SELECT 1 FROM question_topics x WHERE x.question_id = q.id AND x.topic_id = $2)
+      OR EXISTS (SELECT 1 FROM question_topics x WHERE x.question_version_id = ${SHOWN} AND x.topic_id = $2)
   ),
   page AS (
     SELECT * FROM answered
@@ -40,7 +43,7 @@ const pageSql = (sort: Sort): string => `
   SELECT page.*, coalesce(t.title, '') AS topic, (SELECT count(*)::int FROM answered) AS total
   FROM page
   LEFT JOIN LATERAL (SELECT k.title FROM question_topics x JOIN topics k ON k.id = x.topic_id
-                     WHERE x.question_id = page.question_id ORDER BY x.position, k.id LIMIT 1) t ON true
+                     WHERE x.question_version_id = page.shown_id ORDER BY x.position, k.id LIMIT 1) t ON true
   ORDER BY page.sort_key, page.sort_id`;
 
 const PAGES: Record<Sort, string> = {
@@ -60,7 +63,7 @@ export async function listItemStatistics(
 ): Promise<z.output<typeof itemStatisticsPageSchema>> {
   const { subjectId, topicId = null, sort, limit } = query;
   authorize(subjectPolicy, 'readItemStatistics', actor, { subjectId });
-  const cursor = readCursor(sort, query.cursor);
+  const cursor = readCursor(sort, 'numeric', query.cursor);
   const bind = [subjectId, topicId, cursor?.key ?? null, cursor?.id ?? null, limit + 1];
   const rows = await select<ItemStatisticsRow & { total: number }>(PAGES[sort], bind);
   const { items, nextCursor } = cutPage(sort, rows, limit);

@@ -1,96 +1,65 @@
-import { distance } from 'fastest-levenshtein';
 import type { TextSpec } from '#shared/schemas/question-body.ts';
 import type { Verdict } from '#shared/schemas/verdict.ts';
-import { plainCharacters } from './typed-text.ts';
+import { isSlip, misspeltWithin, nearest } from './spelling.ts';
+import { bareText, comparisonKey, differsInSymbolCase, looseKey, spacedWords } from './text-key.ts';
+
+/** Longest answer looked through for a misspelling, in characters; listed answers have up to 200. */
+const SEARCH_LIMIT = 300;
 
 /**
- * Marks a typed word or phrase against the listed ones. Case, articles, spaces, hyphens, the final stop and the kind
- * of quotes do not matter. A slip in spelling or accents, or an accepted answer within a longer one, is not guessed at.
+ * Marks a typed word or phrase against the listed ones. Case (but of symbols), articles, spaces, hyphens, the mark at
+ * the end and quotes do not matter. A slip in spelling, accents or apostrophes, or an accepted answer within a longer
+ * one, is not guessed at. On a part of several marks only a listed answer decides: another may still earn some of them.
  */
-export function markText(spec: TextSpec, answer: string): Verdict {
+export function markText(spec: TextSpec, answer: string, marks: number): Verdict {
+  const { accept, reject = [] } = spec;
   const key = comparisonKey(answer);
-  const accepted = spec.accept.find((listed) => comparisonKey(listed) === key);
-  if (accepted !== undefined) return { outcome: 'full', words: `The scheme accepts “${accepted}”.` };
-  const wanted = `“${spec.accept[0] ?? ''}”`;
-  const rejected = (spec.reject ?? []).find((listed) => comparisonKey(listed) === key);
+  const isSame = (listed: string): boolean => comparisonKey(listed) === key;
+  const wanted = `“${accept[0] ?? ''}”`;
+  const accepted = accept.filter(isSame);
+  // Where both lists have it but for its case, as CO and co, the case decides.
+  const isExact = (listed: string): boolean => bareText(listed) === bareText(answer);
+  const rejected = reject.filter(isSame).find((listed) => accepted.length === 0 || isExact(listed));
+  const sure =
+    accepted.find(isExact) ??
+    (rejected === undefined ? accepted.find((listed) => !differsInSymbolCase(listed, answer)) : undefined);
+  if (sure !== undefined) return { outcome: 'full', words: `The scheme accepts “${sure}”.` };
   if (rejected !== undefined) {
     return { outcome: 'none', words: `The scheme asks for ${wanted}. It does not accept “${rejected}”.` };
   }
-  const accented = spec.accept.find((listed) => withoutAccents(comparisonKey(listed)) === withoutAccents(key));
-  if (accented !== undefined) {
-    return { outcome: 'undecided', words: `The scheme has “${accented}”; your accents differ. ${SELF_MARK}` };
-  }
-  const near = nearest(spec.accept, key);
+  if (accepted[0] !== undefined) return undecided(`The scheme has “${accepted[0]}”; your capitals differ.`);
+  const loose = looseKey(key);
+  const accented = accept.find((listed) => looseKey(comparisonKey(listed)) === loose);
+  if (accented !== undefined) return undecided(`The scheme has “${accented}”; your accents or apostrophes differ.`);
+  const near = nearest(accept, key);
   if (near !== null && isSlip(near)) {
-    const rival = nearest(spec.reject ?? [], key);
-    return rival !== null && rival.slips <= near.slips
+    const rival = nearest(reject, key);
+    return marks === 1 && rival !== null && rival.slips <= near.slips
       ? {
           outcome: 'none',
           words: `The scheme asks for “${near.listed}”. Your spelling is as near to “${rival.listed}”.`,
         }
-      : { outcome: 'undecided', words: `This is close to “${near.listed}”, but not spelled the same. ${SELF_MARK}` };
+      : undecided(`This is close to “${near.listed}”, but not spelled the same.`);
   }
-  const isHeld = holding(answer);
-  const held = spec.accept.find(isHeld);
-  if (held !== undefined && !spec.reject?.some(isHeld)) {
-    return { outcome: 'undecided', words: `Your answer has “${held}” in it, with more around it. ${SELF_MARK}` };
+  const held = accept.find(holding(answer));
+  if (held !== undefined) return undecided(`Your answer has “${held}” in it, with more around it.`);
+  if (answer.length > SEARCH_LIMIT) return undecided('Your answer is longer than Plait can look through.');
+  const misspelt = misspeltWithin(answer, accept, reject);
+  if (misspelt !== undefined) {
+    return undecided(`Your answer has something close to “${misspelt}” in it, with more around it.`);
   }
-  return spec.unlisted === 'wrong'
+  return marks === 1 && spec.unlisted === 'wrong'
     ? { outcome: 'none', words: `The scheme asks for ${wanted}, and your answer is not among those it lists.` }
-    : { outcome: 'undecided', words: `Your answer is not among those the scheme lists. ${SELF_MARK}` };
+    : undecided('Your answer is not among those the scheme lists.');
 }
 
-const SELF_MARK = 'Mark it against the scheme: same meaning counts.';
-
-/** Lower case, without leading article, inner "the", final stop, hyphens between letters, and spaces but between digits. */
-const comparisonKey = (text: string): string =>
-  words(text)
-    .join(' ')
-    .replace(/(?<=\p{L})-(?=\p{L})/gu, ' ')
-    .replace(/(?<!\d) | (?!\d)/gu, '');
-
-function words(text: string): string[] {
-  const all = plainCharacters(text)
-    .toLowerCase()
-    .replace(/(?<![ .])[ .]+$/u, '')
-    .split(' ');
-  const kept = all.filter((word, index) => word !== 'the' && !(index === 0 && (word === 'a' || word === 'an')));
-  return kept.length > 0 ? kept : all;
-}
-
-const withoutAccents = (key: string): string => key.normalize('NFD').replace(/\p{M}/gu, '');
-
-interface Near {
-  listed: string;
-  key: string;
-  slips: number;
-}
-
-const digitsOf = (key: string): string => key.replace(/\D/gu, '');
-
-/** The listed answer with the fewest slips from `key`; null where all differ by more than two, or in a digit. */
-function nearest(listed: readonly string[], key: string): Near | null {
-  let best: Near | null = null;
-  for (const one of listed) {
-    const candidate = comparisonKey(one);
-    if (Math.abs(candidate.length - key.length) > 2 || digitsOf(candidate) !== digitsOf(key)) continue;
-    const slips = distance(candidate, key);
-    if (slips <= 2 && (best === null || slips < best.slips)) best = { listed: one, key: candidate, slips };
-  }
-  return best;
-}
-
-/** One slip in a word of 5 letters or more, two in one of 9 or more. */
-function isSlip({ key, slips }: Near): boolean {
-  const letters = key.match(/\p{L}/gu)?.length ?? 0;
-  return slips <= (letters >= 9 ? 2 : letters >= 5 ? 1 : 0);
-}
+const undecided = (words: string): Verdict => ({
+  outcome: 'undecided',
+  words: `${words} Mark it against the scheme: same meaning counts.`,
+});
 
 /** A test of whether a listed answer stands in the text as whole words. */
 function holding(text: string): (listed: string) => boolean {
   const inText = spacedWords(text);
   return (listed) => spacedWords(listed) !== ' ' && inText.includes(spacedWords(listed));
 }
-
-/** Words without punctuation, a space before and after each. */
-const spacedWords = (text: string): string => ` ${words(text).join(' ')} `.replace(/[^\p{L}\p{M}\d^+/-]+/gu, ' ');

@@ -22,7 +22,7 @@ export function mark(spec: AnswerSpec, answer: string, marks = 1): Verdict {
     case 'number':
       return markNumber(spec, answer, marks);
     case 'text':
-      return markText(spec, answer);
+      return markText(spec, answer, marks);
     case 'selfMarked':
       return { outcome: 'undecided', words: 'Mark this one against the scheme. Same meaning counts.' };
   }

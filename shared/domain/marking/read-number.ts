@@ -7,6 +7,10 @@ export interface TypedNumber {
   isPercent: boolean;
   /** Typed before the number; empty where none was. */
   currency: '' | '£' | '$' | '€';
+  /** Typed before the number, as of a magnification: "×800", "x800". */
+  times: '' | '×';
+  /** Typed as near the number, not as it: "≈7", "about 7". */
+  isAbout: boolean;
   /** What follows the number: a unit, or anything else. */
   rest: string;
 }
@@ -19,35 +23,42 @@ const FRACTION = /^(?:(\d{1,12}) )?(\d{1,12}(?:\.\d{1,12})?) ?\/ ?(\d{1,12}(?:\.
 const DECIMAL = new RegExp(`^(${DIGITS})(?![\\d,])(?:e([+-]?\\d{1,3})(?!\\d)|${POWER_OF_TEN}(?!\\d))?`, 'iu');
 const BARE_POWER = /^10 ?\^ ?\(? ?([+-]? ?\d{1,3}) ?\)?(?!\d)/u;
 
+const ABOUT = /^(?:[~∼≈≃≅]|(?:about|around|roughly|approximately|approx\.?)(?!\p{L})) ?/iu;
+const TIMES = /^[x×✕] ?(?=[\d.])/iu;
+
 /** Longest name that may stand before an equals sign: "Concentration of acid =". */
-const LABEL = /^[\p{L}\d ()_'^*+./×·-]{0,80}$/u;
+const LABEL = /^[\p{L}\d ()_'^*+./×·≈-]{0,80}$/u;
 
 /**
- * Reads an answer as one number in any ordinary typed form: 1,200; −5; .5; 3/4; 2 1/3; 1.2e3; 1.2 × 10³; £3.50; 42%.
+ * Reads an answer as one number in any ordinary typed form: 1,200; −5; .5; 3/4; 2 1/3; 1.2e3; 1.2 × 10³; £3.50; 42%; ×800.
  * Null where it is none, or more than one.
  */
 export function readNumber(typed: string): TypedNumber | null {
-  const text = afterLastEquals(plainCharacters(typed));
-  if (text === null) return null;
+  const last = afterLastEquals(plainCharacters(typed));
+  if (last === null) return null;
+  const written = last.replace(ABOUT, '');
+  const text = written.replace(TIMES, '').replace(/\.$/u, '');
   const head = /^([+-]?) ?([£$€]?) ?([+-]?) ?/u.exec(text);
   const [opening = '', sign = '', currency = '', laterSign = ''] = head ?? [];
   if (sign !== '' && laterSign !== '') return null;
   const read = readValue(text.slice(opening.length));
   if (read === null) return null;
   const isNegative = sign === '-' || laterSign === '-';
-  const rest = read.rest.trim().replace(/\.$/u, '');
+  const rest = read.rest.trim();
   const isPercent = rest.startsWith('%');
   return {
     value: isNegative ? -read.value : read.value,
     isPercent,
     currency: currency as TypedNumber['currency'],
+    isAbout: ABOUT.test(last),
+    times: TIMES.test(written) ? '×' : '',
     rest: isPercent ? rest.slice(1).trim() : rest,
   };
 }
 
-/** The last value of a chain of equals signs is the answer; working and labels before it do no harm. */
+/** The last value of a chain of equals signs is the answer, with the ≈ before it; what stands before does no harm. */
 function afterLastEquals(text: string): string | null {
-  const pieces = text.split(/[=≈]/u);
+  const pieces = text.split(/=|(?=≈)/u);
   const last = pieces.pop() ?? '';
   const areLabels = pieces.every((piece) => LABEL.test(piece) && !/(?:^| )(?:or|and|not) /iu.test(piece));
   return areLabels ? last.trim() : null;

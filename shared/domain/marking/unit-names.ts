@@ -50,7 +50,7 @@ const PREFIX_WORDS: Record<string, string> = {
   T: 'tera',
 };
 
-/** Words for the symbols that take prefixes; a plural s is added. */
+/** Words for the symbols. */
 const WORDS: Record<string, readonly string[]> = {
   m: ['metre', 'meter'],
   g: ['gram', 'gramme'],
@@ -119,28 +119,64 @@ const ALIASES: Record<string, string> = {
   uA: 'μA^1',
 };
 
-function buildNames(): Map<string, readonly string[]> {
-  const names = new Map<string, readonly string[]>();
-  const add = (name: string, meaning: string) => names.set(name, [...new Set([...(names.get(name) ?? []), meaning])]);
+/** Symbols that students also write for another unit, and the degree for which a temperature's own is meant. */
+const AMBIGUOUS: Record<string, readonly string[]> = {
+  m: ['min^1', 'mile^1'],
+  '°': ['°C^1'],
+  deg: ['°C^1'],
+  degs: ['°C^1'],
+  degree: ['°C^1'],
+  degrees: ['°C^1'],
+};
+
+type Names = Map<string, readonly string[]>;
+
+function add(names: Names, name: string, meanings: readonly string[]): void {
+  names.set(name, [...new Set([...(names.get(name) ?? []), ...meanings])]);
+}
+
+function buildNames(): Names {
+  const names: Names = new Map();
   for (const [symbol, prefixes] of Object.entries(PREFIXES)) {
     for (const prefix of ['', ...prefixes.split(' ').filter(Boolean)]) {
-      add(`${prefix}${symbol}`, `${prefix}${symbol}^1`);
-      for (const word of WORDS[symbol] ?? []) {
-        add(`${PREFIX_WORDS[prefix] ?? ''}${word}`, `${prefix}${symbol}^1`);
-        add(`${PREFIX_WORDS[prefix] ?? ''}${word}s`, `${prefix}${symbol}^1`);
-      }
+      add(names, `${prefix}${symbol}`, [`${prefix}${symbol}^1`]);
+      for (const word of WORDS[symbol] ?? [])
+        add(names, `${PREFIX_WORDS[prefix] ?? ''}${word}`, [`${prefix}${symbol}^1`]);
     }
   }
-  for (const [name, meaning] of Object.entries(ALIASES)) add(name, meaning);
+  for (const [name, meaning] of Object.entries(ALIASES)) add(names, name, [meaning]);
+  for (const [name, meanings] of [...names]) if (/^\p{L}+[^\P{L}s]$/u.test(name)) add(names, `${name}s`, meanings);
   return names;
 }
 
-/** What a symbol or word may mean: powers of symbols, "dm^3" or "mile^1 h^-1". Case matters. */
-export const UNIT_NAMES: ReadonlyMap<string, readonly string[]> = buildNames();
+function withoutCase(names: Names): Names {
+  const folded: Names = new Map();
+  for (const [name, meanings] of names) add(folded, name.toLowerCase(), meanings);
+  return folded;
+}
+
+/** What may be meant where the exact reading is another unit: "Kg", "ms" as the plural of "m", "m" for minutes. */
+function buildLoose(names: Names): Names {
+  const loose = withoutCase(names);
+  for (const [name, meanings] of names) if (/^\p{L}$/u.test(name)) add(loose, `${name.toLowerCase()}s`, meanings);
+  for (const [name, meanings] of Object.entries(AMBIGUOUS)) add(loose, name, meanings);
+  return loose;
+}
+
+const ALL_NAMES = buildNames();
+
+/** What a symbol or word, or its plural, may mean: powers of symbols, "dm^3" or "mile^1 h^-1". Case matters. */
+export const UNIT_NAMES: ReadonlyMap<string, readonly string[]> = ALL_NAMES;
 
 /** The same without case, for writing that can mean only one thing. */
-export const UNIT_NAMES_ANY_CASE: ReadonlyMap<string, readonly string[]> = [...UNIT_NAMES].reduce(
-  (folded, [name, meanings]) =>
-    folded.set(name.toLowerCase(), [...new Set([...(folded.get(name.toLowerCase()) ?? []), ...meanings])]),
-  new Map<string, readonly string[]>(),
+export const UNIT_NAMES_ANY_CASE: ReadonlyMap<string, readonly string[]> = withoutCase(ALL_NAMES);
+
+/** Lower-case names with everything that a student may mean by them; enough to doubt a unit, never to accept one. */
+export const UNIT_NAMES_LOOSE: ReadonlyMap<string, readonly string[]> = buildLoose(ALL_NAMES);
+
+/** Every symbol with its prefix parted: "kJ" is ["k", "J"]. */
+export const UNIT_SYMBOLS: ReadonlyMap<string, readonly [prefix: string, symbol: string]> = new Map(
+  Object.entries(PREFIXES).flatMap(([symbol, prefixes]) =>
+    ['', ...prefixes.split(' ').filter(Boolean)].map((prefix) => [`${prefix}${symbol}`, [prefix, symbol]] as const),
+  ),
 );

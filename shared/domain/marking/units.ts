@@ -1,54 +1,66 @@
 import { plainCharacters } from './typed-text.ts';
-import { UNIT_NAMES, UNIT_NAMES_ANY_CASE } from './unit-names.ts';
+import { UNIT_NAMES, UNIT_NAMES_ANY_CASE, UNIT_NAMES_LOOSE } from './unit-names.ts';
+import { multiplyPowers, type Powers, spellPowers, unitRatio } from './unit-size.ts';
 
 /**
- * How a typed unit stands to the expected one. `maybe`: it may name the same quantity in other words (N/kg for m/s²).
+ * How a typed unit stands to the expected one. `maybe`: it may name the same quantity in other words (N/kg for m/s²),
+ * or differs in letter case only, or is ambiguous (m for minutes).
  * `unknown`: it is not a unit that the marker knows.
  */
 export type UnitMatch = 'same' | 'maybe' | 'different' | 'unknown';
 
-/** Powers of symbols: { m: 1, s: -2 }. */
-type Powers = ReadonlyMap<string, number>;
 type Names = ReadonlyMap<string, readonly string[]>;
 
 const UNIT_LIMIT = 40;
 /** Symbols written without a space between them: "kgms" is three. */
 const RUN_LIMIT = 3;
 const READING_LIMIT = 64;
+/** A second number among the units: "h 5 min" after a 1. */
+const MIXED = /\p{L} \d+ ?\p{L}/u;
+/** The same, where the first unit may also be read as having that power: "m 5", "h5m". */
+const MAYBE_MIXED = /\p{L}(?: \d| ?\d+ ?\p{L})/u;
+/** A sum in another currency is a slip that the scheme may forgive. */
+const CURRENCIES = /^(?:[£$€]|(?:pound|dollar|euro)s?|GBP)$/iu;
 /** A run of letters with the power written after it, or one other character. */
-const TOKEN = /([\p{L}°%£$€]+)(?: ?\^? ?\(?([+-]?\d)\)?)?|[^\p{L}°%£$€]/gu;
+const TOKEN = /([\p{L}°%£$€]+)(?: ?\^? ?\(?([+-]?[0-3])\)?)?|[^\p{L}°%£$€]/gu;
 
-/** Named units as products of others. */
-const PRODUCTS: Record<string, string> = {
-  N: 'kg^1 m^1 s^-2',
-  J: 'kg^1 m^2 s^-2',
-  W: 'kg^1 m^2 s^-3',
-  Pa: 'kg^1 m^-1 s^-2',
-  V: 'kg^1 m^2 s^-3 A^-1',
-  Ω: 'kg^1 m^2 s^-3 A^-2',
-  C: 'A^1 s^1',
-  Hz: 's^-1',
-  Bq: 's^-1',
-};
-
-/** Compares two units as typed: "mol dm⁻³" is "mol/dm3", "metres per second" is "ms^-1"; mJ is not MJ. */
+/** Compares two units as typed: "mol dm⁻³" is "mol/dm3", "metres per second" is "ms^-1", "kgs" is "kg". */
 export function matchUnits(expected: string, typed: string): UnitMatch {
   const [a, b] = [plainUnit(expected), plainUnit(typed)];
   if (bare(a) === bare(b)) return 'same';
   if (a.length > UNIT_LIMIT || b.length > UNIT_LIMIT) return 'unknown';
+  if (MIXED.test(b)) return 'unknown';
   const wanted = readings(a, UNIT_NAMES);
-  if (wanted.length === 0) return bare(a).toLowerCase() === bare(b).toLowerCase() ? 'same' : 'unknown';
+  const isCaseOnly = bare(a).toLowerCase() === bare(b).toLowerCase();
+  if (wanted.length === 0) return isCaseOnly ? 'same' : 'unknown';
   const given = readings(b, UNIT_NAMES);
   if (given.length === 0) return matchAnyCase(wanted, b);
   if (overlap(wanted, given)) return 'same';
-  return overlap(wanted.map(expanded), given.map(expanded)) ? 'maybe' : 'different';
+  const isEqual = ratios(wanted, given).some((ratio) => Math.abs(ratio - 1) < 1e-9);
+  const isLikely =
+    isCaseOnly ||
+    isEqual ||
+    (CURRENCIES.test(a) && CURRENCIES.test(b)) ||
+    overlap(wanted, readings(b.toLowerCase(), UNIT_NAMES_LOOSE));
+  if (isLikely) return 'maybe';
+  return MAYBE_MIXED.test(b) ? 'unknown' : 'different';
 }
+
+/** How many of the expected unit one of the typed unit may be: [0.1] for mm in cm. None for another quantity. */
+export function unitRatios(expected: string, typed: string): number[] {
+  const [a, b] = [plainUnit(expected), plainUnit(typed)];
+  if (a.length > UNIT_LIMIT || b.length > UNIT_LIMIT || MIXED.test(b)) return [];
+  return ratios(readings(a, UNIT_NAMES), readings(b, UNIT_NAMES));
+}
+
+const ratios = (wanted: readonly Powers[], given: readonly Powers[]): number[] =>
+  wanted.flatMap((one) => given.map((other) => unitRatio(one, other)).filter((ratio) => ratio !== null));
 
 /** Untidy case ("hz", "KG") is the right unit where it can mean no other; "mj" can. */
 function matchAnyCase(wanted: readonly Powers[], typed: string): UnitMatch {
   const given = readings(typed.toLowerCase(), UNIT_NAMES_ANY_CASE);
   if (!overlap(wanted, given)) return 'unknown';
-  return new Set(given.map(spell)).size === 1 ? 'same' : 'maybe';
+  return new Set(given.map(spellPowers)).size === 1 ? 'same' : 'maybe';
 }
 
 const plainUnit = (unit: string): string =>
@@ -57,18 +69,11 @@ const plainUnit = (unit: string): string =>
     .replace(/\bdeg(?:ree)?s?\.? ?(?=c\b|celsius\b|centigrade\b)/giu, '')
     .replace(/° ?(?=c\b)/giu, '°');
 
-const bare = (unit: string): string => unit.replace(/[ .]/gu, '');
-
-const spell = (powers: Powers): string =>
-  [...powers]
-    .filter(([, power]) => power !== 0)
-    .map(([symbol, power]) => `${symbol}^${power}`)
-    .sort()
-    .join(' ');
+const bare = (unit: string): string => unit.replace(/[ .,]/gu, '');
 
 function overlap(a: readonly Powers[], b: readonly Powers[]): boolean {
-  const spelled = b.map(spell);
-  return a.some((powers) => spelled.includes(spell(powers)));
+  const spelled = b.map(spellPowers);
+  return a.some((powers) => spelled.includes(spellPowers(powers)));
 }
 
 /** Every way of reading a unit; none where a word of it is unknown. */
@@ -83,7 +88,9 @@ function readings(unit: string, names: Names): Powers[] {
     } else if (/^per$/iu.test(letters)) side = -1;
     else if (/^(?:squared?|sq|cubed|cubic)$/iu.test(letters)) {
       const exponent = /^s/iu.test(letters) ? 2 : 3;
-      if (/ed$/iu.test(letters)) found = found.map((reading) => raiseLast(reading, exponent));
+      // "4 squared" may be 16: a power that follows no unit is the number's.
+      if (/ed$/iu.test(letters))
+        found = found.filter(({ size }) => size > 0).map((reading) => raiseLast(reading, exponent));
       else nextPower = exponent;
     } else {
       const options = runs(letters, names, RUN_LIMIT);
@@ -99,7 +106,7 @@ function readings(unit: string, names: Names): Powers[] {
 /** Splits run-together letters into known symbols; untidy ones are split only where they are no name themselves. */
 function runs(letters: string, names: Names, limit: number): string[][] {
   const whole = (names.get(letters) ?? []).map((meaning) => [meaning]);
-  if (limit === 1 || (whole.length > 0 && names === UNIT_NAMES_ANY_CASE)) return whole;
+  if (limit === 1 || (whole.length > 0 && names !== UNIT_NAMES)) return whole;
   const split: string[][] = [];
   for (let end = 1; end < Math.min(letters.length, 4); end += 1) {
     for (const meaning of names.get(letters.slice(0, end)) ?? []) {
@@ -113,7 +120,7 @@ function runs(letters: string, names: Names, limit: number): string[][] {
 function joined(reading: Powers, run: readonly string[], side: number, exponent: number): Powers {
   const powers = new Map(reading);
   run.forEach((meaning, index) => {
-    multiply(powers, meaning, index === run.length - 1 ? exponent : side);
+    multiplyPowers(powers, meaning, index === run.length - 1 ? exponent : side);
   });
   return powers;
 }
@@ -122,17 +129,4 @@ function joined(reading: Powers, run: readonly string[], side: number, exponent:
 function raiseLast(reading: Powers, exponent: number): Powers {
   const last = [...reading].at(-1);
   return last === undefined ? reading : new Map([...reading, [last[0], last[1] * exponent]]);
-}
-
-function multiply(powers: Map<string, number>, product: string, exponent: number): void {
-  for (const factor of product.split(' ')) {
-    const [symbol = '', power] = factor.split('^');
-    powers.set(symbol, (powers.get(symbol) ?? 0) + Number(power) * exponent);
-  }
-}
-
-function expanded(reading: Powers): Powers {
-  const powers = new Map<string, number>();
-  for (const [symbol, power] of reading) multiply(powers, PRODUCTS[symbol] ?? `${symbol}^1`, power);
-  return powers;
 }

@@ -22,6 +22,8 @@ export interface Candidate {
   lastWasBelowHalf: boolean;
   /** Null where it was not answered today. */
   answeredToday: AnsweredToday | null;
+  /** True where it waits in another set that is open today. */
+  isTaken: boolean;
   /** Marks available for the question. */
   marks: number;
   /** The author's estimate or the median observed, reading the feedback included. */

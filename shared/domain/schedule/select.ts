@@ -48,9 +48,9 @@ export function selectSet({ candidates, today, budgetSeconds, maxSubjects, value
   return fillBudget([...queues, () => missedToday(candidates, today)], budgetSeconds, OVERSHOOT_SECONDS);
 }
 
-/** May be asked for the first time today: still to be examined, taught, and not answered today. */
-function isEligible({ examOn, taughtOn, answeredToday, memory }: Candidate, today: string): boolean {
-  if (answeredToday !== null || (memory !== null && memory.lastOn >= today)) return false;
+/** May be asked for the first time today: still to be examined, taught, not answered today nor in another set. */
+function isEligible({ examOn, taughtOn, answeredToday, memory, isTaken }: Candidate, today: string): boolean {
+  if (isTaken || answeredToday !== null || (memory !== null && memory.lastOn >= today)) return false;
   return examOn >= today && (taughtOn === null || taughtOn <= today);
 }
 
@@ -61,8 +61,8 @@ const bestFirst = (a: Chosen, b: Chosen): number =>
 function missedToday(candidates: readonly Candidate[], today: string): Chosen[] {
   return candidates
     .flatMap((candidate) => {
-      const { answeredToday, examOn } = candidate;
-      const isMissed = answeredToday?.answers === 1 && answeredToday.firstGrade === 1 && examOn >= today;
+      const { answeredToday, examOn, isTaken } = candidate;
+      const isMissed = !isTaken && answeredToday?.answers === 1 && answeredToday.firstGrade === 1 && examOn >= today;
       return isMissed ? [{ candidate, firstAt: answeredToday.firstAt }] : [];
     })
     .sort((a, b) => a.firstAt - b.firstAt || compareText(a.candidate.questionId, b.candidate.questionId))

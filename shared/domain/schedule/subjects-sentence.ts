@@ -1,3 +1,4 @@
+import type { Reason } from '#shared/schemas/reason.ts';
 import { compareText } from './compare-text.ts';
 
 /** One of the student's subjects, in the set or not. */
@@ -23,10 +24,30 @@ const PROPER = new Set(
 const NAMED = 3;
 
 /**
- * Says what a set mixes and, where it is true of the subjects that come up most, why. Takes all of the student's
- * subjects, so that "nearest" is nearest of all.
+ * Says what a set mixes and why: of the subjects that come up most where it is true of them, and of the questions where
+ * one reason holds for most. Takes all of the student's subjects, so that "nearest" is nearest of all.
  */
-export function subjectsSentence(subjects: readonly SubjectLine[]): string {
+export function subjectsSentence(subjects: readonly SubjectLine[], reasons: readonly Reason['kind'][] = []): string {
+  return [mixWords(subjects), mostWords(reasons)].filter(Boolean).join(' ');
+}
+
+/** What is true of most of a set's questions, by the reason each was chosen for. */
+const MOST_WORDS: Record<Reason['kind'], string> = {
+  lastLook: 'Most are a last look before a paper.',
+  missedLast: 'Most were missed last time.',
+  notFirm: 'Most are not firm yet.',
+  firstLook: 'Most are questions you have not met yet.',
+  paperSoon: 'Most are for a paper this week.',
+  weakTopic: 'Most are from your weaker topics.',
+  due: 'Most are due again.',
+};
+
+function mostWords(reasons: readonly Reason['kind'][]): string {
+  const most = reasons.find((kind) => reasons.filter((other) => other === kind).length * 2 > reasons.length);
+  return most ? MOST_WORDS[most] : '';
+}
+
+function mixWords(subjects: readonly SubjectLine[]): string {
   const inSet = subjects.filter(({ questions }) => questions > 0);
   const total = inSet.reduce((sum, { questions }) => sum + questions, 0);
   const [only] = inSet;

@@ -1,5 +1,6 @@
-import { useId, useState } from 'react';
+import { useState } from 'react';
 import type { TopicDto } from '#shared/schemas/curriculum.ts';
+import { FieldError, useFieldParts } from '#src/components/field-frame.tsx';
 import { useToast } from '#src/components/toast.tsx';
 import { dateWords } from '#src/lib/dates.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
@@ -15,8 +16,9 @@ interface TaughtFieldProps {
 
 /** When one class was taught one topic. Saved when the field is left or Enter is pressed. */
 export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProps) {
-  const id = useId();
   const set = useSetTaught(subjectId);
+  const error = set.isError ? problemWords(set.error) : undefined;
+  const { id, aria } = useFieldParts(undefined, { error });
   // Null while the field shows what is saved.
   const [typed, setTyped] = useState<string | null>(null);
   const toast = useToast();
@@ -47,12 +49,10 @@ export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProp
         <span className="sr-only">, {topic.title},</span> taught on
       </label>
       <input
-        id={id}
+        {...aria}
         type="date"
-        className={`inp sm num max-md:!min-h-11 ${set.isError ? 'bad' : ''}`}
+        className={`inp sm num max-md:!min-h-11 ${error ? 'bad' : ''}`}
         value={typed ?? saved}
-        aria-invalid={set.isError ? true : undefined}
-        aria-describedby={set.isError ? `${id}-error` : undefined}
         aria-busy={set.isPending}
         onChange={(event) => {
           setTyped(event.target.value);
@@ -63,11 +63,9 @@ export function TaughtField({ subjectId, topic, row, hasLabel }: TaughtFieldProp
           if (event.key === 'Enter') save();
         }}
       />
-      {set.isError ? (
-        <p id={`${id}-error`} role="alert" className="err mt-1">
-          {problemWords(set.error)}
-        </p>
-      ) : null}
+      <FieldError id={id} isSaid>
+        {error}
+      </FieldError>
     </div>
   );
 }

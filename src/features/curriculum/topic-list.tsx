@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import type { SubjectDto, TopicDto } from '#shared/schemas/curriculum.ts';
+import { tierWords } from '#src/lib/question-words.ts';
 import { TaughtField } from './taught-field.tsx';
 import { orderTopics, type TopicNode } from './topic-tree.ts';
 
@@ -10,7 +11,6 @@ interface TopicListProps {
   topics: TopicDto[];
 }
 
-const tierWords = { foundation: 'Foundation', higher: 'Higher' } as const;
 const indent = ['', 'pl-5', 'pl-10', 'pl-14'];
 
 function QuestionCount({ subjectId, topic }: { subjectId: string; topic: TopicDto }) {
@@ -25,7 +25,8 @@ function QuestionCount({ subjectId, topic }: { subjectId: string; topic: TopicDt
 
 const Title = ({ topic }: { topic: TopicDto }): ReactNode => (
   <>
-    {topic.title} {topic.tier ? <span className="tag">{tierWords[topic.tier]}</span> : null}
+    {topic.title} {topic.tier ? <span className="tag">{tierWords[topic.tier]}</span> : null}{' '}
+    {topic.option ? <span className="tag !whitespace-normal">{topic.option}</span> : null}
   </>
 );
 

@@ -1,6 +1,6 @@
 import type { Role } from '#shared/schemas/role.ts';
 
-export interface Sight {
+interface Sight {
   will: string[];
   willNot: string[];
 }

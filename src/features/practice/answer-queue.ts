@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { handInSchema, selfMarkSchema } from '#shared/schemas/practice.ts';
-import { unsentKey } from '#src/lib/unsent.ts';
+import { answersPrefix } from '#src/lib/kept-keys.ts';
+import type { KeptStore } from '#src/lib/kept-store.ts';
 
 /** When something was handed in: on this page's monotonic clock, and on the wall clock for after a reload. */
 const stampSchema = z.object({ page: z.string(), monotonic: z.number(), wall: z.number() });
@@ -15,6 +16,10 @@ const waitingSchema = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('selfMark'), setItemId: z.string(), body: selfMarkSchema }),
 ]);
 export type Waiting = z.output<typeof waitingSchema>;
+
+/** As it is kept: `turn` says which came first, whatever the clock did meanwhile. */
+const keptSchema = z.object({ turn: z.number(), entry: waitingSchema });
+type Kept = z.output<typeof keptSchema>;
 
 const PAGE = crypto.randomUUID();
 const AGE_LIMIT_MS = 90 * 24 * 3600 * 1000;
@@ -32,53 +37,56 @@ export function ageOf(stamp: z.output<typeof stampSchema>): number {
   return Math.round(Math.min(Math.max(age, 0), AGE_LIMIT_MS));
 }
 
+function readKept(text: string): Kept | null {
+  try {
+    return keptSchema.parse(JSON.parse(text));
+  } catch {
+    return null;
+  }
+}
+
 /**
- * Answers of one set that the server has not acknowledged, oldest first. They live in sessionStorage,
- * keyed by person and set, so that a reload keeps them and nobody else's session sends them.
+ * Answers of one set that the server has not acknowledged, oldest first. Each is kept under a key of its own, by
+ * person and set, so that two tabs cannot write over one another and nobody else's session sends them.
  */
 export class AnswerQueue {
-  readonly #key: string;
-  readonly #listeners = new Set<() => void>();
-  #waiting: readonly Waiting[];
+  readonly prefix: string;
+  readonly #store: KeptStore;
+  #texts = '';
+  #kept: Kept[] = [];
+  #waiting: readonly Waiting[] = [];
 
-  constructor(userId: string, setId: string) {
-    this.#key = unsentKey(userId, setId);
-    this.#waiting = this.#read();
+  constructor(store: KeptStore, userId: string, setId: string) {
+    this.prefix = answersPrefix(userId, setId);
+    this.#store = store;
   }
 
-  #read(): Waiting[] {
-    try {
-      const kept: unknown = JSON.parse(sessionStorage.getItem(this.#key) ?? '[]');
-      return z.array(waitingSchema).parse(kept);
-    } catch {
-      return [];
+  readonly subscribe = (listener: () => void): (() => void) => this.#store.subscribe(listener);
+
+  /** The same array for as long as nothing changes. */
+  readonly waiting = (): readonly Waiting[] => {
+    const texts = this.#store.entries(this.prefix).map(([, text]) => text);
+    const joined = texts.join('\n');
+    if (joined !== this.#texts) {
+      this.#texts = joined;
+      this.#kept = texts.flatMap((text) => readKept(text) ?? []).sort((a, b) => a.turn - b.turn);
+      this.#waiting = this.#kept.map(({ entry }) => entry);
     }
-  }
-
-  #write(waiting: readonly Waiting[]): void {
-    this.#waiting = waiting;
-    if (waiting.length > 0) sessionStorage.setItem(this.#key, JSON.stringify(waiting));
-    else sessionStorage.removeItem(this.#key);
-    for (const listener of this.#listeners) listener();
-  }
-
-  readonly subscribe = (listener: () => void): (() => void) => {
-    this.#listeners.add(listener);
-    return () => this.#listeners.delete(listener);
+    return this.#waiting;
   };
 
-  readonly waiting = (): readonly Waiting[] => this.#waiting;
-
   add(entry: Waiting): void {
-    this.#write([...this.#read().filter(({ body }) => body.id !== entry.body.id), entry]);
+    this.waiting();
+    const turn = (this.#kept.at(-1)?.turn ?? 0) + 1;
+    this.#store.write(this.prefix + entry.body.id, JSON.stringify({ turn, entry } satisfies Kept));
   }
 
   /** Puts back what a sign-out in another tab has wiped from this tab's storage. */
   keep(): void {
-    this.#write(this.#waiting);
+    this.#store.keep();
   }
 
   remove(id: string): void {
-    this.#write(this.#read().filter(({ body }) => body.id !== id));
+    this.#store.remove(this.prefix + id);
   }
 }

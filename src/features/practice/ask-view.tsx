@@ -25,7 +25,7 @@ interface AskViewProps {
 
 function footWords(isAway: boolean, isTimeUp: boolean): string {
   if (isTimeUp) return 'Time is up. Take what you need for this question; the set closes after it.';
-  if (isAway) return 'Marks appear when you are back. The next questions are already on this device.';
+  if (isAway) return 'Marks appear when you are back. The next questions are already on this page.';
   return 'You can hand in a blank answer. It counts as a gap and comes back sooner. Your teacher sees this answer. Your carer does not.';
 }
 

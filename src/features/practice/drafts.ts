@@ -1,5 +1,7 @@
 import { z } from 'zod';
 import { howSureSchema } from '#shared/schemas/how-sure.ts';
+import { draftsPrefix } from '#src/lib/kept-keys.ts';
+import type { KeptStore } from '#src/lib/kept-store.ts';
 
 /** What a student has put on one question and not handed in. */
 const draftSchema = z.object({
@@ -12,36 +14,31 @@ const draftSchema = z.object({
 });
 export type Draft = z.output<typeof draftSchema>;
 
-const draftsSchema = z.record(z.string(), draftSchema);
-
-const keyOf = (userId: string, setId: string) => `plait.draft.${userId}.${setId}`;
-
-function readAll(userId: string, setId: string): Record<string, Draft> {
+function readDraft(text: string | undefined): Draft | undefined {
+  if (text === undefined) return undefined;
   try {
-    const kept: unknown = JSON.parse(sessionStorage.getItem(keyOf(userId, setId)) ?? '{}');
-    return draftsSchema.parse(kept);
+    return draftSchema.parse(JSON.parse(text));
   } catch {
-    return {};
+    return undefined;
   }
 }
 
-function writeAll(userId: string, setId: string, drafts: Record<string, Draft>): void {
-  if (Object.keys(drafts).length > 0) sessionStorage.setItem(keyOf(userId, setId), JSON.stringify(drafts));
-  else sessionStorage.removeItem(keyOf(userId, setId));
-}
-
-/** The drafts of one person's set, kept on this device until handed in. */
-export interface Drafts {
+/** The drafts of one person's set, kept until handed in or until the set is finished. */
+interface Drafts {
   read: (itemId: string) => Draft | undefined;
   write: (itemId: string, draft: Draft) => void;
   remove: (itemId: string) => void;
+  clear: () => void;
 }
 
-export const draftsOf = (userId: string, setId: string): Drafts => ({
-  read: (itemId) => readAll(userId, setId)[itemId],
-  write: (itemId, draft) => writeAll(userId, setId, { ...readAll(userId, setId), [itemId]: draft }),
-  remove: (itemId) => {
-    const { [itemId]: _gone, ...rest } = readAll(userId, setId);
-    writeAll(userId, setId, rest);
-  },
-});
+export function draftsOf(store: KeptStore, userId: string, setId: string): Drafts {
+  const prefix = draftsPrefix(userId, setId);
+  return {
+    read: (itemId) => readDraft(store.read(prefix + itemId)),
+    write: (itemId, draft) => store.write(prefix + itemId, JSON.stringify(draft)),
+    remove: (itemId) => store.remove(prefix + itemId),
+    clear: () => {
+      for (const [key] of store.entries(prefix)) store.remove(key);
+    },
+  };
+}

@@ -1,9 +1,10 @@
 import { useId } from 'react';
 import { type HowSure, howSureSchema } from '#shared/schemas/how-sure.ts';
+import { FieldError } from '#src/components/field-frame.tsx';
 import { howSureWords, pencilLines } from './how-sure-words.ts';
 
 /** A pencil line: dotted, thin or thick. */
-export function PencilLine({ howSure }: { howSure: HowSure }) {
+function PencilLine({ howSure }: { howSure: HowSure }) {
   return (
     <svg viewBox="0 0 64 8" className="w-16" aria-hidden="true">
       <path d="M3 4h58" stroke="currentColor" strokeLinecap="round" {...pencilLines[howSure]} />
@@ -40,11 +41,9 @@ export function HowSureChoice({ value, onChange, error, isDisabled }: HowSureCho
           </label>
         ))}
       </div>
-      {error ? (
-        <p id={`${id}-error`} role="alert" className="err mt-1.5">
-          {error}
-        </p>
-      ) : null}
+      <FieldError id={id} className="mt-1.5" isSaid>
+        {error}
+      </FieldError>
     </fieldset>
   );
 }

@@ -1,17 +1,20 @@
 import { type ReactNode, useEffect, useRef } from 'react';
 import type { SetItemDto } from '#shared/schemas/practice.ts';
 import { Sheet, SheetRow } from '#src/components/sheet.tsx';
+import type { Keeping } from '#src/lib/kept-store.ts';
+import { keptAdvice, keptHeading } from './kept-words.ts';
 import { AnsweredRows, SubjectRow } from './question-rows.tsx';
 
 interface KeptViewProps {
   item: SetItemDto;
   number: number;
   responses: string[];
+  keeping: Keeping;
   steps: ReactNode;
 }
 
 /** An answer that waits on this device for the connection. */
-export function KeptView({ item, number, responses, steps }: KeptViewProps) {
+export function KeptView({ item, number, responses, keeping, steps }: KeptViewProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus({ preventScroll: true }), []);
   return (
@@ -22,9 +25,9 @@ export function KeptView({ item, number, responses, steps }: KeptViewProps) {
         <SheetRow hasRule>
           <div className="py-5">
             <h2 ref={heading} tabIndex={-1} className="!text-[1.125rem] !leading-6">
-              Kept on this device
+              {keptHeading(keeping)}
             </h2>
-            <p className="text-ink-2 mt-1">The mark appears when you are back. Keep this tab open until then.</p>
+            <p className="text-ink-2 mt-1">{keptAdvice[keeping]}</p>
           </div>
         </SheetRow>
       </Sheet>

@@ -14,7 +14,7 @@ import { AnsweredRows, SubjectRow } from './question-rows.tsx';
 type ResultPart = AnswerResultDto['parts'][number];
 
 /** Ticks and carets of one part, for the marks margin. */
-export function MarginMarks({ part, isDrawn }: { part: ResultPart | undefined; isDrawn: boolean }) {
+function MarginMarks({ part, isDrawn }: { part: ResultPart | undefined; isDrawn: boolean }) {
   const decided = part?.points.filter((point) => point.isEarned !== null) ?? [];
   return (
     <div className="flex flex-col items-center justify-end gap-1.5 h-full pb-6" aria-hidden="true">
@@ -28,8 +28,12 @@ export function MarginMarks({ part, isDrawn }: { part: ResultPart | undefined; i
   );
 }
 
-/** Letters and figures alone, so that "$25\\,000$" and "25000" are the same. */
-const bare = (text: string): string => text.toLowerCase().replace(/[^\p{L}\p{N}]/gu, '');
+/** Letters and figures alone, so that "$25\,000$" and "25000", or "$\frac{1}{4}$" and "1/4", are the same. */
+const bare = (text: string): string =>
+  text
+    .replace(/\\[a-z]+/gi, '')
+    .replace(/[^\p{L}\p{N}]/gu, '')
+    .toLowerCase();
 
 /** A model answer helps where marks were lost and no point of the scheme says it already. */
 const needsModelAnswer = ({ points, modelAnswer }: ResultPart): boolean =>
@@ -75,15 +79,19 @@ function headingFor({ marks, maxMarks }: AnswerResultDto): string {
   return lost === 1 ? 'Where the mark went' : 'Where the marks went';
 }
 
-function Explanation({ result }: { result: AnswerResultDto }) {
+/** What Plait says of each part it marked, and the author's guidance. */
+function Verdicts({ result }: { result: AnswerResultDto }) {
   const isSingle = result.parts.length === 1;
+  // Where the student marked it, the words only asked for that.
+  const hasWords = result.parts.some(({ markedBy }) => markedBy === 'plait');
+  if (!hasWords && !result.guidance) return null;
   return (
-    <section>
+    <>
       <h3>{headingFor(result)}</h3>
-      <div className="mt-1 grid gap-1.5">
+      <div className="mt-1 mb-5 grid gap-1.5">
         {result.parts.map((part, index) =>
-          // Where the student marked it, the words only asked for that. Parts never change places.
           part.markedBy === 'student' ? null : (
+            // Parts never change places.
             <div key={partLetter(index)}>
               {isSingle ? null : `${partLetter(index)} `}
               <Markdown isInline source={part.words} />
@@ -92,15 +100,23 @@ function Explanation({ result }: { result: AnswerResultDto }) {
         )}
         {result.guidance ? <Markdown source={result.guidance} /> : null}
       </div>
+    </>
+  );
+}
+
+function Explanation({ result }: { result: AnswerResultDto }) {
+  return (
+    <section>
+      <Verdicts result={result} />
       {result.next ? (
         <>
-          <h3 className="mt-5">What happens next</h3>
-          <p className="mt-1 text-ink-2">
+          <h3>What happens next</h3>
+          <p className="mt-1 mb-5 text-ink-2">
             <WithDay words={result.next.words} day={result.next.returnsOn} />
           </p>
         </>
       ) : null}
-      <h3 className="mt-5">Why this question</h3>
+      <h3>Why this question</h3>
       <p className="mt-1 text-ink-2">{result.why}</p>
     </section>
   );

@@ -12,11 +12,11 @@ export const langOf = (item: SetItemDto): string | undefined => (item.subject.st
 export function SubjectRow({ item, topic }: { item: SetItemDto; topic?: AnswerResultDto['topic'] | undefined }) {
   return (
     <SheetRow>
-      <div className="pt-4 md:pt-6 flex items-center justify-between gap-3 text-sm">
+      <div className="pt-4 md:pt-6 flex items-center justify-between gap-3 text-sm [overflow-wrap:anywhere]">
         <span className="flex flex-none items-center gap-2 font-semibold max-w-[60%]">
-          <StrandLabel subject={item.subject} /> {item.subject.name}
+          <StrandLabel subject={item.subject} /> <span className="min-w-0">{item.subject.name}</span>
         </span>
-        <span className="text-right text-balance text-ink-2">
+        <span className="min-w-0 text-right text-balance text-ink-2">
           {topic ? (
             <>
               Topic <b className="font-semibold text-ink">{topic.title}</b>

@@ -2,8 +2,8 @@ import { X } from 'lucide-react';
 import { type ReactNode, type Ref, useMemo } from 'react';
 import { Link } from 'react-router-dom';
 import { type SetDto, setKindWords } from '#shared/schemas/practice.ts';
-import { Ribbon } from '#src/components/ribbon.tsx';
 import { type RibbonItem, ribbonSizes } from '#src/components/ribbon-geometry.ts';
+import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { timerWords } from '#src/lib/dates.ts';
 import { useHiddenTime } from './use-hidden-time.ts';
 
@@ -78,7 +78,7 @@ export function RunnerFrame({ state, seconds, headingRef, notes, children }: Run
     <div className="flex min-h-screen flex-col">
       <title>{`Question ${place + 1}, ${name.toLowerCase()} – Plait`}</title>
       <header className="px-5 md:px-10 pt-4 md:pt-5 pb-3">
-        <div className="max-w-[62rem] mx-auto grid grid-cols-[auto_1fr_auto] items-center gap-4 md:gap-8">
+        <div className="max-w-[62rem] mx-auto grid grid-cols-[auto_1fr_auto] md:grid-cols-[1fr_minmax(0,34rem)_1fr] items-center gap-4 md:gap-6">
           <Link to="/today" className="btn bare !px-0 !min-h-11 min-w-11 !justify-start">
             <X aria-hidden="true" size={20} strokeWidth={1.75} />
             <span className="max-md:sr-only">
@@ -87,10 +87,10 @@ export function RunnerFrame({ state, seconds, headingRef, notes, children }: Run
           </Link>
           <div className="flex justify-center min-w-0">
             <span className="hidden md:flex justify-center w-full max-w-[34rem]">
-              <Ribbon items={items} size={ribbonSizes.runner} name={name} room={544} />
+              <RibbonRows items={items} size={ribbonSizes.runner} name={name} room={544} />
             </span>
             <span className="md:hidden flex justify-center w-full">
-              <Ribbon items={items} size={ribbonSizes.runnerPhone} name={name} room={200} />
+              <RibbonRows items={items} size={ribbonSizes.runnerPhone} name={name} room={200} />
             </span>
           </div>
           <div className="num text-right leading-tight">

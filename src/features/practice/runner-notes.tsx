@@ -1,4 +1,6 @@
 import type { ReactNode } from 'react';
+import type { Keeping } from '#src/lib/kept-store.ts';
+import { keptUntilSent } from './kept-words.ts';
 import type { Away } from './use-answer-queue.ts';
 
 const numbers = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight', 'Nine', 'Ten'];
@@ -20,6 +22,7 @@ function Note({ tone, children }: { tone: 'cau' | 'gap' | ''; children: ReactNod
 
 interface RunnerNotesProps {
   away: Away;
+  keeping: Keeping;
   /** Numbers of the questions whose answers wait on this device. */
   waiting: number[];
   /** Questions passed over while offline that are marked now. */
@@ -31,14 +34,23 @@ interface RunnerNotesProps {
 }
 
 /** What there is to know beside the question, read out as it changes. */
-export function RunnerNotes({ away, waiting, marked, refusal, isAlready }: RunnerNotesProps) {
+export function RunnerNotes({ away, keeping, waiting, marked, refusal, isAlready }: RunnerNotesProps) {
   return (
     <div role="status">
       {away ? (
         <Note tone="cau">
           <p>
-            <b>{away === 'offline' ? 'You are offline.' : 'Plait is busy.'}</b> Your answers are kept on this device and
-            sent when {away === 'offline' ? 'you are back' : 'it has time'}.{waitingWords(waiting)}
+            <b>{away === 'offline' ? 'You are offline.' : 'Plait is busy.'}</b>{' '}
+            {keptUntilSent('Your answers are', keeping, away)}
+            {waitingWords(waiting)}
+          </p>
+        </Note>
+      ) : null}
+      {!away && keeping === 'page' ? (
+        <Note tone="cau">
+          <p>
+            <b>This browser stores nothing.</b> What you type is only on this page: hand it in before you leave or
+            reload it.
           </p>
         </Note>
       ) : null}

@@ -13,11 +13,12 @@ const marksSaid = ({ marks, maxMarks }: AnswerResultDto): string =>
   marks === null ? 'Handed in. Mark it against the scheme.' : `${marks} of ${maxMarks} marks.`;
 
 function Notes({ set, control }: { set: SetDto; control: RunnerControl }) {
-  const { waiting, passedIds, place, item, away, refusal, failure, goOn } = control;
+  const { waiting, passedIds, place, item, away, keeping, refusal, failure, goOn } = control;
   return (
     <>
       <RunnerNotes
         away={away}
+        keeping={keeping}
         waiting={set.items.flatMap(({ id }, index) =>
           waiting.some((entry) => entry.setItemId === id) ? [index + 1] : [],
         )}
@@ -74,13 +75,13 @@ interface AnsweredProps {
 
 /** Everything after handing in: kept, to be marked by its student, or marked. */
 function Answered({ control, item, viewKey }: AnsweredProps) {
-  const { entry, away, place, drafts, saveTicks, isFresh } = control;
+  const { entry, away, keeping, place, drafts, saveTicks, isFresh } = control;
   const { result } = item;
   const steps = <Steps control={control} />;
   const number = place + 1;
   if (!result || (entry && away)) {
     const responses = entry?.kind === 'answer' ? entry.body.responses : (result?.responses ?? []);
-    return <KeptView key={viewKey} item={item} number={number} responses={responses} steps={steps} />;
+    return <KeptView key={viewKey} {...{ item, number, responses, keeping, steps }} />;
   }
   if (result.state === 'selfMark') {
     return (

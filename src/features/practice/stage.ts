@@ -2,7 +2,7 @@ import type { SetDto, SetItemDto } from '#shared/schemas/practice.ts';
 import type { Waiting } from './answer-queue.ts';
 
 /** What is to be done with an item: ask it, wait for the server, let it be marked by its student, or nothing more. */
-export type Stage = 'ask' | 'waiting' | 'selfMark' | 'marked';
+type Stage = 'ask' | 'waiting' | 'selfMark' | 'marked';
 
 export function stageOf(item: SetItemDto, waiting: readonly Waiting[]): Stage {
   if (waiting.some((entry) => entry.setItemId === item.id)) return 'waiting';
@@ -23,11 +23,11 @@ export const secondsIn = (set: SetDto, waiting: readonly Waiting[]): number =>
 
 /**
  * Place of the next item to work on, from 0, or −1 where none is left: first what was never asked, unless
- * the time is up, then what its student has to mark.
+ * the time is up or the set is finished, then what its student has to mark.
  */
 export function nextPlaceIn(set: SetDto, waiting: readonly Waiting[], exceptId?: string): number {
   const find = (stage: Stage) =>
     set.items.findIndex((item) => item.id !== exceptId && stageOf(item, waiting) === stage);
-  const toAsk = secondsIn(set, waiting) < set.budgetSeconds ? find('ask') : -1;
+  const toAsk = set.status === 'open' && secondsIn(set, waiting) < set.budgetSeconds ? find('ask') : -1;
   return toAsk >= 0 ? toAsk : find('selfMark');
 }

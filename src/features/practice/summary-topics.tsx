@@ -1,46 +1,37 @@
 import type { SetSummaryDto } from '#shared/schemas/practice.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { returnWords } from '#src/lib/dates.ts';
-import { keyed } from '#src/lib/keyed.ts';
 
-type Row = SetSummaryDto['topics'][number];
+type SummaryTopic = SetSummaryDto['topics'][number];
 
 interface Cell {
-  row: Row;
+  row: SummaryTopic;
   isFirst: boolean;
+  /** "7 of 10" over the topics of the subject; null where it has only this one, or is not the first row. */
+  total: string | null;
 }
+
+const marksWords = (rows: SummaryTopic[]): string =>
+  `${rows.reduce((sum, { marks }) => sum + marks, 0)} of ${rows.reduce((sum, { maxMarks }) => sum + maxMarks, 0)}`;
 
 /** Rows by subject, subjects in the order they first appear. */
-function bySubject(rows: Row[]): Cell[] {
+function bySubject(rows: SummaryTopic[]): Cell[] {
   const ids = [...new Set(rows.map(({ subject }) => subject.id))];
-  return ids.flatMap((id) =>
-    rows.filter(({ subject }) => subject.id === id).map((row, index) => ({ row, isFirst: index === 0 })),
-  );
+  return ids.flatMap((id) => {
+    const own = rows.filter(({ subject }) => subject.id === id);
+    return own.map((row, index) => ({
+      row,
+      isFirst: index === 0,
+      total: index === 0 && own.length > 1 ? marksWords(own) : null,
+    }));
+  });
 }
 
-function recallWords({ recallBefore, recallAfter }: Row): string {
-  if (recallAfter === null) return '–';
-  return recallBefore === null ? `${recallAfter}%` : `${recallBefore} → ${recallAfter}%`;
-}
+/** A topic of which nothing is marked yet has no marks to show. */
+const ownMarks = (row: SummaryTopic): string => (row.maxMarks === 0 ? 'Not marked' : marksWords([row]));
 
-function Recall({ row }: { row: Row }) {
-  const { recallBefore, recallAfter } = row;
-  return (
-    <>
-      <span aria-hidden="true">{recallWords(row)}</span>
-      <span className="sr-only">
-        {recallAfter === null
-          ? 'no figure yet'
-          : recallBefore === null
-            ? `${recallAfter} per cent`
-            : `from ${recallBefore} to ${recallAfter} per cent`}
-      </span>
-    </>
-  );
-}
-
-/** Marks by topic, expected recall before and after, and when each comes back. */
-export function SummaryTopics({ topics, today }: { topics: Row[]; today: string }) {
+/** Marks by topic, in all by subject, and when each topic comes back. */
+export function SummaryTopics({ topics, today }: { topics: SummaryTopic[]; today: string }) {
   return (
     <section className="mrow" aria-labelledby="by-topic">
       <h2 className="lab" id="by-topic">
@@ -60,7 +51,7 @@ export function SummaryTopics({ topics, today }: { topics: Row[]; today: string 
                 Marks
               </th>
               <th scope="col" className="font-semibold pb-1 text-right pl-5">
-                Expected recall
+                Subject
               </th>
               <th scope="col" className="font-semibold pb-1 text-right pl-5">
                 Comes back
@@ -68,9 +59,9 @@ export function SummaryTopics({ topics, today }: { topics: Row[]; today: string 
             </tr>
           </thead>
           <tbody>
-            {keyed(bySubject(topics), ({ row }) => row.topic.id).map(({ key, item: { row, isFirst } }) => (
+            {bySubject(topics).map(({ row, isFirst, total }) => (
               <tr
-                key={key}
+                key={row.topic.id}
                 className="border-b border-rule-soft max-sm:grid max-sm:grid-cols-[2.5rem_minmax(0,1fr)_auto]"
               >
                 <td className="py-2 max-sm:row-span-2">
@@ -78,25 +69,22 @@ export function SummaryTopics({ topics, today }: { topics: Row[]; today: string 
                   <span className="sr-only">{row.subject.name}</span>
                 </td>
                 <td className="py-2 [overflow-wrap:anywhere]">{row.topic.title}</td>
-                <td className="py-2 text-right whitespace-nowrap">
-                  {row.marks} of {row.maxMarks}
+                <td className="py-2 text-right whitespace-nowrap">{ownMarks(row)}</td>
+                <td className="py-2 text-ink-2 text-sm whitespace-nowrap sm:text-right sm:pl-5 max-sm:pt-0 max-sm:order-last">
+                  {total ? (
+                    <>
+                      <span className="sm:sr-only">{row.subject.name} </span>
+                      {total}
+                    </>
+                  ) : null}
                 </td>
-                <td className="py-2 text-ink-2 text-sm whitespace-nowrap sm:text-right sm:pl-5 max-sm:pt-0">
-                  <span className="sm:hidden" aria-hidden="true">
-                    Recall{' '}
-                  </span>
-                  <Recall row={row} />
-                </td>
-                <td className="py-2 text-ink-2 text-sm text-right whitespace-nowrap sm:pl-5 max-sm:pt-0">
+                <td className="py-2 text-ink-2 text-sm whitespace-nowrap sm:text-right sm:pl-5 max-sm:pt-0 max-sm:order-last">
                   {row.returnsOn ? returnWords(row.returnsOn, today) : '–'}
                 </td>
               </tr>
             ))}
           </tbody>
         </table>
-        <p className="hint mt-3">
-          Expected recall is an estimate of what you would remember now, before the set and after it.
-        </p>
       </div>
     </section>
   );

@@ -1,6 +1,7 @@
 import { notifyManager } from '@tanstack/react-query';
 import { useCallback, useEffect, useMemo, useRef, useState, useSyncExternalStore } from 'react';
 import { isTransient, NetworkError, ProblemError } from '#src/lib/api.ts';
+import { kept, onGoneElsewhere } from '#src/lib/kept.ts';
 import { isSignedOut, noticeSignedOut } from '#src/lib/query-client.ts';
 import { handIn, saveSelfMark } from '#src/queries/practice.ts';
 import { AnswerQueue, ageOf, type Waiting } from './answer-queue.ts';
@@ -14,6 +15,13 @@ export type Away = 'offline' | 'busy' | null;
 export interface Refusal {
   entry: Waiting;
   words: string;
+}
+
+interface QueueNews {
+  /** The server refused an answer for good. */
+  onRefused: (refusal: Refusal) => void;
+  /** Another tab has sent an answer that waited here too. */
+  onSentElsewhere: () => void;
 }
 
 const sendOne = (setId: string, entry: Waiting) =>
@@ -40,19 +48,19 @@ const waitAfter = (error: unknown, failures: number): number => {
 
 /**
  * Sends what was handed in, one after another and oldest first, and tries again with growing waits and
- * when the connection returns. An answer the server refuses for good is given back through `onRefused`.
+ * when the connection returns.
  */
-export function useAnswerQueue(userId: string, setId: string, onRefused: (refusal: Refusal) => void) {
-  const queue = useMemo(() => new AnswerQueue(userId, setId), [userId, setId]);
+export function useAnswerQueue(userId: string, setId: string, news: QueueNews) {
+  const queue = useMemo(() => new AnswerQueue(kept, userId, setId), [userId, setId]);
   const waiting = useSyncExternalStore(queue.subscribe, queue.waiting);
   const [away, setAway] = useState<Away>(null);
   const isStopped = useRef(false);
   const isSending = useRef(false);
   const failures = useRef(0);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
-  const refused = useRef(onRefused);
+  const told = useRef(news);
   useEffect(() => {
-    refused.current = onRefused;
+    told.current = news;
   });
 
   const drain = useCallback(async () => {
@@ -65,7 +73,9 @@ export function useAnswerQueue(userId: string, setId: string, onRefused: (refusa
           await sendOne(setId, entry);
         } catch (error) {
           if (isSignedOut(error) || isTransient(error)) throw error;
-          refused.current({
+          // Nobody would hear of it here any more: the page that is there now sends it again and says so.
+          if (isStopped.current) return;
+          told.current.onRefused({
             entry,
             words: error instanceof ProblemError ? error.detail : 'The server did not take it.',
           });
@@ -108,6 +118,14 @@ export function useAnswerQueue(userId: string, setId: string, onRefused: (refusa
       window.removeEventListener('offline', leave);
     };
   }, [drain, queue]);
+
+  useEffect(
+    () =>
+      onGoneElsewhere((key) => {
+        if (key.startsWith(queue.prefix)) told.current.onSentElsewhere();
+      }),
+    [queue],
+  );
 
   const add = useCallback(
     (entry: Waiting) => {

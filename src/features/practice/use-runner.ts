@@ -1,5 +1,6 @@
 import { useEffect, useMemo, useState } from 'react';
 import type { SetDto, SetSummaryDto } from '#shared/schemas/practice.ts';
+import { kept, useKeeping } from '#src/lib/kept.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { stampNow } from './answer-queue.ts';
 import { type Draft, draftsOf } from './drafts.ts';
@@ -37,7 +38,7 @@ function useEnd(finish: RunnerProps['finish'], onFinished: RunnerProps['onFinish
 
 /** Where a set stands, and every act on it. */
 export function useRunner({ userId, set, wanted, onPlace, onReload, finish, onFinished }: RunnerProps) {
-  const drafts = useMemo(() => draftsOf(userId, set.id), [userId, set.id]);
+  const drafts = useMemo(() => draftsOf(kept, userId, set.id), [userId, set.id]);
   const [refusal, setRefusal] = useState<{ itemId: string; words: string; count: number } | null>(null);
   const [passedIds, setPassedIds] = useState<string[]>([]);
   const [freshId, setFreshId] = useState<string | null>(null);
@@ -54,7 +55,8 @@ export function useRunner({ userId, set, wanted, onPlace, onReload, finish, onFi
     setRefusal((last) => ({ itemId: setItemId, words, count: (last?.count ?? 0) + 1 }));
     onReload();
   };
-  const { waiting, away, add } = useAnswerQueue(userId, set.id, giveBack);
+  const { waiting, away, add } = useAnswerQueue(userId, set.id, { onRefused: giveBack, onSentElsewhere: onReload });
+  const keeping = useKeeping();
 
   const answeredIds = useMemo(() => answeredIn(set, waiting), [set, waiting]);
   const nextPlace = nextPlaceIn(set, waiting);
@@ -100,6 +102,7 @@ export function useRunner({ userId, set, wanted, onPlace, onReload, finish, onFi
     isFresh: item !== null && freshId === item.id,
     waiting,
     away,
+    keeping,
     answeredIds,
     secondsBefore: secondsIn(set, waiting),
     nextPlace,

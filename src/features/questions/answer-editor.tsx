@@ -2,7 +2,7 @@ import { useController, useFormContext, useWatch } from 'react-hook-form';
 import { CheckBox, Field, Select, TextArea } from '#src/components/field.tsx';
 import { Segmented } from '#src/components/segmented.tsx';
 import { errorAt, fieldId } from './check-question.ts';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 const answerKinds = [
   { value: 'number', label: 'A number' },
@@ -74,7 +74,8 @@ function TextAnswer({ part }: { part: number }) {
   const { register, formState } = useFormContext<QuestionForm>();
   const name = `parts.${part}.answer` as const;
   return (
-    <div className="grid gap-3 sm:grid-cols-2">
+    // Hints of the same height, so that the two boxes stand level.
+    <div className="grid gap-3 sm:grid-cols-2 sm:[&_.hint]:min-h-9">
       <TextArea
         isSmall
         label="Accepted answers"
@@ -95,7 +96,7 @@ function TextAnswer({ part }: { part: number }) {
       />
       <Select isSmall label="An answer on neither list" frameClass="sm:col-span-2" {...register(`${name}.unlisted`)}>
         <option value="selfMark">is marked by the student against the scheme</option>
-        <option value="wrong">earns nothing</option>
+        <option value="wrong">earns nothing, where the part is worth one mark</option>
       </Select>
     </div>
   );

@@ -1,7 +1,8 @@
 import { type FieldErrors, type FieldPath, get, type Resolver, set } from 'react-hook-form';
 import { reviewableSchema } from '#shared/schemas/question.ts';
 import type { FieldProblem } from '#src/components/error-summary.tsx';
-import { type QuestionForm, readTyped, toDraft } from './question-form.ts';
+import { readTyped, toDraft } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 /** The id of the control at a form path, so that the error summary can lead to it. */
 export const fieldId = (path: string) => `q-${path.replaceAll('.', '-')}`;
@@ -9,7 +10,7 @@ export const fieldId = (path: string) => `q-${path.replaceAll('.', '-')}`;
 type Path = readonly PropertyKey[];
 
 /** From a place in the draft to the control that holds it. */
-export function toFormPath(path: Path): string {
+function toFormPath(path: Path): string {
   const steps = path.map(String);
   if (steps[0] === 'body') steps.shift();
   if (steps[0] === 'topicIds') return 'topicIds';
@@ -86,6 +87,7 @@ const PLACES = [
   'topicIds',
   'kind',
   'tier',
+  'option',
   'expectedSeconds',
   'stem',
   'parts',

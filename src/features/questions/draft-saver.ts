@@ -5,17 +5,22 @@ export type SaveState =
   | { kind: 'saved' }
   | { kind: 'failed'; why: SaveFailure };
 
-/** `stale`: a newer save exists. `offline` and `busy` are tried again; the others wait for the writer. */
+/**
+ * `stale`: a newer save exists. `moved`: it is no draft any more, so nothing can be saved onto it. `offline` and
+ * `busy` are tried again; the others wait for the writer.
+ */
 export interface SaveFailure {
-  kind: 'stale' | 'offline' | 'busy' | 'signedOut' | 'refused';
+  kind: 'stale' | 'moved' | 'offline' | 'busy' | 'signedOut' | 'refused';
   detail: string;
 }
+
+const isStuck = (failure: SaveFailure | null): boolean => failure?.kind === 'stale' || failure?.kind === 'moved';
 
 interface SaverPort<Draft> {
   read: () => Draft;
   /** Sends a draft; resolves with the revision it became. `revision` is null for a question not yet made. */
   send: (revision: number | null, draft: Draft) => Promise<number>;
-  explain: (error: unknown) => SaveFailure;
+  explain: (error: unknown) => SaveFailure | Promise<SaveFailure>;
   onState: (state: SaveState) => void;
 }
 
@@ -47,7 +52,7 @@ export class DraftSaver<Draft> {
   /** Call after each change of the form. */
   changed() {
     this.#typed += 1;
-    if (this.#failure?.kind === 'stale') return;
+    if (isStuck(this.#failure)) return;
     if (!this.#running && !this.#failure) this.#port.onState({ kind: 'unsaved' });
     this.#wait(PAUSE_MS);
   }
@@ -89,13 +94,13 @@ export class DraftSaver<Draft> {
   }
 
   async #sendOnce(): Promise<boolean> {
-    if (this.#failure?.kind === 'stale') return false;
+    if (isStuck(this.#failure)) return false;
     const upTo = this.#typed;
     this.#port.onState({ kind: 'saving' });
     try {
       this.#revision = await this.#port.send(this.#revision, this.#port.read());
     } catch (error) {
-      this.#fail(this.#port.explain(error));
+      this.#fail(await this.#port.explain(error));
       return false;
     }
     this.#saved = upTo;

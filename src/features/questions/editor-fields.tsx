@@ -2,7 +2,7 @@ import { useFormContext } from 'react-hook-form';
 import type { SubjectDto, TopicDto } from '#shared/schemas/curriculum.ts';
 import { MarkdownEditor } from './markdown-editor.tsx';
 import { PartsEditor } from './parts-editor.tsx';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 import { SetupFields } from './setup-fields.tsx';
 
 interface EditorFieldsProps {
@@ -19,13 +19,7 @@ export function EditorFields({ subject, topics }: EditorFieldsProps) {
       <MarkdownEditor control={control} name="stem" label="Question" hint="Markdown, with $…$ for maths" rows={6} />
       <PartsEditor hasCodes={subject.strand === 'ma'} />
       <div className="mt-6">
-        <MarkdownEditor
-          control={control}
-          name="guidance"
-          label="Guidance"
-          hint="Shown after the answer: the route, or where marks go"
-          rows={3}
-        />
+        <MarkdownEditor control={control} name="guidance" label="Guidance" hint="Shown after the answer" rows={3} />
       </div>
     </>
   );

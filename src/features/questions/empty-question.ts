@@ -1,4 +1,4 @@
-import type { AnswerForm, PartForm, PointForm, QuestionForm } from './question-form.ts';
+import type { AnswerForm, PartForm, PointForm, QuestionForm } from './question-shape.ts';
 
 export const emptyPoint = (): PointForm => ({ code: '', text: '', marks: 1, notes: [] });
 
@@ -28,6 +28,7 @@ export const emptyPart = (): PartForm => ({
 export const emptyQuestion = (topicIds: string[] = []): QuestionForm => ({
   kind: 'shortAnswer',
   tier: '',
+  option: '',
   expectedSeconds: 90,
   topicIds,
   stem: '',

@@ -27,11 +27,15 @@ export function LiveStatistics({ question, zone }: LiveStatisticsProps) {
         Version {live.version}
         {since}
       </h2>
-      <dl className="mt-2 grid grid-cols-2 gap-4 sm:grid-cols-3">
+      <dl className="mt-2 flex flex-wrap justify-between gap-x-6 gap-y-3">
         {figures.map(({ name, value, none }) => (
           <div key={name}>
             <dt className="hint">{name}</dt>
-            <dd className={value === null ? 'pt-1 text-sm text-ink-2' : 'disp num text-[1.5rem] leading-8'}>
+            <dd
+              className={
+                value === null ? 'pt-1 text-sm text-ink-2' : 'disp num text-[1.375rem] leading-8 whitespace-nowrap'
+              }
+            >
               {value ?? none}
             </dd>
           </div>

@@ -1,6 +1,6 @@
 export type MarkdownAct = 'bold' | 'italic' | 'list' | 'maths' | 'superscript' | 'subscript';
 
-export interface Edit {
+interface Edit {
   /** The stretch to replace, and what replaces it. */
   from: number;
   to: number;
@@ -11,7 +11,7 @@ export interface Edit {
 }
 
 /** True where a place in Markdown lies between two dollar signs. */
-export function isInMaths(source: string, at: number): boolean {
+function isInMaths(source: string, at: number): boolean {
   const before = source.slice(0, at).replaceAll('\\$', '');
   return (before.match(/\$/g)?.length ?? 0) % 2 === 1;
 }

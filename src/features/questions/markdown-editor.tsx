@@ -1,10 +1,11 @@
 import { Bold, Italic, List, Sigma } from 'lucide-react';
 import { type KeyboardEvent, type ReactNode, useRef } from 'react';
 import { type Control, useController } from 'react-hook-form';
+import { FieldFrame, useFieldParts } from '#src/components/field-frame.tsx';
 import { type FormPath, fieldId } from './check-question.ts';
 import { editMarkdown, type MarkdownAct } from './markdown-edit.ts';
 import { MathsOverlay } from './maths-overlay.tsx';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 interface MarkdownEditorProps {
   control: Control<QuestionForm>;
@@ -54,15 +55,22 @@ function moveAlong(event: KeyboardEvent<HTMLDivElement>) {
 export function MarkdownEditor({ control, name, label, hint, rows = 5 }: MarkdownEditorProps) {
   const { field, fieldState } = useController({ control, name });
   const area = useRef<HTMLTextAreaElement | null>(null);
-  const id = fieldId(name);
   const error = fieldState.error?.message;
+  const { id, aria } = useFieldParts(fieldId(name), { hint, error });
   const value = typeof field.value === 'string' ? field.value : '';
   return (
-    <div className="field">
-      <div className="flex items-baseline justify-between gap-3">
-        <label htmlFor={id}>{label}</label>
-        {hint ? <span className="hint text-right">{hint}</span> : null}
-      </div>
+    <FieldFrame
+      id={id}
+      label={label}
+      error={error}
+      aside={
+        hint ? (
+          <span id={`${id}-hint`} className="hint text-right">
+            {hint}
+          </span>
+        ) : null
+      }
+    >
       <div className={`rounded-sm bg-sheet ${error ? 'border-2 border-gap' : 'border-[1.5px] border-edge'}`}>
         <div
           role="toolbar"
@@ -93,13 +101,11 @@ export function MarkdownEditor({ control, name, label, hint, rows = 5 }: Markdow
               area.current = element;
               field.ref(element);
             }}
-            id={id}
+            {...aria}
             rows={rows}
             style={{ minHeight: `${rows * LINE_REM + 1.25}rem` }}
             spellCheck
             className="block w-full resize-y bg-transparent px-3 py-2.5 [field-sizing:content] [overflow-wrap:anywhere]"
-            aria-invalid={error ? true : undefined}
-            aria-describedby={error ? `${id}-error` : undefined}
             onKeyDown={(event) => {
               const act = buttons.find(({ key }) => key === event.key.toLowerCase())?.act;
               if (!act || !(event.ctrlKey || event.metaKey) || event.altKey || event.shiftKey) return;
@@ -110,11 +116,6 @@ export function MarkdownEditor({ control, name, label, hint, rows = 5 }: Markdow
           <MathsOverlay source={value} area={area} />
         </div>
       </div>
-      {error ? (
-        <p id={`${id}-error`} className="err mt-1">
-          {error}
-        </p>
-      ) : null}
-    </div>
+    </FieldFrame>
   );
 }

@@ -2,9 +2,10 @@ import { useFormContext, useWatch } from 'react-hook-form';
 import { TextArea } from '#src/components/field.tsx';
 import { Tick } from '#src/components/tick.tsx';
 import { useDebounced } from '#src/lib/use-debounced.ts';
-import { tryAnswer } from './asked-question.ts';
 import { errorAt, fieldId } from './check-question.ts';
-import { type PartForm, type QuestionForm, toDraftPart } from './question-form.ts';
+import { tryAnswer } from './draft-marking.ts';
+import { toDraftPart } from './question-form.ts';
+import type { PartForm, QuestionForm } from './question-shape.ts';
 
 /** The model answer, marked as it is typed: it has to earn every mark. */
 export function ModelAnswer({ part }: { part: number }) {

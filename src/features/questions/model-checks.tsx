@@ -2,7 +2,7 @@ import type { DraftBody } from '#shared/schemas/question.ts';
 import type { QuestionKind } from '#shared/schemas/question-body.ts';
 import { partLetter } from '#src/components/exam-question.tsx';
 import { Tick } from '#src/components/tick.tsx';
-import { tryAnswer } from './asked-question.ts';
+import { tryAnswer } from './draft-marking.ts';
 
 /** Whether Plait gives each model answer full marks. A recall card is marked by the student, so it has no such check. */
 export function ModelChecks({ body, kind }: { body: DraftBody; kind: QuestionKind }) {

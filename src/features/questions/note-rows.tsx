@@ -3,7 +3,7 @@ import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Field } from '#src/components/field.tsx';
 import { fieldId } from './check-question.ts';
 import { focusSoon } from './focus-soon.ts';
-import { type NoteKind, noteWords, type QuestionForm } from './question-form.ts';
+import { type NoteKind, noteWords, type QuestionForm } from './question-shape.ts';
 
 interface NoteRowsProps {
   name: `parts.${number}.points.${number}.notes`;

@@ -7,7 +7,7 @@ import { fieldId } from './check-question.ts';
 import { MarkdownEditor } from './markdown-editor.tsx';
 import { ModelAnswer } from './model-answer.tsx';
 import { PointsEditor } from './points-editor.tsx';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 import { WholeNumberField } from './whole-number-field.tsx';
 
 interface PartEditorProps {

@@ -7,7 +7,7 @@ import { fieldId } from './check-question.ts';
 import { emptyPart } from './empty-question.ts';
 import { focusSoon } from './focus-soon.ts';
 import { PartEditor } from './part-editor.tsx';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 const MOST_PARTS = 8;
 const addId = fieldId('parts.add');

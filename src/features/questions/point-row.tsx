@@ -3,7 +3,7 @@ import { useFormContext } from 'react-hook-form';
 import { Select, TextArea } from '#src/components/field.tsx';
 import { errorAt, fieldId } from './check-question.ts';
 import { NoteRows } from './note-rows.tsx';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 import { WholeNumberField } from './whole-number-field.tsx';
 
 interface PointRowProps {

@@ -6,7 +6,7 @@ import { errorAt, fieldId } from './check-question.ts';
 import { emptyPoint } from './empty-question.ts';
 import { focusSoon } from './focus-soon.ts';
 import { PointRow } from './point-row.tsx';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 interface PointsEditorProps {
   part: number;

@@ -27,7 +27,7 @@ function Filter({ label, value, options, onChange, frameClass = '' }: FilterProp
       isLabelHidden
       label={label}
       frameClass={`max-sm:flex-1 max-sm:basis-[8.5rem] ${frameClass}`}
-      className="!min-h-9 max-w-full !font-medium sm:!w-auto"
+      className="!min-h-9 max-w-full !font-medium sm:!w-auto sm:max-w-[10.5rem]"
       value={value}
       onChange={(event) => onChange(event.target.value || undefined)}
     >

@@ -1,60 +1,15 @@
 import { readNumber } from '#shared/domain/marking/read-number.ts';
-import type { Tier } from '#shared/schemas/common.ts';
 import type { DraftBody, QuestionVersionDto, SaveDraft } from '#shared/schemas/question.ts';
 import type { QuestionKind } from '#shared/schemas/question-body.ts';
 import { emptyAnswer } from './empty-question.ts';
+import type { AnswerForm, NoteKind, PartForm, PointForm, QuestionForm } from './question-shape.ts';
 
 export type DraftFields = Omit<SaveDraft, 'revision'>;
 type DraftPart = DraftBody['parts'][number];
 type DraftAnswer = DraftPart['answer'];
 type DraftPoint = DraftPart['points'][number];
 
-export const noteWords = { allow: 'Allow', ignore: 'Ignore', reject: 'Reject' } as const;
-export type NoteKind = keyof typeof noteWords;
 const noteKinds: NoteKind[] = ['allow', 'ignore', 'reject'];
-
-export interface PointForm {
-  code: '' | 'M' | 'A' | 'B';
-  text: string;
-  marks: number;
-  notes: { kind: NoteKind; text: string }[];
-}
-
-export interface AnswerForm {
-  kind: DraftAnswer['kind'];
-  /** Numbers stay as typed, so that "0." or "1e" survives until it is finished. */
-  value: string;
-  accuracy: 'tolerance' | 'range';
-  tolerance: string;
-  min: string;
-  max: string;
-  unit: string;
-  isUnitRequired: boolean;
-  /** One answer a line. */
-  accept: string;
-  reject: string;
-  unlisted: 'wrong' | 'selfMark';
-}
-
-export interface PartForm {
-  prompt: string;
-  lines: number;
-  answerLabel: string;
-  answer: AnswerForm;
-  points: PointForm[];
-  modelAnswer: string;
-}
-
-/** The editor's form: the draft, with every list and number in the shape its control has. */
-export interface QuestionForm {
-  kind: QuestionKind;
-  tier: Tier | '';
-  expectedSeconds: number;
-  topicIds: string[];
-  stem: string;
-  guidance: string;
-  parts: PartForm[];
-}
 
 /** Reads a typed number, "−3", "6.02×10^23" and "1,200" included. Null where it is not one, or has a unit. */
 export function readTyped(text: string): number | null {
@@ -133,7 +88,7 @@ function toDraftPoint(form: PointForm): DraftPoint {
   return point;
 }
 
-export const toPartForm = (part: DraftPart): PartForm => ({
+const toPartForm = (part: DraftPart): PartForm => ({
   prompt: part.prompt,
   lines: part.lines,
   answerLabel: part.answerLabel ?? '',
@@ -161,6 +116,7 @@ export const toDraftBody = (form: Pick<QuestionForm, 'stem' | 'parts' | 'guidanc
 export const toDraft = (form: QuestionForm): DraftFields => ({
   kind: form.kind,
   tier: form.tier || null,
+  option: form.option || null,
   expectedSeconds: form.expectedSeconds,
   topicIds: form.topicIds,
   body: toDraftBody(form),
@@ -170,6 +126,7 @@ export const toDraft = (form: QuestionForm): DraftFields => ({
 export const toQuestionForm = (version: QuestionVersionDto, topicIds: string[]): QuestionForm => ({
   kind: version.kind,
   tier: version.tier ?? '',
+  option: version.option ?? '',
   expectedSeconds: version.expectedSeconds,
   topicIds,
   stem: version.body.stem,

@@ -2,7 +2,8 @@ import { type CSSProperties, useMemo, useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { Segmented } from '#src/components/segmented.tsx';
 import { useDebounced } from '#src/lib/use-debounced.ts';
-import { type QuestionForm, toDraftBody } from './question-form.ts';
+import { toDraftBody } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 import { QuestionSheet } from './question-sheet.tsx';
 
 const views = [

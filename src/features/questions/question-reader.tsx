@@ -4,6 +4,7 @@ import { useNavigate } from 'react-router-dom';
 import type { SubjectDto } from '#shared/schemas/curriculum.ts';
 import type { QuestionDto } from '#shared/schemas/question.ts';
 import { secondsWords } from '#src/lib/figures.ts';
+import { kindWords, tierWords } from '#src/lib/question-words.ts';
 import { subjectLang, subjectWords } from '#src/lib/subject-words.ts';
 import { useMe } from '#src/queries/me.ts';
 import { questionQuery } from '#src/queries/questions.ts';
@@ -22,9 +23,6 @@ interface QuestionReaderProps {
   subject: SubjectDto;
 }
 
-const tierWords = { foundation: 'Foundation', higher: 'Higher' } as const;
-const kindWords = { shortAnswer: 'Short answer', recallCard: 'Recall card' } as const;
-
 /** A question to read and decide on: the exam page, its scheme, and what a reviewer looks at first. */
 export function QuestionReader({ question, subject }: QuestionReaderProps) {
   const me = useMe();
@@ -39,6 +37,7 @@ export function QuestionReader({ question, subject }: QuestionReaderProps) {
     ...question.topics.map((topic): [string, string] => [topic.specification, `${topic.number} ${topic.title}`]),
     ['Kind', kindWords[current.kind]],
     ['Tier', current.tier ? tierWords[current.tier] : 'Both'],
+    ...(current.option ? [['Option', current.option] as [string, string]] : []),
     ['Time expected', secondsWords(current.expectedSeconds)],
     ['Author', current.author.name],
     ...(current.reviewer ? [['Reviewed by', current.reviewer.name] as [string, string]] : []),

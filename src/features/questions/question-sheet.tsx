@@ -1,10 +1,11 @@
+import { askedQuestion, decidedPoints } from '#shared/domain/marking/asked-question.ts';
 import type { DraftBody } from '#shared/schemas/question.ts';
 import type { QuestionKind } from '#shared/schemas/question-body.ts';
 import { ExamQuestion, partLetter } from '#src/components/exam-question.tsx';
 import { MarkScheme } from '#src/components/mark-scheme.tsx';
 import { Markdown } from '#src/components/markdown.tsx';
 import { Sheet, SheetRow } from '#src/components/sheet.tsx';
-import { specWords, toAskedQuestion, toSchemePoints } from './asked-question.ts';
+import { specWords } from './draft-marking.ts';
 
 interface QuestionSheetProps {
   body: DraftBody;
@@ -19,7 +20,10 @@ interface QuestionSheetProps {
 export function QuestionSheet({ body, kind, number, lang, hasModelAnswers = false }: QuestionSheetProps) {
   return (
     <Sheet>
-      <ExamQuestion question={toAskedQuestion(body, kind, number)} number={number} lang={lang} />
+      <SheetRow>
+        <div className="h-2" />
+      </SheetRow>
+      <ExamQuestion question={askedQuestion(number, kind, body)} number={number} lang={lang} />
       <SheetRow hasRule>
         <div className="pt-4 pb-5">
           <h3 className="mb-1">Mark scheme</h3>
@@ -27,11 +31,13 @@ export function QuestionSheet({ body, kind, number, lang, hasModelAnswers = fals
             // Parts are shown in their order and hold no state here.
             <div key={partLetter(index)} className="mt-2">
               {body.parts.length > 1 ? <p className="font-semibold">Part {partLetter(index)}</p> : null}
-              <MarkScheme points={toSchemePoints(part)} />
+              <MarkScheme points={decidedPoints(part)} />
               {hasModelAnswers ? (
                 <div className="mt-3">
                   <p className="hint">Model answer</p>
-                  <p className="pen whitespace-pre-wrap [overflow-wrap:anywhere]">{part.modelAnswer || 'None yet'}</p>
+                  <div className="pen [overflow-wrap:anywhere]">
+                    {part.modelAnswer ? <Markdown source={part.modelAnswer} lang={lang} /> : 'None yet'}
+                  </div>
                   {kind === 'shortAnswer' ? <SpecLine part={part} /> : null}
                 </div>
               ) : null}

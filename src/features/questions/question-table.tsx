@@ -1,20 +1,14 @@
-import { Link } from 'react-router-dom';
 import type { QuestionRowDto } from '#shared/schemas/question.ts';
 import { versionStatusWords } from '#shared/schemas/question.ts';
 import { FacilityBar } from '#src/components/facility-bar.tsx';
-import { Markdown } from '#src/components/markdown.tsx';
-
-const kindWords = { shortAnswer: 'Short answer', recallCard: 'Recall card' } as const;
+import { QuestionCell, QuestionLine } from '#src/components/question-cell.tsx';
+import { kindWords } from '#src/lib/question-words.ts';
 
 function Status({ row }: { row: QuestionRowDto }) {
   if (row.status === 'live') {
     return <span className="text-ink-2">{row.hasNewerDraft ? 'Live, newer draft' : 'Live'}</span>;
   }
   return <span className="tag">{versionStatusWords[row.status]}</span>;
-}
-
-function Wording({ row, lang }: { row: QuestionRowDto; lang?: string | undefined }) {
-  return row.excerpt.trim() ? <Markdown isInline source={row.excerpt} lang={lang} /> : <i>Nothing written yet</i>;
 }
 
 interface QuestionTableProps {
@@ -52,12 +46,7 @@ export function QuestionTable({ rows, lang, isBusy }: QuestionTableProps) {
           {rows.map((row) => (
             <tr key={row.id}>
               <td className="text-ink-2">{row.number}</td>
-              <td className="!text-[.875rem]">
-                <Link className="hover:underline" to={`/questions/${row.id}`}>
-                  <Wording row={row} lang={lang} />
-                </Link>
-                <span className="block text-xs text-ink-2">{row.topic || 'No topic yet'}</span>
-              </td>
+              <QuestionCell id={row.id} excerpt={row.excerpt} topic={row.topic} lang={lang} />
               <td className="text-ink-2">{kindWords[row.kind]}</td>
               <td className="r font-bold">{row.maxMarks}</td>
               <td className="r">
@@ -72,14 +61,14 @@ export function QuestionTable({ rows, lang, isBusy }: QuestionTableProps) {
       </table>
       <ul className="border-t-[1.5px] border-ink md:hidden">
         {rows.map((row) => (
-          <li key={row.id} className="grid grid-cols-[2.25rem_minmax(0,1fr)_auto] gap-x-2 border-b border-rule py-2.5">
-            <span className="num pt-0.5 text-sm text-ink-2">{row.number}</span>
-            <Link to={`/questions/${row.id}`} className="min-h-6 leading-5">
-              <Wording row={row} lang={lang} />
-            </Link>
-            <span className="marks pt-0.5 text-sm">
-              [{row.maxMarks}]<span className="sr-only"> marks</span>
-            </span>
+          <QuestionLine
+            key={row.id}
+            id={row.id}
+            number={row.number}
+            excerpt={row.excerpt}
+            maxMarks={row.maxMarks}
+            lang={lang}
+          >
             <span className="col-start-2 text-sm text-ink-2">
               {row.topic || 'No topic yet'}
               <span className="num block">
@@ -90,7 +79,7 @@ export function QuestionTable({ rows, lang, isBusy }: QuestionTableProps) {
             <span className="self-end text-sm">
               <Status row={row} />
             </span>
-          </li>
+          </QuestionLine>
         ))}
       </ul>
     </div>

@@ -1,4 +1,4 @@
-import { noteWords, type QuestionForm } from './question-form.ts';
+import { noteWords, type QuestionForm } from './question-shape.ts';
 
 /** The whole form as plain text, to keep a copy outside Plait. */
 export function questionText(form: QuestionForm): string {

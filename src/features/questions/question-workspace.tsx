@@ -3,8 +3,9 @@ import type { SubjectDto, TopicDto } from '#shared/schemas/curriculum.ts';
 import type { QuestionDto } from '#shared/schemas/question.ts';
 import { emptyQuestion } from './empty-question.ts';
 import { QuestionEditor } from './question-editor.tsx';
-import { type QuestionForm, toQuestionForm } from './question-form.ts';
+import { toQuestionForm } from './question-form.ts';
 import { QuestionReader } from './question-reader.tsx';
+import type { QuestionForm } from './question-shape.ts';
 
 interface QuestionWorkspaceProps {
   id: string;

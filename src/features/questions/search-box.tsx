@@ -18,6 +18,11 @@ export function SearchBox({ label, value, onSearch }: SearchBoxProps) {
   const [typed, setTyped] = useState<string | null>(null);
   if (typed === value) setTyped(null);
   useEffect(() => () => clearTimeout(timer.current), []);
+  // A filter may change the address between the typing and the search; the search must not take it back.
+  const latest = useRef(onSearch);
+  useEffect(() => {
+    latest.current = onSearch;
+  });
   const submit = (event: FormEvent) => {
     event.preventDefault();
     clearTimeout(timer.current);
@@ -44,7 +49,7 @@ export function SearchBox({ label, value, onSearch }: SearchBoxProps) {
               const text = event.target.value;
               setTyped(text);
               clearTimeout(timer.current);
-              timer.current = setTimeout(() => onSearch(text), PAUSE_MS);
+              timer.current = setTimeout(() => latest.current(text), PAUSE_MS);
             }}
           />
         </div>

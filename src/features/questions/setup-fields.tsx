@@ -2,7 +2,7 @@ import { useController, useFormContext } from 'react-hook-form';
 import type { SubjectDto, TopicDto } from '#shared/schemas/curriculum.ts';
 import { Select } from '#src/components/field.tsx';
 import { errorAt, fieldId } from './check-question.ts';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 import { WholeNumberField } from './whole-number-field.tsx';
 
 interface SetupFieldsProps {
@@ -27,8 +27,32 @@ export function SetupFields({ subject, topics }: SetupFieldsProps) {
           <option value="higher">Higher only</option>
         </Select>
         <WholeNumberField name="expectedSeconds" label="Expected seconds" min={20} max={1800} />
+        {subject.options.length > 0 ? <OptionSelect options={subject.options} /> : null}
       </div>
     </div>
+  );
+}
+
+/** Which students meet it, where a subject has chosen parts: set texts, periods. */
+function OptionSelect({ options }: { options: string[] }) {
+  const { register, getValues, formState } = useFormContext<QuestionForm>();
+  // One that the subject no longer uses stays choosable where a question has it.
+  const all = [...new Set([...options, getValues('option')])].filter(Boolean);
+  return (
+    <Select
+      label="Option"
+      id={fieldId('option')}
+      frameClass="col-span-2"
+      error={errorAt(formState.errors, 'option')}
+      {...register('option')}
+    >
+      <option value="">None: for every student</option>
+      {all.map((option) => (
+        <option key={option} value={option}>
+          {option}
+        </option>
+      ))}
+    </Select>
   );
 }
 

@@ -1,4 +1,4 @@
-import type { QuestionDto, VersionStatus } from '#shared/schemas/question.ts';
+import type { QuestionDto, QuestionVersionDto, VersionStatus } from '#shared/schemas/question.ts';
 import { dayMonthWords, dayOf } from '#src/lib/dates.ts';
 import type { SaveState } from './draft-saver.ts';
 
@@ -11,7 +11,7 @@ const statusInSentence: Record<VersionStatus, string> = {
 };
 
 /** "just now", "2 minutes ago", "3 hours ago", "on 6 January". */
-export function agoWords(instant: string, now: number, zone: string): string {
+function agoWords(instant: string, now: number, zone: string): string {
   const minutes = Math.floor((now - Date.parse(instant)) / 60_000);
   if (minutes < 1) return 'just now';
   if (minutes < 60) return `${minutes} minute${minutes === 1 ? '' : 's'} ago`;
@@ -34,12 +34,22 @@ export function saveWords(state: SaveState, savedAt: string): string | null {
     case 'failed':
       return {
         stale: 'Not saved',
+        moved: 'Not saved',
         offline: 'Not saved: offline, kept here and tried again',
         busy: 'Not saved: kept here and tried again',
         signedOut: 'Not saved: you are signed out',
         refused: 'Not saved',
       }[state.why.kind];
   }
+}
+
+/** What happened to a draft while it was being written on. */
+export function movedWords({ version, status, reviewer }: QuestionVersionDto): string {
+  if (status === 'inReview') return `Version ${version} was sent for review meanwhile, and is not changed there.`;
+  const by = reviewer ? ` by ${reviewer.name}` : '';
+  return status === 'live'
+    ? `Version ${version} was put live${by} meanwhile. A change to it is a new version.`
+    : `Version ${version} is ${statusInSentence[status]} meanwhile.`;
 }
 
 /**

@@ -1,4 +1,5 @@
 import { type FormEvent, useId, useState } from 'react';
+import { decidedPoints } from '#shared/domain/marking/asked-question.ts';
 import type { DraftBody } from '#shared/schemas/question.ts';
 import { Dialog } from '#src/components/dialog.tsx';
 import { partLetter } from '#src/components/exam-question.tsx';
@@ -6,7 +7,7 @@ import { TextArea } from '#src/components/field.tsx';
 import { MarkScheme } from '#src/components/mark-scheme.tsx';
 import { Markdown } from '#src/components/markdown.tsx';
 import { MarksBadge } from '#src/components/marks-badge.tsx';
-import { toSchemePoints, tryAnswer } from './asked-question.ts';
+import { tryAnswer } from './draft-marking.ts';
 
 interface TryAnswersProps {
   body: DraftBody;
@@ -70,7 +71,7 @@ function TriedPart({ part, letter, lang }: TriedPartProps) {
           aria-controls={resultId}
         />
         {unit ? <span className="pb-3">{unit}</span> : null}
-        <button type="submit" className="btn">
+        <button type="submit" className={letter ? 'btn quiet' : 'btn'}>
           Mark it
         </button>
       </div>
@@ -92,7 +93,7 @@ function TriedVerdict({ part, answer }: { part: TriedPartProps['part']; answer: 
           {verdict.outcome === 'undecided' ? <b>The student marks this one. </b> : null}
           {verdict.words}
         </p>
-        <MarkScheme points={toSchemePoints(part, verdict)} />
+        <MarkScheme points={decidedPoints(part, verdict.earned)} />
       </div>
       <MarksBadge marks={verdict.marks} maxMarks={available} />
     </div>

@@ -4,17 +4,30 @@ import type { UseFormReturn } from 'react-hook-form';
 import type { QuestionDto } from '#shared/schemas/question.ts';
 import { isTransient, NetworkError, ProblemError } from '#src/lib/api.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
-import { questionQuery, useCreateQuestion, useSaveDraft } from '#src/queries/questions.ts';
+import { questionQuery, readQuestion, useCreateQuestion, useSaveDraft } from '#src/queries/questions.ts';
 import { DraftSaver, type SaveFailure, type SaveState } from './draft-saver.ts';
-import { type DraftFields, type QuestionForm, toDraft } from './question-form.ts';
+import { type DraftFields, toDraft } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
+import { movedWords } from './status-words.ts';
 
-function explain(error: unknown): SaveFailure {
+/** What became of a draft that could not be saved onto: saved again by somebody, or no draft any more. */
+async function explainConflict(id: string, detail: string): Promise<SaveFailure> {
+  try {
+    const { current, can } = await readQuestion(id);
+    if (current.status !== 'draft') return { kind: 'moved', detail: movedWords(current) };
+    return can.edit ? { kind: 'stale', detail } : { kind: 'refused', detail };
+  } catch {
+    return { kind: 'stale', detail };
+  }
+}
+
+async function explain(error: unknown, id: string): Promise<SaveFailure> {
   const detail = problemWords(error);
   if (error instanceof NetworkError) return { kind: 'offline', detail };
   if (isTransient(error)) return { kind: 'busy', detail };
   if (error instanceof ProblemError) {
     if (error.status === 401) return { kind: 'signedOut', detail };
-    if (error.status === 409) return { kind: 'stale', detail };
+    if (error.status === 409 || error.status === 403) return explainConflict(id, detail);
   }
   return { kind: 'refused', detail };
 }
@@ -54,7 +67,7 @@ export function useDraftSaving({ id, subjectId, question, form, onMade }: DraftS
         read: () => toDraft(form.getValues()),
         send: async (revision, draft) =>
           revision === null ? make(draft) : (await save({ revision, ...draft })).current.revision,
-        explain,
+        explain: (error) => explain(error, id),
         onState: setState,
       },
       question?.current.revision ?? null,

@@ -4,7 +4,7 @@ import { ProblemError } from '#src/lib/api.ts';
 import { problemWords } from '#src/lib/show-problem.ts';
 import { useQuestionStep } from '#src/queries/questions.ts';
 import { type FormPath, pointerToFormPath } from './check-question.ts';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 interface Sending {
   id: string;

@@ -2,9 +2,10 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import { useToast } from '#src/components/toast.tsx';
-import { questionQuery } from '#src/queries/questions.ts';
+import { questionQuery, readQuestion } from '#src/queries/questions.ts';
 import type { DraftSaver } from './draft-saver.ts';
-import type { DraftFields, QuestionForm } from './question-form.ts';
+import type { DraftFields } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 import { questionText } from './question-text.ts';
 
 interface TroubleInput {
@@ -22,9 +23,9 @@ export function useTrouble({ id, saver, form, onReload }: TroubleInput) {
   const fetchNewer = async () => {
     setIsBusy(true);
     try {
-      return await client.fetchQuery({ ...questionQuery(id), staleTime: 0 });
+      return await readQuestion(id);
     } catch {
-      toast('The newer draft could not be read. Yours is still here.');
+      toast('The newer one could not be read. Yours is still here.');
       return null;
     } finally {
       setIsBusy(false);
@@ -44,6 +45,7 @@ export function useTrouble({ id, saver, form, onReload }: TroubleInput) {
       void fetchNewer().then((newer) => {
         if (!newer) return;
         saver.rebase(newer.current.revision, true);
+        client.setQueryData(questionQuery(id).queryKey, newer);
         onReload();
       }),
     onSaveMine: () =>

@@ -2,7 +2,7 @@ import { type ReactNode, useState } from 'react';
 import { useController, useFormContext } from 'react-hook-form';
 import { Field } from '#src/components/field.tsx';
 import { type FormPath, fieldId } from './check-question.ts';
-import type { QuestionForm } from './question-form.ts';
+import type { QuestionForm } from './question-shape.ts';
 
 interface WholeNumberFieldProps {
   name: FormPath;

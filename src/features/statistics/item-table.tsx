@@ -1,7 +1,6 @@
-import { Link } from 'react-router-dom';
 import type { ItemStatisticsRowDto } from '#shared/schemas/question.ts';
 import { FacilityBar } from '#src/components/facility-bar.tsx';
-import { Markdown } from '#src/components/markdown.tsx';
+import { QuestionCell, QuestionLine } from '#src/components/question-cell.tsx';
 import { secondsWords } from '#src/lib/figures.ts';
 
 interface ItemTableProps {
@@ -48,12 +47,7 @@ export function ItemTable({ rows, lang, isBusy }: ItemTableProps) {
           {rows.map((row) => (
             <tr key={`${row.questionId} ${row.version}`}>
               <td className="text-ink-2">{row.number}</td>
-              <td className="!text-[.875rem]">
-                <Link className="hover:underline" to={`/questions/${row.questionId}`}>
-                  <Markdown isInline source={row.excerpt} lang={lang} />
-                </Link>
-                <span className="block text-xs text-ink-2">{row.topic}</span>
-              </td>
+              <QuestionCell id={row.questionId} excerpt={row.excerpt} topic={row.topic} lang={lang} />
               <td className="r">{row.version}</td>
               <td className="r font-bold">{row.maxMarks}</td>
               <td className="r">{row.answers}</td>
@@ -68,17 +62,14 @@ export function ItemTable({ rows, lang, isBusy }: ItemTableProps) {
       </table>
       <ul className="border-t-[1.5px] border-ink md:hidden">
         {rows.map((row) => (
-          <li
+          <QuestionLine
             key={`${row.questionId} ${row.version}`}
-            className="grid grid-cols-[2.25rem_minmax(0,1fr)_auto] gap-x-2 border-b border-rule py-2.5"
+            id={row.questionId}
+            number={row.number}
+            excerpt={row.excerpt}
+            maxMarks={row.maxMarks}
+            lang={lang}
           >
-            <span className="num pt-0.5 text-sm text-ink-2">{row.number}</span>
-            <Link to={`/questions/${row.questionId}`} className="min-h-6 leading-5">
-              <Markdown isInline source={row.excerpt} lang={lang} />
-            </Link>
-            <span className="marks pt-0.5 text-sm">
-              [{row.maxMarks}]<span className="sr-only"> marks</span>
-            </span>
             <span className="num col-start-2 col-end-4 text-sm text-ink-2">
               {row.topic}, version {row.version}
               <span className="mt-0.5 flex flex-wrap items-center gap-x-3">
@@ -88,7 +79,7 @@ export function ItemTable({ rows, lang, isBusy }: ItemTableProps) {
                 </span>
               </span>
             </span>
-          </li>
+          </QuestionLine>
         ))}
       </ul>
     </div>

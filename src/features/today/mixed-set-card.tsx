@@ -20,7 +20,10 @@ interface CardProps {
 const plural = (count: number, word: string) => `${count} ${word}${count === 1 ? '' : 's'}`;
 
 function aboutWords(set: TodaySetDto): string {
-  if (set.status === 'open') return `${set.answered} of ${plural(set.questions, 'question')} answered.`;
+  if (set.status === 'open' || set.status === 'done') {
+    const all = plural(set.questions, 'question');
+    return set.answered === set.questions ? `${all} answered.` : `${set.answered} of ${all} answered.`;
+  }
   return set.sentence;
 }
 
@@ -109,7 +112,7 @@ export function MixedSetCard({ set, zone, aside }: CardProps) {
         <span className="text-ink-2 text-sm num whitespace-nowrap">{timeWords(set, zone)}</span>
       </div>
       <div className="flex items-start justify-between gap-6">
-        <p className="text-ink-2 mt-1 max-w-[35rem]">{aboutWords(set)}</p>
+        <p className="text-ink-2 mt-1 min-w-0 max-w-[35rem] [overflow-wrap:anywhere]">{aboutWords(set)}</p>
         {set.status === 'done' && set.maxMarks !== null ? (
           <MarksBadge marks={set.marks} maxMarks={set.maxMarks} />
         ) : null}

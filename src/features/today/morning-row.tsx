@@ -18,7 +18,7 @@ export function MorningRow({ set }: { set: TodaySetDto }) {
         Morning set
       </h2>
       <div className="flex flex-wrap items-center justify-between gap-x-8 gap-y-3 min-w-0">
-        <div className="w-60 max-w-full">
+        <div className="w-60 max-w-full -ml-1.5">
           <Ribbon
             items={ribbonItems(set)}
             size={ribbonSizes.todayPhone}

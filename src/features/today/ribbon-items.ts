@@ -3,19 +3,20 @@ import type { RibbonItem } from '#src/components/ribbon-geometry.ts';
 
 type Subject = TodaySetDto['strands'][number]['subject'];
 
-/** The strands of a set offered or under way. */
-export const ribbonItems = ({ strands, status }: TodaySetDto): RibbonItem[] =>
+/** The strands of a set: those answered filled, the others pale, also where the set was ended before them. */
+export const ribbonItems = ({ strands }: TodaySetDto): RibbonItem[] =>
   strands.map(({ subject, isAnswered }) => ({
     code: subject.code,
     name: subject.name,
     strand: subject.strand,
-    state: isAnswered || status === 'done' ? 'done' : 'next',
+    state: isAnswered ? 'done' : 'next',
   }));
 
-/** How many questions each subject has, most first. */
-export function countBySubject({ strands }: TodaySetDto): { subject: Subject; count: number }[] {
+/** How many questions each subject has, most first; of a set that is done, how many were answered. */
+export function countBySubject({ strands, status }: TodaySetDto): { subject: Subject; count: number }[] {
   const counts = new Map<string, { subject: Subject; count: number }>();
-  for (const { subject } of strands) {
+  for (const { subject, isAnswered } of strands) {
+    if (status === 'done' && !isAnswered) continue;
     const row = counts.get(subject.id) ?? { subject, count: 0 };
     row.count += 1;
     counts.set(subject.id, row);

@@ -5,21 +5,12 @@ export interface TopicGroup {
   topics: MyTopicDto[];
 }
 
-const ORDER: Standing[] = ['weak', 'developing', 'secure', 'notStarted'];
-
-/** "under 50%": what a standing means, in figures. */
-export const standingRanges: Record<Standing, string | null> = {
-  weak: 'under 50%',
-  developing: '50 to 79%',
-  secure: '80% and over',
-  notStarted: null,
-};
-
-/** Groups in the order weak, developing, secure, not started; the order within a group is kept. */
-export const groupTopics = (topics: MyTopicDto[]): TopicGroup[] =>
-  ORDER.map((standing) => ({ standing, topics: topics.filter((topic) => topic.standing === standing) })).filter(
-    (group) => group.topics.length > 0,
-  );
+/** One group a standing, groups and topics in the order they came: the server sends the weakest first. */
+export function groupTopics(topics: MyTopicDto[]): TopicGroup[] {
+  const groups = new Map<Standing, MyTopicDto[]>();
+  for (const topic of topics) groups.set(topic.standing, [...(groups.get(topic.standing) ?? []), topic]);
+  return [...groups].map(([standing, own]) => ({ standing, topics: own }));
+}
 
 /** The subjects among some topics, once each, by name. */
 export function subjectsAmong(topics: MyTopicDto[]): MyTopicDto['subject'][] {

@@ -2,8 +2,8 @@ import type { MyTopicDto } from '#shared/schemas/practice.ts';
 import { dayMonthWords, returnWords } from '#src/lib/dates.ts';
 
 /** Expected recall as a figure, or a dash. */
-export function RecallFigure({ topic }: { topic: MyTopicDto }) {
-  if (topic.recall !== null) return <>{topic.recall}%</>;
+export function RecallFigure({ percent }: { percent: number | null }) {
+  if (percent !== null) return <>{percent}%</>;
   return (
     <span className="font-normal text-ink-3">
       <span aria-hidden="true">–</span>

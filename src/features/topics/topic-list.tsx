@@ -35,11 +35,11 @@ function Group({ group, today }: { group: TopicGroup; today: string }) {
               {topic.topic.title}
             </span>
             <span className="font-bold num text-right">
-              <RecallFigure topic={topic} />
+              <RecallFigure percent={topic.recallOnDay} />
             </span>
             <span />
             <span>
-              <RecallBar value={topic.recall} standing={topic.standing} width={200} />
+              <RecallBar value={topic.recallOnDay} standing={topic.standing} width={200} />
             </span>
             <span className="text-sm num text-right">
               <ComesBack topic={topic} today={today} />

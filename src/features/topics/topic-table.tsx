@@ -2,7 +2,7 @@ import { standingWords } from '#shared/schemas/practice.ts';
 import { RecallBar } from '#src/components/recall-bar.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { Tally } from '#src/components/tally.tsx';
-import { standingRanges, type TopicGroup } from './group-topics.ts';
+import type { TopicGroup } from './group-topics.ts';
 import { ComesBack, PaperDay, RecallFigure } from './topic-cells.tsx';
 import { useShownRows } from './use-shown-rows.ts';
 
@@ -26,6 +26,9 @@ export function TopicTable({ groups, today }: TopicTableProps) {
           <th scope="col" className="w-[270px]" colSpan={2}>
             Expected recall on the day
           </th>
+          <th scope="col" className="r max-lg:hidden !pr-6">
+            Now
+          </th>
           <th scope="col">Comes back</th>
           <th scope="col" className="whitespace-nowrap">
             Next paper
@@ -41,17 +44,15 @@ export function TopicTable({ groups, today }: TopicTableProps) {
 
 function GroupRows({ group, today }: { group: TopicGroup; today: string }) {
   const { shown, hiddenCount, showAll } = useShownRows(group.topics);
-  const range = standingRanges[group.standing];
   const { length } = group.topics;
   return (
     <tbody>
       <tr className="!bg-transparent">
-        <th colSpan={7} scope="rowgroup" className="!pt-4 !pb-1.5 !border-b !border-b-rule">
+        <th colSpan={8} scope="rowgroup" className="!pt-4 !pb-1.5 !border-b !border-b-rule">
           <span className="flex items-baseline gap-2.5">
             <span className="disp text-[1.0625rem] text-ink">{standingWords[group.standing]}</span>
             <span className="num font-normal">
               {length} {length === 1 ? 'topic' : 'topics'}
-              {range ? `, ${range}` : null}
             </span>
             {hiddenCount > 0 ? (
               <button type="button" className="link ml-auto -my-2 min-h-9 font-normal" onClick={showAll}>
@@ -75,10 +76,13 @@ function GroupRows({ group, today }: { group: TopicGroup; today: string }) {
             <Tally standing={topic.standing} hasWords />
           </td>
           <td className="w-[240px]">
-            <RecallBar value={topic.recall} standing={topic.standing} />
+            <RecallBar value={topic.recallOnDay} standing={topic.standing} />
           </td>
           <td className="r font-bold num !pl-0 !pr-6 !text-[.9375rem]">
-            <RecallFigure topic={topic} />
+            <RecallFigure percent={topic.recallOnDay} />
+          </td>
+          <td className="r num text-ink-2 max-lg:hidden !pr-6">
+            <RecallFigure percent={topic.recallNow} />
           </td>
           <td className="num whitespace-nowrap">
             <ComesBack topic={topic} today={today} />

@@ -42,6 +42,13 @@ test.each<[string, number]>([
   ['42%', 42],
   ['x = 5', 5],
   ['= 5', 5],
+  ['7/2.', 3.5],
+  ['2 1/3.', 7 / 3],
+  ['10^3.', 1000],
+  ['×800', 800],
+  ['× 800', 800],
+  ['x800', 800],
+  ['M = X800.', 800],
   ['24/36 = 2/3', 2 / 3],
   ['3 × 4 = 12', 12],
   ['１２', 12],
@@ -85,7 +92,38 @@ test.each<[string, string, UnitMatch]>([
   ['N m', 'Nm', 'same'],
   ['N m', 'J', 'maybe'],
   ['kWh', 'kilowatt hours', 'same'],
-  ['MJ', 'mJ', 'different'],
+  ['MJ', 'mJ', 'maybe'],
+  ['kJ', 'KJ', 'maybe'],
+  ['kg', 'Kg', 'maybe'],
+  ['N m', 'nm', 'maybe'],
+  ['mHz', 'MHz', 'maybe'],
+  ['kJ', 'kg', 'different'],
+  ['cm', 'cms', 'same'],
+  ['kg', 'kgs', 'same'],
+  ['km/h', 'kms per hour', 'same'],
+  ['cm³/min', 'mls/min', 'same'],
+  ['cm²', 'cms²', 'same'],
+  ['kJ', 'kJs', 'same'],
+  ['mol/dm³', 'mols/dm³', 'same'],
+  ['cm', 'cm/s', 'different'],
+  ['cm', 'mms', 'different'],
+  ['m', 'ms', 'maybe'],
+  ['N', 'Ns', 'maybe'],
+  ['N s', 'Ns', 'same'],
+  ['N', 'm/s', 'different'],
+  ['minutes', 'm', 'maybe'],
+  ['m/min', 'm/m', 'maybe'],
+  ['miles', 'm', 'maybe'],
+  ['minutes', 'cm', 'different'],
+  ['m', 'min', 'different'],
+  ['°C', '°', 'maybe'],
+  ['°C', 'degrees', 'maybe'],
+  ['°C', 'K', 'different'],
+  ['J/kg °C', 'J/kg K', 'maybe'],
+  ['minutes', 'h 5 min', 'unknown'],
+  ['kWh', 'kW', 'different'],
+  ['°C', '˚C', 'same'],
+  ['ºC', '°C', 'same'],
   ['MJ', 'mj', 'maybe'],
   ['Hz', 'hz', 'same'],
   ['kg', 'KG', 'same'],
@@ -94,6 +132,9 @@ test.each<[string, string, UnitMatch]>([
   ['°C', 'C', 'same'],
   ['µm', 'um', 'same'],
   ['£', 'pounds', 'same'],
+  ['£', '$', 'maybe'],
+  ['£', 'p', 'different'],
+  ['per 1,000', 'per 1000', 'same'],
   ['%', 'per cent', 'same'],
   ['people', 'People', 'same'],
   ['people', 'kg', 'unknown'],
@@ -109,7 +150,9 @@ describe('a part of one mark', () => {
     [mass, '1.20 mol dm⁻³', 'full'],
     [mass, '1.2 g', 'none'],
     [mass, '1.3', 'none'],
-    [mass, '1,2', 'none'],
+    [mass, '1,2', 'undecided'],
+    [mass, '5 6', 'undecided'],
+    [mass, '?', 'none'],
     [mass, 'about 1.2', 'undecided'],
     [mass, '1.2 and a bit', 'undecided'],
     [mass, '-1.2', 'none'],
@@ -120,15 +163,17 @@ describe('a part of one mark', () => {
     [spec({ value: 9.8, range: { min: 9.7, max: 9.9 } }), '9.69', 'none'],
     [spec({ value: 1 / 3 }), '1/3', 'full'],
     [spec({ value: 1 / 3 }), '0.33', 'none'],
+    [spec({ value: 3.5 }), '7/2.', 'full'],
+    [spec({ value: 3.5, unit: 'cm' }), '7/2 cm.', 'full'],
     [spec({ value: 1_000_000_000 }), '999999999', 'none'],
     [spec({ value: 0.3 }), '0.3', 'full'],
     [spec({ value: 0 }), '0', 'full'],
     [spec({ value: 42, unit: '%' }), '42%', 'full'],
-    [spec({ value: 42, unit: '%' }), '0.42', 'none'],
-    [spec({ value: 0.375 }), '37.5%', 'full'],
+    [spec({ value: 42, unit: '%' }), '0.42%', 'none'],
     [spec({ value: 42 }), '42%', 'undecided'],
     [spec({ value: 3.5, unit: '£' }), '£3.50', 'full'],
-    [spec({ value: 3.5, unit: '£' }), '$3.50', 'none'],
+    [spec({ value: 3.5, unit: '£' }), '$3.60', 'none'],
+    [spec({ value: 3.5, unit: '£' }), '3.50p', 'none'],
     [spec({ value: 3.5, unit: 'kg' }), '£3.50', 'none'],
     [spec({ value: 3.5 }), '£3.50', 'full'],
     [spec({ value: 3.5 }), '3.5 cm', 'undecided'],
@@ -136,10 +181,115 @@ describe('a part of one mark', () => {
     [spec({ value: 20, unit: 'm/s', isUnitRequired: true }), '20', 'none'],
     [spec({ value: 20, unit: 'm/s', isUnitRequired: true }), '20 km/h', 'none'],
     [spec({ value: 20, unit: 'm/s²', isUnitRequired: true }), '20 N/kg', 'undecided'],
+    [spec({ value: 17.45, unit: 'cm' }), '17.45 cms', 'full'],
+    [spec({ value: 3, unit: 'kg' }), '3 kgs', 'full'],
+    [spec({ value: 3, unit: 'm' }), '3 ms', 'undecided'],
+    [spec({ value: 62, unit: '°' }), '62˚', 'full'],
+    [spec({ value: 62, unit: '°' }), '62º', 'full'],
+    [spec({ value: 62, unit: '°' }), '62 ∘', 'full'],
+    [spec({ value: 62, unit: '°' }), '62⁰', 'undecided'],
+    [spec({ value: 25, unit: '°C' }), '25 ˚C', 'full'],
+    [spec({ value: 800 }), '×800', 'full'],
+    [spec({ value: 800 }), 'x800', 'full'],
+    [spec({ value: 800 }), '800×', 'full'],
+    [spec({ value: 800 }), '×400', 'none'],
+    [spec({ value: 800 }), '800x', 'undecided'],
+    [spec({ value: 800, unit: 'cm' }), '×800', 'undecided'],
+    [spec({ value: 7.8, unit: 'kJ' }), '7.8 KJ', 'undecided'],
+    [spec({ value: 7.8, unit: 'kJ' }), '7.9 KJ', 'none'],
+    [spec({ value: 14, unit: 'minutes' }), '14 m', 'undecided'],
+    [spec({ value: 14, unit: 'minutes' }), '15 m', 'none'],
+    [spec({ value: 65, unit: 'minutes' }), '1 h 5 min', 'undecided'],
+    [spec({ value: 7 }), '√49', 'undecided'],
+    [spec({ value: 7 }), '(7)', 'undecided'],
   ])('%j: %s is %s', (wanted, answer, outcome) => {
     const verdict = mark(wanted, answer, 1);
     expect(verdict.outcome).toBe(outcome);
     expect(verdict.words).toMatch(/^\P{Ll}.+[.]$/u);
+  });
+});
+
+describe('what may be the right number in another form is for the student to see', () => {
+  const heat = spec({ value: 26.5, range: { min: 26, max: 27 }, unit: '°C' });
+  const rate = spec({ value: 22, unit: 'per 1,000' });
+  const share = spec({ value: 20, unit: '%' });
+  const cost = spec({ value: 4500, unit: '£' });
+  const hours = spec({ value: 6.5, unit: 'hours' });
+  test.each<[NumberSpec, string, string]>([
+    [heat, '27 degrees', 'undecided'],
+    [heat, '27°', 'undecided'],
+    [heat, '28°', 'none'],
+    [heat, '26-27', 'undecided'],
+    [heat, '26–27 °C', 'undecided'],
+    [heat, '26 to 27', 'undecided'],
+    [hours, '6:30', 'undecided'],
+    [hours, '6 h 30', 'undecided'],
+    [hours, '6h30', 'undecided'],
+    [spec({ value: 65, unit: 'minutes' }), '1h5m', 'undecided'],
+    [spec({ value: 65, unit: 'minutes' }), '1 h 5', 'undecided'],
+    [spec({ value: 110, unit: 's' }), '1m50s', 'undecided'],
+    [spec({ value: 1.02, unit: 'm' }), '1m2cm', 'undecided'],
+    [rate, '22/1000', 'undecided'],
+    [rate, '0.022', 'undecided'],
+    [rate, '22 in 1000', 'undecided'],
+    [rate, '22 per 1000', 'full'],
+    [rate, '23/1000', 'none'],
+    [share, '0.2', 'undecided'],
+    [share, '1/5', 'undecided'],
+    [share, '0.3', 'none'],
+    [spec({ value: 20, unit: '%', isUnitRequired: true }), '0.2', 'undecided'],
+    [spec({ value: 0, unit: '%' }), '0', 'full'],
+    [spec({ value: 0.2 }), '20%', 'undecided'],
+    [spec({ value: 0.2 }), '20', 'none'],
+    [cost, '$4500', 'undecided'],
+    [cost, '€4500', 'undecided'],
+    [cost, '4500 dollars', 'undecided'],
+    [spec({ value: 4500 }), '$4500', 'undecided'],
+    [spec({ value: 0.5 }), '0,5', 'undecided'],
+    [spec({ value: 0.5 }), '0. 5', 'undecided'],
+    [spec({ value: 16 }), '4^2', 'undecided'],
+    [spec({ value: 16, unit: 'cm²' }), '4² cm²', 'undecided'],
+    [spec({ value: 16, unit: 'cm' }), '4 squared cm', 'undecided'],
+    [spec({ value: 16 }), '2 × 8', 'undecided'],
+    [spec({ value: 7 }), '~7', 'undecided'],
+    [spec({ value: 7 }), '≈7', 'undecided'],
+    [spec({ value: 7 }), 'x ≈ 7', 'undecided'],
+    [spec({ value: 7, unit: 'cm' }), 'about 7 cm', 'undecided'],
+    [spec({ value: 7 }), 'approx. 7', 'undecided'],
+    [spec({ value: 7 }), '6.96 ≈ 7.0 = 7', 'full'],
+    [spec({ value: 7 }), 'about 9', 'none'],
+    [spec({ value: 7 }), 'about 9 to 10', 'undecided'],
+  ])('%j: %s is %s', (wanted, answer, outcome) => {
+    expect(mark(wanted, answer, 1).outcome).toBe(outcome);
+    if (outcome !== 'full') expect(mark(wanted, answer, 2).outcome).toBe('undecided');
+  });
+});
+
+describe('the right quantity in another unit is for the student to see', () => {
+  test.each([
+    [17.45, 'cm', '174.5 mm', 'undecided'],
+    [17.45, 'cm', '0.1745 m', 'undecided'],
+    [17.45, 'cm', '17.45 mm', 'none'],
+    [17.45, 'cm', '175 mm', 'none'],
+    [7.8, 'kJ', '7800 J', 'undecided'],
+    [7.8, 'kJ', '7800 N m', 'undecided'],
+    [7.8, 'kJ', '7800 W', 'none'],
+    [2, 'm²', '20 000 cm²', 'undecided'],
+    [2, 'dm³', '2000 ml', 'undecided'],
+    [2, 'g/cm³', '2000 kg/m³', 'undecided'],
+    [36, 'km/h', '10 m/s', 'undecided'],
+    [14, 'minutes', '840 s', 'undecided'],
+    [3.5, '£', '350p', 'undecided'],
+    [0, 'cm', '0 mm', 'undecided'],
+  ])('%d %s as %s: %s', (value, unit, answer, outcome) => {
+    expect(mark(spec({ value, unit }), answer, 1).outcome).toBe(outcome);
+    expect(mark(spec({ value, unit, isUnitRequired: true }), answer, 3).outcome).toBe('undecided');
+  });
+
+  test('and the tolerance is of the scheme’s unit', () => {
+    const length = spec({ value: 17.4, tolerance: 0.1, unit: 'cm' });
+    expect(mark(length, '175 mm').outcome).toBe('undecided');
+    expect(mark(length, '176 mm').outcome).toBe('none');
   });
 });
 
@@ -167,6 +317,16 @@ test('words say what was expected and what was read', () => {
   expect(mark(spec({ value: 9.8, range: { min: 9.7, max: 9.9 }, unit: 'm/s²' }), '9.85').words).toBe(
     '9.85 m/s² is within what the scheme accepts: 9.7 to 9.9 m/s².',
   );
+});
+
+test.each([
+  ['174.5 mm', '174.5 mm is as much as the 17.45 cm of the scheme. Check whether it asks for that unit.'],
+  ['18 mm', 'The scheme asks for 17.45 cm; your answer reads as 18 mm.'],
+  ['£18', 'The scheme asks for 17.45 cm; your answer reads as £18.'],
+  ['$18', 'The scheme asks for 17.45 cm; your answer reads as $18.'],
+  ['18%', 'The scheme asks for 17.45 cm; your answer reads as 18%.'],
+])('words keep the unit typed: %s', (answer, words) => {
+  expect(mark(spec({ value: 17.45, unit: 'cm' }), answer).words).toBe(words);
 });
 
 test('numbers as a reader of exam papers expects them', () => {

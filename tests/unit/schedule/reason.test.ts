@@ -83,4 +83,12 @@ describe('the sentence on Today', () => {
   ])('%s', (_what, subjects, sentence) => {
     expect(subjectsSentence(subjects)).toBe(sentence);
   });
+
+  test('says what most of the questions were chosen for, where one reason holds for more than half', () => {
+    const subjects = [line('Biology', 2, 3), line('Chemistry', 2, 4)];
+    expect(subjectsSentence(subjects, ['due', 'due', 'due', 'firstLook'])).toBe(
+      '4 questions from 2 subjects. Most are due again.',
+    );
+    expect(subjectsSentence(subjects, ['due', 'due', 'firstLook', 'firstLook'])).toBe('4 questions from 2 subjects.');
+  });
 });

@@ -1,0 +1,35 @@
+import { type SetSummaryDto, type Standing, standingWords } from '#shared/schemas/practice.ts';
+
+type Row = SetSummaryDto['topics'][number];
+
+export interface Change extends Pick<Row, 'subject' | 'topic'> {
+  /** "Weak to developing, about 62% on the day". */
+  words: string;
+  standing: Standing;
+}
+
+const lower = (standing: Standing): string => standingWords[standing].toLowerCase();
+
+function changeOf({ before, after, subject, topic }: Row): Change | null {
+  if (!after) return null;
+  const { standing } = after;
+  const about = `about ${after.recallOnDay}% on the day`;
+  const change = (words: string): Change => ({ subject, topic, standing, words: `${words}, ${about}` });
+  if (!before) return change(`First look: ${lower(standing)}`);
+  if (before.standing !== standing) return change(`${standingWords[before.standing]} to ${lower(standing)}`);
+  return standing === 'weak' ? change('Still weak') : null;
+}
+
+const ORDER: Standing[] = ['secure', 'developing', 'weak', 'notStarted'];
+
+/** The topics that moved to another standing, were met for the first time or are still weak, the strongest first. */
+export const changesOf = (rows: Row[]): Change[] =>
+  rows.flatMap((row) => changeOf(row) ?? []).sort((a, b) => ORDER.indexOf(a.standing) - ORDER.indexOf(b.standing));
+
+/** What is not in the marks yet, or null. */
+export function waitingWords(count: number): string | null {
+  if (count === 0) return null;
+  return count === 1
+    ? 'One answer waits for you to mark it against the scheme. It is in none of these marks until then.'
+    : `${count} answers wait for you to mark them against the scheme. They are in none of these marks until then.`;
+}
