@@ -1,3 +1,4 @@
+import { fileURLToPath } from 'node:url';
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
@@ -12,8 +13,16 @@ const serverEntries = {
 const BASE =
   /node_modules\/(react|react-dom|scheduler|react-router|react-router-dom|@tanstack\/(query-core|react-query)|zod)\/|\/src\/lib\/(api|keeper|kept-keys|query-client)\.ts$|\/shared\/schemas\/(common|curriculum)\.ts$/;
 
-export default defineConfig(({ isSsrBuild }) => ({
+// react-router's export map gives every bundler its development build, with checks that only help while developing.
+const ROUTER = fileURLToPath(new URL('node_modules/react-router/dist/production/', import.meta.url));
+const productionRouter = [
+  { find: /^react-router$/, replacement: `${ROUTER}index.mjs` },
+  { find: /^react-router\/dom$/, replacement: `${ROUTER}dom-export.mjs` },
+];
+
+export default defineConfig(({ isSsrBuild, command }) => ({
   plugins: [react(), tailwindcss()],
+  resolve: { alias: command === 'build' ? productionRouter : [] },
   build: isSsrBuild
     ? { target: 'node20', sourcemap: true, rollupOptions: { input: serverEntries } }
     : {
@@ -22,7 +31,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         assetsInlineLimit: 0,
         manifest: true,
         // One chunk of what every page needs compresses better than a dozen small ones.
-        rollupOptions: { output: { advancedChunks: { groups: [{ name: 'base', test: BASE }] } } },
+        rollupOptions: { output: { codeSplitting: { groups: [{ name: 'base', test: BASE }] } } },
       },
   server: {
     proxy: { '/api': process.env.API_ORIGIN ?? 'http://127.0.0.1:3000' },

@@ -45,7 +45,8 @@ function useLeave() {
       onSuccess: async () => {
         chooseTheme(theme);
         hideTime(isHidden);
-        await navigate(`/sign-in/${me.school.code}`);
+        // At once, because a page still drawn would ask again for what is cleared.
+        await navigate(`/sign-in/${me.school.code}`, { flushSync: true });
         queryClient.clear();
       },
     });

@@ -72,7 +72,9 @@ test('answers handed in offline go on, wait in words, and are sent in order once
   const { page, context } = await signIn(study.student);
   await openSet(page);
   await context.setOffline(true);
-  await page.getByText('Your answers are kept on this device and sent when you are back.').waitFor();
+  await page
+    .getByText('Your answers are kept on this page and sent when you are back. Keep it open until then.')
+    .waitFor();
   await write(page, '42');
   await button(page, 'Keep and go on').click();
   await question(page, 2).waitFor();
@@ -117,7 +119,7 @@ test('a busy server and a reload lose nothing that was handed in', async () => {
   await write(page, '42');
   await button(page, 'Hand in answer').click();
   await status(page, 'Plait is busy.').waitFor();
-  await page.getByRole('heading', { name: 'Kept on this device' }).waitFor();
+  await page.getByRole('heading', { name: 'Kept on this page' }).waitFor();
   await page.reload();
   await status(page, 'One is waiting: question 1.').waitFor();
   await page.unroute('**/api/sets/*/answers');
@@ -218,7 +220,7 @@ test('a session that ends under the page keeps the answer for its owner alone', 
   await page.getByRole('heading', { name: /There is no such page|^\w+day \d+/ }).waitFor();
   await page.goto('/today');
   await page.getByRole('heading', { name: /^\w+day \d+/ }).waitFor();
-  expect(await page.getByText(/kept on this device|seventeen/).count()).toBe(0);
+  expect(await page.getByText(/kept on this (device|page)|seventeen/).count()).toBe(0);
   await openSet(page);
   expect(await page.getByRole('textbox').inputValue()).toBe('');
   expect(await counted(study.school.id)).toEqual([[1, '42', 1]]);
@@ -245,7 +247,7 @@ test('signing out in another tab leads this one to the sign-in, and what waits h
   await page.route('**/api/sets/*/answers', (route) => route.abort());
   await write(page, '42');
   await button(page, 'Hand in answer').click();
-  await page.getByRole('heading', { name: 'Kept on this device' }).waitFor();
+  await page.getByRole('heading', { name: 'Kept on this page' }).waitFor();
   const tab = await context.newPage();
   await tab.goto('/today');
   await button(tab, /your settings$/).click();
@@ -257,6 +259,117 @@ test('signing out in another tab leads this one to the sign-in, and what waits h
   expect((await kept(page)).length).toBe(1);
   await signInOn(page, study.student);
   await expect.poll(() => kept(page)).toEqual([]);
+  expect(await counted(study.school.id)).toEqual([[1, '42', 1]]);
+  await context.close();
+});
+
+/** What a person's own device keeps, as the browser's database holds it; none where there is no database. */
+const onDevice = (page: Page): Promise<string[]> =>
+  page.evaluate(async () => {
+    if (!(await indexedDB.databases()).some(({ name }) => name === 'plait')) return [];
+    const opened = indexedDB.open('plait');
+    await new Promise((resolve) => {
+      opened.onsuccess = resolve;
+    });
+    const keys = opened.result.transaction('kept').objectStore('kept').getAllKeys();
+    await new Promise((resolve) => {
+      keys.onsuccess = resolve;
+    });
+    opened.result.close();
+    return keys.result.map(String);
+  });
+
+test('on an own device an answer outlives its tab and is sent from any page of the same person', async () => {
+  const study = await threeQuestions();
+  const { page, context } = await signIn(study.student);
+  await page.goto(`/sign-in/${study.school.code}`);
+  await page.getByLabel('This is my own device').check();
+  await signInOn(page, study.student);
+  await page.getByRole('heading', { name: /^\w+day \d+/ }).waitFor();
+  await openSet(page);
+  await context.route('**/api/sets/*/answers', (route) => route.abort());
+  await write(page, '42');
+  await button(page, 'Hand in answer').click();
+  await page.getByRole('heading', { name: 'Kept on this device' }).waitFor();
+  await status(page, 'If you close it, they go when you next open Plait.').waitFor();
+  await button(page, 'Next question').click();
+  await page.getByRole('textbox').fill('half an');
+  await expect.poll(() => onDevice(page)).toHaveLength(2);
+  expect(await kept(page)).toEqual([]);
+  await page.close();
+
+  const later = await context.newPage();
+  await later.goto('/topics');
+  await status(later, 'One answer is kept on this device and sent when').waitFor();
+  await context.unroute('**/api/sets/*/answers');
+  await expect.poll(async () => (await onDevice(later)).filter((key) => key.includes('answers'))).toEqual([]);
+  expect(await counted(study.school.id)).toEqual([[1, '42', 1]]);
+  await later.goto('/today');
+  await later.getByRole('link', { name: 'Continue mixed set' }).click();
+  await question(later, 2).waitFor();
+  expect(await later.getByRole('textbox').inputValue()).toBe('half an');
+
+  // Signing out asks where something is unsent, and leaves nothing behind.
+  await context.route('**/api/sets/*/answers', (route) => route.abort());
+  await write(later, '41');
+  await button(later, 'Hand in answer').click();
+  await later.getByRole('heading', { name: 'Kept on this device' }).waitFor();
+  await later.getByRole('link', { name: 'Leave the set' }).click();
+  await button(later, /your settings$/).click();
+  await button(later, 'Sign out').click();
+  const dialog = later.getByRole('dialog', { name: 'Sign out and lose what is not sent?' });
+  await dialog.getByText('One answer is kept here and not sent yet.').waitFor();
+  await dialog.getByRole('button', { name: 'Sign out' }).click();
+  await later.getByRole('heading', { name: 'Sign in' }).waitFor();
+  await expect.poll(() => onDevice(later)).toEqual([]);
+  expect(await later.evaluate(() => localStorage.getItem('plait.device'))).toBeNull();
+  await context.close();
+});
+
+test('an answer refused after its set was left is told in words, with what was written', async () => {
+  const study = await threeQuestions();
+  const { page, context } = await signIn(study.student);
+  await openSet(page);
+  await page.route('**/api/sets/*/answers', (route) => route.abort());
+  await write(page, '42 sheep');
+  await button(page, 'Hand in answer').click();
+  await page.getByRole('heading', { name: 'Kept on this page' }).waitFor();
+  await page.unroute('**/api/sets/*/answers');
+  await page.route('**/api/sets/*/answers', (route) =>
+    route.fulfill({
+      status: 422,
+      contentType: 'application/problem+json',
+      body: JSON.stringify({ type: '/problems/refused', title: 'No', status: 422, detail: 'It is too long.' }),
+    }),
+  );
+  await page.getByRole('link', { name: 'Leave the set' }).click();
+  await status(page, 'An answer was not taken. It is too long. You wrote: “42 sheep”.').waitFor();
+  expect(await kept(page)).toEqual([]);
+  await page.reload();
+  await button(page, 'Put this note away').click();
+  expect(await page.getByText('42 sheep').count()).toBe(0);
+  await page.reload();
+  await page.getByRole('heading', { name: /^\w+day \d+/ }).waitFor();
+  expect(await page.getByText('42 sheep').count()).toBe(0);
+  await context.close();
+});
+
+test('a browser that stores nothing loses no answer while the page stays, and says so', async () => {
+  const study = await threeQuestions();
+  const { page, context } = await signIn(study.student);
+  await page.addInitScript(() => {
+    Storage.prototype.setItem = () => {
+      throw new DOMException('full', 'QuotaExceededError');
+    };
+  });
+  await openSet(page);
+  await write(page, '42');
+  await status(page, 'This browser stores nothing.').waitFor();
+  await page.route('**/api/sets/*/answers', (route) => route.abort());
+  await button(page, 'Hand in answer').click();
+  await status(page, 'This browser stores nothing, so do not close or reload it until then.').waitFor();
+  await page.unroute('**/api/sets/*/answers');
+  await marked(page).waitFor({ timeout: 15_000 });
   expect(await counted(study.school.id)).toEqual([[1, '42', 1]]);
   await context.close();
 });
@@ -294,7 +407,7 @@ test.each([
         // The clock jumps once more while an answer waits, and the page is loaded again.
         await page.route('**/api/sets/*/answers', (route) => route.abort());
         await button(page, 'Hand in answer').click();
-        await page.getByRole('heading', { name: 'Kept on this device' }).waitFor();
+        await page.getByRole('heading', { name: 'Kept on this page' }).waitFor();
         await page.clock.setSystemTime(Date.now() + 2 * offset);
         await page.reload();
         await page.unroute('**/api/sets/*/answers');

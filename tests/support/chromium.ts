@@ -21,7 +21,11 @@ interface AxeRun {
 export async function axe(page: Page, rules: string[] = AXE_TAGS): Promise<AxeFinding[]> {
   if (!(await page.evaluate(() => 'axe' in window))) await page.evaluate(axeSource);
   const run = await page.evaluate(
-    (only) => (window as unknown as { axe: { run: (o: object) => Promise<AxeRun> } }).axe.run({ runOnly: only }),
+    (only) =>
+      (window as unknown as { axe: { run: (o: object) => Promise<AxeRun> } }).axe.run({
+        runOnly: only,
+        resultTypes: ['violations'],
+      }),
     rules,
   );
   return run.violations.map(({ id, help, nodes }) => ({

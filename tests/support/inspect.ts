@@ -7,6 +7,9 @@ const LOOKS = [
   { colorScheme: 'dark', viewport: PHONE },
   { colorScheme: 'light', viewport: PHONE },
 ] as const;
+type Look = (typeof LOOKS)[number];
+/** Where only the sizes matter, because the colours were looked at elsewhere. */
+export const SIZES = LOOKS.filter(({ colorScheme }) => colorScheme === 'light');
 /** What differs between light and dark; the rest is the same page and is looked at once a width. */
 const COLOUR_RULES = ['color-contrast', 'link-in-text-block'];
 /** 400 % zoom of a 1280 window, where WCAG 1.4.10 asks for no sideways scrolling. */
@@ -32,10 +35,10 @@ const overhang = (page: Page): Promise<string | null> =>
  * Everything wrong with a page as it stands, light and dark, at a desk, on a phone and at 320 px: what axe finds and
  * what scrolls sideways. The page is left at its own size.
  */
-export async function inspect(page: Page, name: string): Promise<string[]> {
+export async function inspect(page: Page, name: string, looks: readonly Look[] = LOOKS): Promise<string[]> {
   const faults: string[] = [];
   const viewport = page.viewportSize() ?? DESK;
-  for (const look of LOOKS) {
+  for (const look of looks) {
     await page.emulateMedia({ colorScheme: look.colorScheme });
     await page.setViewportSize(look.viewport);
     // Colours that are still on their way from the look before are nobody's colours.

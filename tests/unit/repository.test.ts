@@ -5,13 +5,12 @@ import { describe, expect, test } from 'vitest';
 /** What stands at the top of the project, and nothing else. */
 const TOP = [
   '.ci',
+  '.github',
   '.gitignore',
   '.npmrc',
   'DEVELOPERS.md',
-  'LICENSE',
   'README.md',
   'biome.json',
-  'docs',
   'index.html',
   'package-lock.json',
   'package.json',

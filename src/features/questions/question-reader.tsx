@@ -78,7 +78,7 @@ export function QuestionReader({ question, subject }: QuestionReaderProps) {
             {facts.map(([name, value]) => (
               <div key={`${name} ${value}`} className="flex justify-between gap-4 border-b border-rule-soft py-2">
                 <dt className="text-ink-2">{name}</dt>
-                <dd className="text-right font-medium">{value}</dd>
+                <dd className="min-w-0 text-right font-medium">{value}</dd>
               </div>
             ))}
           </dl>

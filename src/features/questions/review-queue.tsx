@@ -87,7 +87,7 @@ function Opening({ row, hasSubjects, isLink = false }: { row: ReviewRowDto; hasS
         </p>
         <p className="mt-0.5 flex flex-wrap items-center gap-x-2 text-sm text-ink-2">
           {hasSubjects ? <StrandLabel subject={row.subject} isPale /> : null}
-          <span>
+          <span className="min-w-0">
             {row.topic}, {marksWords(row.maxMarks)}
           </span>
         </p>

@@ -1,4 +1,4 @@
-import { useQueryClient } from '@tanstack/react-query';
+import { notifyManager, useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import { useToast } from '#src/components/toast.tsx';
@@ -46,7 +46,8 @@ export function useTrouble({ id, saver, form, onReload }: TroubleInput) {
         if (!newer) return;
         saver.rebase(newer.current.revision, true);
         client.setQueryData(questionQuery(id).queryKey, newer);
-        onReload();
+        // Queries tell their news a moment later; the form has to start from it and not from what it showed before.
+        notifyManager.schedule(onReload);
       }),
     onSaveMine: () =>
       void fetchNewer().then((newer) => {
