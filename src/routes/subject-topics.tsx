@@ -83,7 +83,9 @@ function SpecificationTopics({ subject, specification, topics }: SpecificationTo
   return (
     <section aria-labelledby={specification.id} className="mb-10">
       <div className="mb-2 flex flex-wrap items-end justify-between gap-x-4 gap-y-2">
-        <h2 id={specification.id}>{specification.name}</h2>
+        <h2 id={specification.id} className="min-w-0">
+          {specification.name}
+        </h2>
         <AddTopic subject={subject} specification={specification} topics={topics} />
       </div>
       {topics.length > 0 ? (

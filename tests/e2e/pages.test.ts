@@ -238,6 +238,23 @@ test('a student: the runner in each of its states, the summary, a set done today
   await page.getByText('You are offline.').waitFor();
   await look('runner: offline');
   await visitor.context.setOffline(false);
+  await page.getByText('You are offline.').waitFor({ state: 'detached' });
+  expectNothing();
+  await page.route('**/api/sets/*/answers', (route) => route.abort());
+  for (const field of await page.getByRole('textbox').all()) await field.fill('1');
+  await page.getByRole('radio', { name: 'Guess' }).check({ force: true });
+  await button(page, 'Hand in answer').click();
+  await heading(page, /^Kept on this/).waitFor();
+  await look('runner: kept');
+  await page.getByRole('link', { name: 'Leave the set' }).click();
+  await page
+    .getByRole('status')
+    .filter({ hasText: /^You are offline\. One answer is kept/ })
+    .waitFor();
+  await look('/today with an answer not sent');
+  await page.unroute('**/api/sets/*/answers');
+  // The browser's own lines for requests that were cut off.
+  visitor.troubles.splice(0, 99, ...visitor.troubles.filter((trouble) => !trouble.includes('net::ERR_FAILED')));
   expectNothing();
   await visitor.context.close();
 });
@@ -351,10 +368,26 @@ test('a new school: every page says what will be there', async () => {
   await teacher.open('/questions', 'No questions in geography yet', 'empty /questions');
   await teacher.open('/review', 'Nothing to review', 'empty /review');
   await teacher.open('/item-statistics', 'No statistics yet', 'empty /item-statistics');
-  await teacher.open(`/subjects/${subject.id}/topics`, 'No topics in geography yet', 'empty /subjects/:id/topics');
   await teacher.open('/questions/new', 'New question', '/questions/new without topics');
+  await teacher.open(`/subjects/${subject.id}/topics`, 'Geography specification', 'empty topics of a head');
+  await teacher.page.getByText('No topics yet.').waitFor();
+  await button(teacher.page, 'Add a topic').click();
+  const dialog = teacher.page.getByRole('dialog');
+  await dialog.getByRole('button', { name: 'Add topic' }).click();
+  await dialog.locator('[aria-invalid]').first().waitFor();
+  await teacher.look('Add a topic, with errors');
+  await dialog.getByLabel('Number').fill('4.2');
+  await dialog.getByLabel('Title').fill('Rivers');
+  await dialog.getByRole('button', { name: 'Add topic' }).click();
+  await teacher.page.getByRole('status').filter({ hasText: 'Added. 4.2 Rivers is in the list.' }).waitFor();
+  await teacher.page.getByRole('row', { name: /4\.2 Rivers/ }).waitFor();
   teacher.expectNothing();
-  for (const { page } of [student, teacher]) await page.context().close();
+
+  const other = await aSubject(school, { name: 'History', strand: 'hi' });
+  const reader = survey(await signIn(await aTeacher(school, other.id)));
+  await reader.open(`/subjects/${other.id}/topics`, 'No topics in history yet', 'empty topics of a teacher');
+  reader.expectNothing();
+  for (const { page } of [student, teacher, reader]) await page.context().close();
 });
 
 const LONG_WORD = 'Donaudampfschifffahrtselektrizitätenhauptbetriebswerkbauunterbeamtengesellschaft';

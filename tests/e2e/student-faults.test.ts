@@ -263,6 +263,33 @@ test('signing out in another tab leads this one to the sign-in, and what waits h
   await context.close();
 });
 
+test('somebody else who signs in in another tab neither sends nor loses what waits in this one', async () => {
+  const study = await threeQuestions();
+  const other = await aStudent(study.school);
+  await enrol(study, other);
+  const { page, context } = await signIn(study.student);
+  await openSet(page);
+  await page.route('**/api/sets/*/answers', (route) => route.abort());
+  await write(page, '42');
+  await button(page, 'Hand in answer').click();
+  await page.getByRole('heading', { name: 'Kept on this page' }).waitFor();
+  const tab = await context.newPage();
+  await tab.goto(`/sign-in/${study.school.code}`);
+  await signInOn(tab, other);
+  await tab.getByRole('heading', { name: /^\w+day \d+/ }).waitFor();
+  expect(await tab.getByText(/kept on this/).count()).toBe(0);
+  await page.unroute('**/api/sets/*/answers');
+  await page.getByText('Sign in to go on where you were.').waitFor();
+  expect((await kept(page)).length).toBe(1);
+  expect(await storedAnswers(study.school.id)).toEqual([]);
+  await signInOn(page, study.student);
+  await marked(page).waitFor();
+  const answers = await storedAnswers(study.school.id);
+  expect(answers.map(({ user_id, responses }) => [user_id, responses[0]])).toEqual([[study.student.id, '42']]);
+  expect(await kept(page)).toEqual([]);
+  await context.close();
+});
+
 /** What a person's own device keeps, as the browser's database holds it; none where there is no database. */
 const onDevice = (page: Page): Promise<string[]> =>
   page.evaluate(async () => {

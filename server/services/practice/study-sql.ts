@@ -8,6 +8,8 @@
  * - `topic`: topics of those entries, with the day the class was taught it, the marks it carries in papers still to
  *   sit, and the next of them. A topic is over when all its papers are; one without papers never is.
  * - `live`: live questions of those topics, each once, under the topic whose paper is next.
+ *
+ * Materialised, because the planner would otherwise work the topics out again for every question.
  */
 export const STUDY = `
   entry AS (
@@ -28,7 +30,7 @@ export const STUDY = `
       CROSS JOIN LATERAL (SELECT (s.sat_on + s.starts_at) AT TIME ZONE s.zone AS at) starts
       WHERE s.paper_id = p.id
     ) sitting
-  ), topic AS (
+  ), topic AS MATERIALIZED (
     SELECT t.id, t.number, t.title, t.position, entry.subject_id, entry.tier, entry.option, taught.taught_on,
       coalesce(sum(w.marks) FILTER (WHERE paper.is_ahead), 0)::int AS marks,
       min(paper.next_on) AS exam_on,
@@ -42,7 +44,7 @@ export const STUDY = `
     LEFT JOIN topic_weights w ON w.topic_id = t.id
     LEFT JOIN paper ON paper.id = w.paper_id
     GROUP BY t.id, t.number, t.title, t.position, entry.subject_id, entry.tier, entry.option, taught.taught_on
-  ), live AS (
+  ), live AS MATERIALIZED (
     SELECT DISTINCT ON (q.id) q.id AS question_id, v.id AS version_id, v.max_marks, v.expected_seconds,
       topic.id AS topic_id, topic.subject_id, topic.taught_on, topic.marks, topic.exam_on, topic.paper_id, topic.is_ahead
     FROM topic

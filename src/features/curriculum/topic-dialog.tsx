@@ -60,7 +60,7 @@ export function TopicDialog(props: TopicDialogProps) {
         </p>
         <Field
           label="Number"
-          hint="4.2"
+          hint="Such as 4.2"
           autoComplete="off"
           maxLength={20}
           error={errors.number?.message}

@@ -38,7 +38,7 @@ export function TopicList({ subject, specification, topics }: TopicListProps) {
   ];
   return (
     <>
-      <div className="hidden overflow-x-auto lg:block">
+      <div className="relative hidden overflow-x-auto lg:block">
         <table className="tbl">
           <caption className="sr-only">Topics of {specification.name}</caption>
           <thead>

@@ -2,10 +2,11 @@ import { type FormEvent, type ReactNode, useEffect, useRef, useState } from 'rea
 import type { SetItemDto } from '#shared/schemas/practice.ts';
 import { ExamQuestion } from '#src/components/exam-question.tsx';
 import { Sheet, SheetRow } from '#src/components/sheet.tsx';
+import { subjectLang } from '#src/lib/subject-words.ts';
 import { AnswerField } from './answer-field.tsx';
 import type { Draft } from './drafts.ts';
 import { HowSureChoice } from './how-sure-choice.tsx';
-import { langOf, SubjectRow } from './question-rows.tsx';
+import { SubjectRow } from './question-rows.tsx';
 import { RunnerFrame, type RunnerState } from './runner-frame.tsx';
 import type { FinishedAnswer } from './use-runner.ts';
 import { useStopwatch } from './use-stopwatch.ts';
@@ -70,13 +71,13 @@ export function AskView(props: AskViewProps) {
           <ExamQuestion
             question={item.question}
             number={state.place + 1}
-            lang={langOf(item)}
+            lang={subjectLang(item.subject)}
             renderAnswer={(part, index) => (
               <AnswerField
                 part={part}
                 index={index}
                 isOnly={parts.length === 1}
-                lang={langOf(item)}
+                lang={subjectLang(item.subject)}
                 value={draft.responses[index] ?? ''}
                 isDisabled={isSending}
                 onChange={(text) =>

@@ -4,9 +4,7 @@ import { type AskedPart, ExamQuestion } from '#src/components/exam-question.tsx'
 import { RuledLines } from '#src/components/ruled-lines.tsx';
 import { SheetRow } from '#src/components/sheet.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
-
-/** French is read and spelled as French. */
-export const langOf = (item: SetItemDto): string | undefined => (item.subject.strand === 'fr' ? 'fr' : undefined);
+import { subjectLang } from '#src/lib/subject-words.ts';
 
 /** The subject at the left; the topic at the right, once answered. */
 export function SubjectRow({ item, topic }: { item: SetItemDto; topic?: AnswerResultDto['topic'] | undefined }) {
@@ -55,7 +53,7 @@ export function AnsweredRows({ item, number, responses, renderMarks }: AnsweredR
     <ExamQuestion
       question={item.question}
       number={number}
-      lang={langOf(item)}
+      lang={subjectLang(item.subject)}
       renderAnswer={(part, index) => <GivenAnswer part={part} response={responses[index] ?? ''} />}
       {...(renderMarks ? { renderMarks } : {})}
     />

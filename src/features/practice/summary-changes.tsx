@@ -6,7 +6,9 @@ import { type Change, changesOf } from './summary-words.ts';
 function ChangeRow({ subject, topic, words, standing }: Change & { standing: Standing }) {
   return (
     <li className="grid grid-cols-[2.5rem_minmax(0,1fr)_auto] items-center border-b border-rule-soft py-2.5 first:pt-0">
-      <StrandLabel subject={subject} />
+      <span>
+        <StrandLabel subject={subject} />
+      </span>
       <span className="min-w-0">
         <span className="sr-only">{subject.name}, </span>
         <span className="font-semibold [overflow-wrap:anywhere]">{topic.title}</span>

@@ -73,12 +73,12 @@ export function SummaryTopics({ topics, today }: { topics: SummaryTopic[]; today
                 <td className="py-2 text-ink-2 text-sm whitespace-nowrap sm:text-right sm:pl-5 max-sm:pt-0 max-sm:order-last">
                   {total ? (
                     <>
-                      <span className="sm:sr-only">{row.subject.name} </span>
+                      <span className="sm:sr-only">{row.subject.name} in all: </span>
                       {total}
                     </>
                   ) : null}
                 </td>
-                <td className="py-2 text-ink-2 text-sm whitespace-nowrap sm:text-right sm:pl-5 max-sm:pt-0 max-sm:order-last">
+                <td className="py-2 text-ink-2 text-sm text-right whitespace-nowrap sm:pl-5 max-sm:pt-0 max-sm:order-last">
                   {row.returnsOn ? returnWords(row.returnsOn, today) : '–'}
                 </td>
               </tr>

@@ -3,6 +3,7 @@ import { useCallback, useEffect, useMemo, useRef, useState, useSyncExternalStore
 import { isTransient, NetworkError, ProblemError } from '#src/lib/api.ts';
 import { kept, onGoneElsewhere } from '#src/lib/kept.ts';
 import { isSignedOut, noticeSignedOut } from '#src/lib/query-client.ts';
+import { checkSignedInAs } from '#src/queries/me.ts';
 import { handIn, saveSelfMark } from '#src/queries/practice.ts';
 import { AnswerQueue, ageOf, type Waiting } from './answer-queue.ts';
 
@@ -73,6 +74,8 @@ export function useAnswerQueue(userId: string, setId: string, news: QueueNews) {
           await sendOne(setId, entry);
         } catch (error) {
           if (isSignedOut(error) || isTransient(error)) throw error;
+          // Refused because another person's session sent it: then it waits for its owner.
+          await checkSignedInAs(userId);
           // Nobody would hear of it here any more: the page that is there now sends it again and says so.
           if (isStopped.current) return;
           told.current.onRefused({
@@ -95,7 +98,7 @@ export function useAnswerQueue(userId: string, setId: string, news: QueueNews) {
     } finally {
       isSending.current = false;
     }
-  }, [queue, setId]);
+  }, [queue, setId, userId]);
 
   useEffect(() => {
     const retry = () => {

@@ -77,7 +77,7 @@ export function QuestionReader({ question, subject }: QuestionReaderProps) {
           <dl className="text-sm">
             {facts.map(([name, value]) => (
               <div key={`${name} ${value}`} className="flex justify-between gap-4 border-b border-rule-soft py-2">
-                <dt className="text-ink-2">{name}</dt>
+                <dt className="min-w-0 text-ink-2">{name}</dt>
                 <dd className="min-w-0 text-right font-medium">{value}</dd>
               </div>
             ))}
