@@ -38,6 +38,9 @@ const PASSING = new Set([
   'ECONNRESET',
 ]);
 
+/** What the driver says, without any code, of a connection that broke off: while it was set up, waited or was in use. */
+const BROKEN_OFF = /^(Connection terminated|Client (has encountered a connection error|was closed) )/;
+
 /** A null character that came in an address: no text column can hold it. */
 const UNSTORABLE = '22021';
 
@@ -51,7 +54,8 @@ const codeOf = (error: unknown): unknown => {
 const isPassing = (error: unknown): boolean => {
   if (error instanceof ConnectionAcquireTimeoutError || error instanceof ConnectionError) return true;
   const code = codeOf(error);
-  return (error instanceof DatabaseError && code === undefined) || PASSING.has(String(code));
+  if ((error instanceof DatabaseError && code === undefined) || PASSING.has(String(code))) return true;
+  return error instanceof Error && BROKEN_OFF.test(error.message);
 };
 
 function known(error: unknown): Problem | null {

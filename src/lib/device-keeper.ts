@@ -1,10 +1,8 @@
+import { inTime } from './in-time.ts';
 import { isKeyOf, type Keeper } from './keeper.ts';
 import { DATABASE } from './kept-keys.ts';
 
 const STORE = 'kept';
-/** A browser that does not answer in this time counts as one that keeps nothing. */
-const PATIENCE_MS = 2000;
-
 const settled = <Result>(request: IDBRequest<Result>): Promise<Result> =>
   new Promise((resolve, reject) => {
     request.onsuccess = () => resolve(request.result);
@@ -16,14 +14,6 @@ const done = (change: IDBTransaction): Promise<void> =>
     change.oncomplete = () => resolve();
     change.onabort = () => reject(change.error ?? new Error('The browser did not keep it.'));
   });
-
-const inTime = <Result>(work: Promise<Result>): Promise<Result> =>
-  Promise.race([
-    work,
-    new Promise<never>((_, reject) => {
-      setTimeout(() => reject(new Error('The browser does not answer.')), PATIENCE_MS);
-    }),
-  ]);
 
 let opened: Promise<IDBDatabase> | null = null;
 

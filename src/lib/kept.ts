@@ -1,4 +1,5 @@
 import { useSyncExternalStore } from 'react';
+import { inTime } from './in-time.ts';
 import { type Keeper, tabKeeper } from './keeper.ts';
 import { DATABASE } from './kept-keys.ts';
 import { type Keeping, KeptStore } from './kept-store.ts';
@@ -6,7 +7,7 @@ import { isOwnDevice } from './own-device.ts';
 
 /** False only where the browser can tell that nothing was ever kept on this device. */
 const isThere = async (): Promise<boolean> =>
-  isOwnDevice() || !indexedDB.databases || (await indexedDB.databases()).some(({ name }) => name === DATABASE);
+  isOwnDevice() || !indexedDB.databases || (await inTime(indexedDB.databases())).some(({ name }) => name === DATABASE);
 
 const onDevice = async (): Promise<Keeper> => (await import('./device-keeper.ts')).deviceKeeper;
 

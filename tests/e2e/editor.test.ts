@@ -1,52 +1,21 @@
-import type { Page } from 'playwright-core';
 import { expect, test } from 'vitest';
-import { aSubject, aTopic, type FactorySubject } from '#seeds/factories/curriculum.ts';
-import { aTeacher, type FactoryPerson } from '#seeds/factories/people.ts';
-import { aNumberBody, aQuestion, aRecallBody } from '#seeds/factories/question.ts';
-import { aSchool, type FactorySchool } from '#seeds/factories/school.ts';
 import { select, withSchool } from '#server/db/scope.ts';
 import { withChromium } from '#tests/support/chromium.ts';
+import {
+  aDepartment,
+  aDraft,
+  button,
+  cutOff,
+  field,
+  heading,
+  openQuestion,
+  saved,
+  stem,
+  toast,
+} from '#tests/support/editor-page.ts';
 import { expectFocus } from '#tests/support/keyboard.ts';
 
 const { signIn } = withChromium();
-
-const button = (page: Page, name: string | RegExp) =>
-  page.getByRole('button', { name, exact: typeof name === 'string' });
-const heading = (page: Page, name: string | RegExp) => page.getByRole('heading', { name });
-const field = (page: Page, name: string) => page.getByRole('textbox', { name, exact: true });
-const stem = (page: Page) => field(page, 'Question');
-const saved = (page: Page) => page.getByRole('status').filter({ hasText: /^Saved \d/ });
-const toast = (page: Page, words: string) => page.getByRole('status').filter({ hasText: words });
-
-interface Department {
-  school: FactorySchool;
-  subject: FactorySubject;
-  topicId: string;
-  author: FactoryPerson;
-  colleague: FactoryPerson;
-}
-
-async function aDepartment(): Promise<Department> {
-  const school = await aSchool();
-  const subject = await aSubject(school, { name: 'Physics', strand: 'ph' });
-  const { id: topicId } = await aTopic(school, subject, { title: 'Speed', number: '5' });
-  const author = await aTeacher(school, subject.id);
-  return { school, subject, topicId, author, colleague: await aTeacher(school, subject.id) };
-}
-
-const aDraft = ({ school, subject, topicId, author }: Department, text = 'Work out $6 \\times 7$.') =>
-  aQuestion(school, subject, { author, topicId, status: 'draft', body: aNumberBody(text) });
-
-async function openQuestion(page: Page, id: string): Promise<void> {
-  await page.goto(`/questions/${id}`);
-  await stem(page).waitFor();
-}
-
-/** Makes saves of the draft fail as a lost connection does, until what it gives back is called. */
-async function cutOff(page: Page): Promise<() => Promise<void>> {
-  await page.route('**/api/questions/*/draft', (route) => route.abort());
-  return () => page.unroute('**/api/questions/*/draft');
-}
 
 test('a draft is saved as it is typed and on the way out, and leaving asks where that fails', async () => {
   const department = await aDepartment();
@@ -251,166 +220,6 @@ test('what keeps a question from review is listed, led to and taken off the list
   await button(page, 'Send for review').click();
   await toast(page, 'Sent for review.').waitFor();
   await page.getByText('You wrote this, so you cannot put it live.').waitFor();
-  expect(troubles).toEqual([]);
-  await context.close();
-});
-
-test('returned with a comment, sent again, put live, superseded by a new version, retired', async () => {
-  const department = await aDepartment();
-  const { id, number } = await aDraft(department, 'Work out $6 \\times 7$, quickly.');
-  const author = await signIn(department.author);
-  const colleague = await signIn(department.colleague);
-  const versions = () =>
-    withSchool(department.school.id, () =>
-      select<{ version: number; status: string; stem: string }>(
-        `SELECT version, status, body ->> 'stem' AS stem FROM question_versions WHERE question_id = $1 ORDER BY version`,
-        [id],
-      ),
-    );
-  const send = async () => {
-    await button(author.page, 'Send for review').click();
-    await toast(author.page, 'Sent for review.').waitFor();
-  };
-  const review = async () => {
-    await colleague.page.goto('/review');
-    await colleague.page.getByRole('link', { name: `Review ${number}` }).click();
-    await button(colleague.page, 'Put live').waitFor();
-  };
-
-  await openQuestion(author.page, id);
-  await send();
-  await review();
-  await button(colleague.page, 'Return to author').click();
-  const dialog = colleague.page.getByRole('dialog');
-  await dialog.getByRole('button', { name: 'Return to author' }).click();
-  await dialog.getByText('Say what should change.').waitFor();
-  await dialog.getByLabel('What should change').fill('Leave out\n“quickly”.');
-  await dialog.getByRole('button', { name: 'Return to author' }).click();
-  await toast(colleague.page, `Question ${number} is back with`).waitFor();
-  await heading(colleague.page, 'Nothing to review').waitFor();
-
-  await openQuestion(author.page, id);
-  await author.page.getByText(`${department.colleague.name} returned this:`).waitFor();
-  await author.page.getByText('“quickly”.').waitFor();
-  await stem(author.page).fill('Work out $6 \\times 7$.');
-  await saved(author.page).waitFor();
-  await send();
-  await review();
-  await button(colleague.page, 'Put live').click();
-  await toast(colleague.page, `Question ${number} is live.`).waitFor();
-
-  await author.page.goto(`/questions/${id}`);
-  await button(author.page, 'Start a new version').click();
-  await stem(author.page).fill('Work out $7 \\times 6$.');
-  await saved(author.page).waitFor();
-  await author.page.getByText('Version 1 is live.').waitFor();
-  expect(await versions()).toMatchObject([
-    { version: 1, status: 'live', stem: 'Work out $6 \\times 7$.' },
-    { version: 2, status: 'draft', stem: 'Work out $7 \\times 6$.' },
-  ]);
-  await send();
-  await review();
-  await button(colleague.page, 'Put live').click();
-  await toast(colleague.page, `Question ${number} is live.`).waitFor();
-  expect((await versions()).map(({ status }) => status)).toEqual(['superseded', 'live']);
-  await colleague.page.getByRole('listitem').filter({ hasText: 'Superseded' }).waitFor();
-
-  await author.page.goto(`/questions/${id}`);
-  await button(author.page, 'Retire').click();
-  await author.page.getByRole('dialog', { name: `Retire question ${number}?` }).waitFor();
-  // Escape keeps it and gives the focus back.
-  await author.page.keyboard.press('Escape');
-  await expectFocus(button(author.page, 'Retire'));
-  await author.page.keyboard.press('Enter');
-  await author.page.getByRole('dialog').getByRole('button', { name: 'Retire' }).click();
-  await toast(author.page, `Question ${number} is retired.`).waitFor();
-  expect((await versions()).map(({ status }) => status)).toEqual(['superseded', 'retired']);
-  await author.page.goto('/questions?status=live');
-  await heading(author.page, 'No question matches').waitFor();
-  await author.page.goto('/questions?status=retired');
-  await author.page
-    .getByRole('link', { name: /Work out/ })
-    .first()
-    .waitFor();
-  for (const { context, troubles } of [author, colleague]) {
-    expect(troubles).toEqual([]);
-    await context.close();
-  }
-});
-
-test('the list: search as you type, filters, pages, and Back through all of them', async () => {
-  const department = await aDepartment();
-  const { school, subject, topicId, author, colleague } = department;
-  const other = await aTopic(school, subject, { title: 'Forces', number: '6' });
-  for (let n = 1; n <= 30; n++) {
-    await aQuestion(school, subject, { author, topicId, body: aNumberBody(`Work out the speed of car ${n}.`) });
-  }
-  await aQuestion(school, subject, {
-    author: colleague,
-    topicId: other.id,
-    kind: 'recallCard',
-    status: 'draft',
-    body: aRecallBody('State what is meant by a resultant force.'),
-  });
-  const { page, context, troubles } = await signIn(author);
-  const count = (words: string) => page.getByRole('status').filter({ hasText: words }).waitFor();
-  const chosen = (name: string) => page.getByRole('combobox', { name, exact: true });
-  await page.goto('/questions');
-  await count('1 to 25 of 31');
-  await page.getByRole('link', { name: 'Next', exact: true }).click();
-  await count('26 to 31 of 31');
-  await page.getByRole('link', { name: 'Previous', exact: true }).click();
-  await count('1 to 25 of 31');
-  await page.goBack();
-  await count('26 to 31 of 31');
-  await page.goBack();
-  await count('1 to 25 of 31');
-
-  const search = page.getByRole('searchbox', { name: 'Search wording or mark scheme' });
-  await search.click();
-  await page.keyboard.type('car');
-  await count('1 to 25 of 30');
-  await page.getByRole('link', { name: 'Next', exact: true }).click();
-  await count('26 to 30 of 30');
-  // Typing on keeps the focus and starts at the first page.
-  await search.fill('car 17');
-  await count('1 of 1');
-  await expectFocus(search);
-  expect(new URL(page.url()).searchParams.get('q')).toBe('car 17');
-  await page.getByRole('link', { name: 'Work out the speed of car 17.' }).first().click();
-  await heading(page, 'Versions').waitFor();
-  await page.goBack();
-  await count('1 of 1');
-  expect(await search.inputValue()).toBe('car 17');
-  // A filter chosen before the search has started: both hold.
-  await search.fill('resultant');
-  await chosen('Kind').selectOption('Short answer');
-  await heading(page, 'No question matches').waitFor();
-  await chosen('Kind').selectOption('Recall card');
-  await count('1 of 1');
-  await chosen('Status').selectOption('Live');
-  await heading(page, 'No question matches').waitFor();
-  await page.goBack();
-  await count('1 of 1');
-  expect(await chosen('Status').inputValue()).toBe('');
-  expect(await chosen('Kind').inputValue()).toBe('recallCard');
-  await page.goBack();
-  await heading(page, 'No question matches').waitFor();
-  await page.getByRole('link', { name: 'Clear search and filters' }).click();
-  await count('1 to 25 of 31');
-  expect(await search.inputValue()).toBe('');
-  await chosen('Author').selectOption(colleague.name);
-  await count('1 of 1');
-  await chosen('Author').selectOption('Any author');
-  await page
-    .getByRole('navigation', { name: 'Topics' })
-    .getByRole('link', { name: /Forces/ })
-    .click();
-  await count('1 of 1');
-  await page.getByRole('link', { name: 'State what is meant by a resultant force.' }).first().waitFor();
-  // The address alone brings all of it back.
-  await page.reload();
-  await count('1 of 1');
   expect(troubles).toEqual([]);
   await context.close();
 });

@@ -20,12 +20,13 @@ const overhang = (page: Page): Promise<string | null> =>
   page.evaluate(() => {
     const { scrollWidth, clientWidth } = document.documentElement;
     if (scrollWidth <= clientWidth) return null;
-    const isClipped = (element: Element): boolean =>
-      element.parentElement !== null &&
-      (getComputedStyle(element.parentElement).overflowX !== 'visible' || isClipped(element.parentElement));
+    const isOpen = (element: Element) => getComputedStyle(element).overflowX === 'visible';
+    const isSeen = (element: Element): boolean =>
+      element.parentElement === null || (isOpen(element.parentElement) && isSeen(element.parentElement));
     const outside = [...document.body.querySelectorAll('*')].filter((element) => {
       const { left, right } = element.getBoundingClientRect();
-      return Math.max(right, left + element.scrollWidth) > clientWidth + 1 && !isClipped(element);
+      const end = isOpen(element) ? Math.max(right, left + element.scrollWidth) : right;
+      return end > clientWidth + 1 && isSeen(element);
     });
     const words = outside.slice(-3).map((element) => element.outerHTML.slice(0, 120));
     return `${scrollWidth} px on ${clientWidth}: ${words.join(' … ')}`;

@@ -20,7 +20,7 @@ export function QuestionHeader({ title, status, saving, back, children }: Questi
           {back.label}
         </Link>
         <h1 className="!text-[2rem]">{title}</h1>
-        <p className="text-sm text-ink-2">
+        <p className="min-w-0 text-sm text-ink-2">
           {status}{' '}
           <span role="status" className="num font-semibold">
             {saving ? `${saving}.`.replace('….', '…') : ''}
