@@ -77,6 +77,8 @@ export const sittingSchema = z.object({
   startsAt: localTimeSchema,
   /** Length for this student, access arrangements included. */
   minutes: z.int(),
+  /** Of those minutes, the student's own extra time. */
+  extraMinutes: z.int(),
   hasRestBreaks: z.boolean(),
   daysAway: z.int(),
   /** Where the date came from. */

@@ -72,7 +72,7 @@ function SubjectStatistics({ subject, subjects }: { subject: SubjectDto; subject
           <h1>Item statistics</h1>
           <p className="mt-1.5 max-w-[44rem] text-md text-ink-2">
             Facility is the mean mark divided by the marks available: 0.90 is easy, 0.30 is hard. It is shown from ten
-            students on.
+            students on. Questions that nobody has answered yet are not listed.
           </p>
         </div>
         <SubjectChoice subjects={subjects} value={subject.id} onChange={(id) => setSearch({ subject: id })} />

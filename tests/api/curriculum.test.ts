@@ -170,6 +170,7 @@ describe('adding a topic', () => {
         ],
       }),
     ).toEqual(['#/weights/1/paperId', '#/weights/2/paperId']);
+    expect(await refused({ weights: [{ paperId, marks: 81 }] })).toEqual(['#/weights/0/marks']);
     const taken = aNewTopic(here, { number: '10' });
     await add(here, taken).expect(201);
     await add(here, { ...taken, title: 'Another' }).expect(409);

@@ -54,7 +54,7 @@ test('a teacher writes a question, a colleague puts it live, a student answers i
   await reviewer.page.goto('/review');
   await reviewer.page.getByRole('link', { name: /^Review \d+$/ }).click();
   await reviewer.page.getByRole('button', { name: 'Put live' }).click();
-  await reviewer.page.getByText(/is live\. Students meet it/).waitFor();
+  await reviewer.page.getByText(/is live\. Students can meet it/).waitFor();
 
   const learner = await signIn(student);
   await learner.page.goto('/today');

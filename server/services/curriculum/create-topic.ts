@@ -15,7 +15,8 @@ const byNumber = new Intl.Collator('en', { numeric: true });
 
 interface Place {
   topics: Topic[];
-  paperIds: string[];
+  /** Marks of each paper of the specification. */
+  paperMarks: ReadonlyMap<string, number>;
 }
 
 const isSame = (stored: Topic, input: CreateTopic): boolean =>
@@ -26,7 +27,7 @@ const isSame = (stored: Topic, input: CreateTopic): boolean =>
   stored.tier === input.tier &&
   stored.option === input.option;
 
-function faultsOf({ number, parentId, weights }: CreateTopic, { topics, paperIds }: Place): FieldError[] {
+function faultsOf({ number, parentId, weights }: CreateTopic, { topics, paperMarks }: Place): FieldError[] {
   const faults: FieldError[] = [];
   if (topics.some((topic) => topic.number === number)) {
     faults.push({ pointer: '#/number', detail: `There is a topic ${number} already.` });
@@ -34,12 +35,14 @@ function faultsOf({ number, parentId, weights }: CreateTopic, { topics, paperIds
   if (parentId !== null && !topics.some((topic) => topic.id === parentId)) {
     faults.push({ pointer: '#/parentId', detail: 'Choose a topic of the same specification.' });
   }
-  weights.forEach(({ paperId }, at) => {
+  weights.forEach(({ paperId, marks }, at) => {
     const isDouble = weights.findIndex((weight) => weight.paperId === paperId) < at;
-    if (isDouble || !paperIds.includes(paperId)) {
+    if (isDouble || !paperMarks.has(paperId)) {
       const detail = isDouble ? 'Give each paper once.' : 'Choose a paper of the same specification.';
       faults.push({ pointer: `#/weights/${at}/paperId`, detail });
     }
+    const most = paperMarks.get(paperId) ?? marks;
+    if (marks > most) faults.push({ pointer: `#/weights/${at}/marks`, detail: `The paper has ${most} marks in all.` });
   });
   return faults;
 }
@@ -80,8 +83,11 @@ export async function createTopic(scope: Scope, subjectId: string, input: Create
   if (stored) throw new Problem(409, 'duplicate', 'Another topic was already saved under this id.');
 
   const topics = await Topic.findAll({ where: { specificationId }, order: [['position', 'ASC']] });
-  const papers = await select<{ id: string }>('SELECT id FROM papers WHERE specification_id = $1', [specificationId]);
-  const faults = faultsOf(input, { topics, paperIds: papers.map((paper) => paper.id) });
+  const papers = await select<{ id: string; marks: number }>(
+    'SELECT id, marks FROM papers WHERE specification_id = $1',
+    [specificationId],
+  );
+  const faults = faultsOf(input, { topics, paperMarks: new Map(papers.map((paper) => [paper.id, paper.marks])) });
   if (faults.length > 0) throw unprocessable(faults);
 
   const position = await makeRoom(specificationId, number, topics);

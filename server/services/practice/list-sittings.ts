@@ -54,6 +54,7 @@ export async function listSittings(scope: Scope): Promise<SittingDto[]> {
     [actor.userId, today, now],
   );
   const arrangement = await ownArrangement(scope);
+  const extraOf = (minutes: number) => Math.round((minutes * (arrangement?.extra_time_percent ?? 0)) / 100);
   return rows.map((row) => ({
     id: row.id,
     paperId: row.paper_id,
@@ -62,7 +63,8 @@ export async function listSittings(scope: Scope): Promise<SittingDto[]> {
     season: row.season,
     on: row.sat_on,
     startsAt: row.starts_at,
-    minutes: Math.round(row.minutes * (1 + (arrangement?.extra_time_percent ?? 0) / 100)),
+    minutes: row.minutes + extraOf(row.minutes),
+    extraMinutes: extraOf(row.minutes),
     hasRestBreaks: arrangement?.has_rest_breaks ?? false,
     daysAway: daysBetween(today, row.sat_on),
     source: row.source,

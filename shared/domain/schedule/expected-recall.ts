@@ -24,7 +24,7 @@ export const UNSEEN_RECALL = 0.5;
 export const recallNow = (memory: MemoryState | null, todayNumber: number): number =>
   memory === null ? UNSEEN_RECALL : recall(todayNumber - dayNumber(memory.lastOn), memory.stability);
 
-/** Expected recall of a topic today, and on its exam day if practice stopped now. Its items weigh the same. */
+/** Expected recall of a topic now, and on its exam day if practice stopped now. Its items weigh the same. */
 export function topicRecall(items: Iterable<TopicItem>, today: string): TopicRecall {
   const todayNumber = dayNumber(today);
   let count = 0;
@@ -36,7 +36,8 @@ export function topicRecall(items: Iterable<TopicItem>, today: string): TopicRec
     if (memory === null) continue;
     attempted += 1;
     const lastNumber = dayNumber(memory.lastOn);
-    now += recall(todayNumber - lastNumber, memory.stability);
+    // An item is asked once a day at most: right after an answer, what counts is its next go, tomorrow.
+    now += recall(Math.max(1, todayNumber - lastNumber), memory.stability);
     onExamDay += recall(Math.max(todayNumber, dayNumber(examOn)) - lastNumber, memory.stability);
   }
   if (attempted === 0) return { now: null, onExamDay: null, attempted, items: count };

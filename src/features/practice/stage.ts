@@ -22,12 +22,11 @@ export const secondsIn = (set: SetDto, waiting: readonly Waiting[]): number =>
   set.secondsSoFar + waiting.reduce((sum, entry) => sum + (entry.kind === 'answer' ? entry.body.seconds : 0), 0);
 
 /**
- * Place of the next item to work on, from 0, or −1 where none is left: first what was never asked, unless
- * the time is up or the set is finished, then what its student has to mark.
+ * Place of the next item to work on, from 0, or −1 where none is left: the first in the set's order that waits for its
+ * student's marking or, unless the time is up or the set is finished, was never asked.
  */
 export function nextPlaceIn(set: SetDto, waiting: readonly Waiting[], exceptId?: string): number {
-  const find = (stage: Stage) =>
-    set.items.findIndex((item) => item.id !== exceptId && stageOf(item, waiting) === stage);
-  const toAsk = set.status === 'open' && secondsIn(set, waiting) < set.budgetSeconds ? find('ask') : -1;
-  return toAsk >= 0 ? toAsk : find('selfMark');
+  const mayAsk = set.status === 'open' && secondsIn(set, waiting) < set.budgetSeconds;
+  const isNext = (stage: Stage) => stage === 'selfMark' || (mayAsk && stage === 'ask');
+  return set.items.findIndex((item) => item.id !== exceptId && isNext(stageOf(item, waiting)));
 }

@@ -10,8 +10,9 @@ export interface Change extends Pick<Row, 'subject' | 'topic'> {
 
 const lower = (standing: Standing): string => standingWords[standing].toLowerCase();
 
-function changeOf({ before, after, subject, topic }: Row): Change | null {
-  if (!after) return null;
+function changeOf({ before, after, subject, topic, maxMarks }: Row): Change | null {
+  // Nothing of it is marked yet, so nothing has changed.
+  if (!after || maxMarks === 0) return null;
   const { standing } = after;
   const about = `about ${after.recallOnDay}% on the day`;
   const change = (words: string): Change => ({ subject, topic, standing, words: `${words}, ${about}` });

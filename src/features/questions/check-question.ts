@@ -14,7 +14,7 @@ function toFormPath(path: Path): string {
   const steps = path.map(String);
   if (steps[0] === 'body') steps.shift();
   if (steps[0] === 'topicIds') return 'topicIds';
-  const at = steps.findIndex((step) => step === 'points');
+  const at = steps.indexOf('points');
   if (at >= 0 && steps.length <= at + 1) return `${steps.slice(0, at + 1).join('.')}.root`;
   if (at >= 0 && ['allow', 'ignore', 'reject'].includes(steps[at + 2] ?? '')) {
     return [...steps.slice(0, at + 2), 'text'].join('.');

@@ -46,7 +46,7 @@ export function QuestionActions({ question, settle, onTry, onSend, onDiscarded }
         </button>
         {can.returnToAuthor ? (
           <button type="button" className="btn quiet max-sm:flex-1" onClick={() => setAsking('return')}>
-            Return to author
+            {can.putLive ? 'Return to author' : 'Take back'}
           </button>
         ) : null}
         {can.putLive ? (
@@ -130,7 +130,7 @@ function useSteps(
   const navigate = useNavigate();
   const { number, current } = question;
   const said: Record<Step['kind'], string> = {
-    live: `Question ${number} is live. Students meet it from their next set.`,
+    live: `Question ${number} is live. Students can meet it from their next set.`,
     versions: `A new draft of question ${number} is open. The live version stays as it is.`,
     retire: `Question ${number} is retired.`,
     return: `Question ${number} is back with ${current.author.name}.`,

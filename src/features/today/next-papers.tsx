@@ -16,6 +16,12 @@ function Countdown({ sitting }: { sitting: Sitting }) {
   );
 }
 
+/** What of the time is the student's own arrangement; nobody else sees this page. */
+function ownTimeWords({ extraMinutes, hasRestBreaks }: Sitting): string {
+  const own = [...(extraMinutes > 0 ? ['your extra time'] : []), ...(hasRestBreaks ? ['rest breaks'] : [])];
+  return own.length > 0 ? `, with ${own.join(' and ')}` : '';
+}
+
 /** The papers that come first, each with its countdown and where its date comes from. */
 export function NextPapers({ papers }: { papers: Sitting[] }) {
   const sources = [...new Set(papers.map(({ source }) => source))];
@@ -40,6 +46,7 @@ export function NextPapers({ papers }: { papers: Sitting[] }) {
                   <span className="font-semibold">{sitting.paperTitle}</span>
                   <span className="text-ink-2 num">
                     , <span className="whitespace-nowrap">{durationWords(sitting.minutes)}</span>
+                    {ownTimeWords(sitting)}
                   </span>
                   <span className="block text-sm text-ink-2 num mt-0.5">
                     {dayTimeWords(sitting.on, sitting.startsAt)}
