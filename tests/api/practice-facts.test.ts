@@ -173,9 +173,9 @@ test('Today shows one’s own time in the exam, and weak topics of the next pape
     ),
   );
   const today = todaySchema.parse((await agent.get('/api/today').expect(200)).body);
-  expect(today.nextPapers.map(({ minutes, extraMinutes, hasRestBreaks }) => ({ minutes, extraMinutes, hasRestBreaks }))).toEqual(
-    Array.from({ length: 4 }, () => ({ minutes: 113, extraMinutes: 23, hasRestBreaks: true })),
-  );
+  expect(
+    today.nextPapers.map(({ minutes, extraMinutes, hasRestBreaks }) => ({ minutes, extraMinutes, hasRestBreaks })),
+  ).toEqual(Array.from({ length: 4 }, () => ({ minutes: 113, extraMinutes: 23, hasRestBreaks: true })));
   const nextSubjects = new Set(today.nextPapers.map((paper) => paper.subject.id));
   expect(today.weakTopics.length).toBeGreaterThan(0);
   expect(today.weakTopics.filter((topic) => !nextSubjects.has(topic.subject.id))).toEqual([]);
