@@ -46,7 +46,8 @@ export function TopicList({ subject, specification, topics }: TopicListProps) {
               <th scope="col" className="w-14">
                 No.
               </th>
-              <th scope="col" className="min-w-48">
+              {/* The names stay in sight while the classes scroll past them. */}
+              <th scope="col" className="sticky left-0 z-1 min-w-48 bg-ground">
                 Topic
               </th>
               {specification.papers.map((paper) => (
@@ -110,7 +111,7 @@ function TopicRow({ subject, specification, classes, node: { topic, depth } }: T
       <td className="text-ink-2">{topic.number}</td>
       <th
         scope="row"
-        className={`!border-b !border-rule !text-ink !text-[.875rem] !align-middle ${depth === 0 ? '' : '!font-normal'}`}
+        className={`sticky left-0 z-1 bg-ground !border-b !border-rule !text-ink !text-[.875rem] !align-middle ${depth === 0 ? '' : '!font-normal'}`}
       >
         <span className={`block ${indent[Math.min(depth, 3)]}`}>
           <Title topic={topic} />
