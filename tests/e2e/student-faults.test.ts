@@ -71,7 +71,7 @@ test('a busy server and a reload lose nothing that was handed in', async () => {
   await page.reload();
   await status(page, 'One is waiting: question 1.').waitFor();
   await page.unroute('**/api/sets/*/answers');
-  await expect.poll(() => kept(page), { timeout: 15_000 }).toEqual([]);
+  await expect.poll(() => kept(page), { timeout: 60_000 }).toEqual([]);
   expect(await counted(study.school.id)).toEqual([[1, '42', 1]]);
   expect(await logFaults(study.school.id)).toEqual([]);
   await context.close();
@@ -140,7 +140,7 @@ test('a browser that stores nothing loses no answer while the page stays, and sa
   await button(page, 'Hand in answer').click();
   await status(page, 'This browser stores nothing, so do not close or reload it until then.').waitFor();
   await page.unroute('**/api/sets/*/answers');
-  await marked(page).waitFor({ timeout: 15_000 });
+  await marked(page).waitFor({ timeout: 60_000 });
   expect(await counted(study.school.id)).toEqual([[1, '42', 1]]);
   await context.close();
 });

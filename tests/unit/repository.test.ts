@@ -1,5 +1,5 @@
-import { execFileSync } from 'node:child_process';
-import { existsSync, readFileSync } from 'node:fs';
+import { execFileSync, spawnSync } from 'node:child_process';
+import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 
 /** What stands at the top of the project, and nothing else. */
@@ -69,11 +69,23 @@ const SECRETS: RegExp[] = [
   new RegExp(pieces('_auth', 'Token|_pass', 'word\\s*=')),
 ];
 
-const files = execFileSync('git', ['ls-files', '-z', '--cached', '--others', '--exclude-standard'], {
-  encoding: 'utf8',
-})
-  .split('\0')
-  .filter((file) => file !== '' && existsSync(file));
+const IGNORED = new Set(['.git', '.plait', 'dist', 'node_modules']);
+
+/** What git knows of; where the project came without git, what lies below it but for what a run makes. */
+function projectFiles(): string[] {
+  if (existsSync('.git') && spawnSync('git', ['--version']).status === 0) {
+    const list = ['ls-files', '-z', '--cached', '--others', '--exclude-standard'];
+    return execFileSync('git', list, { encoding: 'utf8' }).split('\0');
+  }
+  return readdirSync('.').flatMap((entry) => {
+    if (IGNORED.has(entry) || entry.endsWith('.log')) return [];
+    return statSync(entry).isDirectory()
+      ? readdirSync(entry, { recursive: true, encoding: 'utf8' }).map((file) => `${entry}/${file}`)
+      : [entry];
+  });
+}
+
+const files = projectFiles().filter((file) => file !== '' && existsSync(file) && statSync(file).isFile());
 const isText = (file: string) => !/\.(png|jpe?g|webp|ico|woff2?|gz)$/.test(file);
 const texts = files.filter(isText).map((file) => ({ file, text: readFileSync(file, 'utf8') }));
 
