@@ -1,20 +1,9 @@
-const KEY = 'plait.time';
+import { deviceFlag } from './device-flag.ts';
+
+const flag = deviceFlag('plait.time', 'hidden');
 
 /** True where the reader hid the time of a set, on this device. */
-export function isTimeHidden(): boolean {
-  try {
-    return localStorage.getItem(KEY) === 'hidden';
-  } catch {
-    return false;
-  }
-}
+export const isTimeHidden = flag.isSet;
 
-/** Keeps on this device whether the time of a set is shown. */
-export function hideTime(isHidden: boolean): void {
-  try {
-    if (isHidden) localStorage.setItem(KEY, 'hidden');
-    else localStorage.removeItem(KEY);
-  } catch {
-    // Storage may be off; the choice then lasts until the page is left.
-  }
-}
+/** Keeps on this device whether the time of a set is hidden. */
+export const hideTime = flag.set;

@@ -1,20 +1,9 @@
-const KEY = 'plait.device';
+import { deviceFlag } from './device-flag.ts';
+
+const flag = deviceFlag('plait.device', 'own');
 
 /** True where whoever signed in last said that this device is their own. */
-export function isOwnDevice(): boolean {
-  try {
-    return localStorage.getItem(KEY) === 'own';
-  } catch {
-    return false;
-  }
-}
+export const isOwnDevice = flag.isSet;
 
 /** Remembers on this device, until the sign-out, whose it is. */
-export function rememberDevice(isOwn: boolean): void {
-  try {
-    if (isOwn) localStorage.setItem(KEY, 'own');
-    else localStorage.removeItem(KEY);
-  } catch {
-    // Storage may be off; the device then counts as shared.
-  }
-}
+export const rememberDevice = flag.set;
