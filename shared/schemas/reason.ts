@@ -16,7 +16,17 @@ export const reasonSchema = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('paperSoon'), paperId, days: z.int().min(1) }),
   /** Among the lowest third of the student's topics by exam-day recall. */
   z.object({ kind: z.literal('weakTopic') }),
-  /** Expected recall today is at or under 90%. */
+  /** Expected recall on the exam day without this go and with it. */
+  z.object({
+    kind: z.literal('gain'),
+    withoutPercent: z.int().min(0).max(100),
+    withGoPercent: z.int().min(0).max(100),
+  }),
+  /** Set by a teacher of the student, and not answered since. */
+  z.object({ kind: z.literal('setByTeacher') }),
+  /** Of a topic that the student chose to practise. */
+  z.object({ kind: z.literal('chosenTopic') }),
+  /** Sets opened before tiered gain: expected recall today was at or under 90%. */
   z.object({ kind: z.literal('due'), recallPercent: z.int().min(0).max(100) }),
 ]);
 

@@ -1,18 +1,21 @@
 import fc from 'fast-check';
-import { FSRSAlgorithm } from 'ts-fsrs';
 import { describe, expect, test } from 'vitest';
 import { returnOn } from '#shared/domain/schedule/due.ts';
-import { type AnswerEvent, foldLog, foldNext, UNATTEMPTED } from '#shared/domain/schedule/fold.ts';
-import { type Grade, gradeOf } from '#shared/domain/schedule/grade.ts';
-import { nextState, recall } from '#shared/domain/schedule/memory.ts';
-import { addDays, daysBetween } from '#shared/domain/time/calendar.ts';
-import { TODAY } from '#tests/support/a-candidate.ts';
-import { memories } from './scheduler-arbitraries.ts';
+import { gradeOf } from '#shared/domain/schedule/grade.ts';
+import { DEFAULT_MODEL } from '#shared/domain/schedule/memory.ts';
+import { attemptedOutlook, gainOf, unseenOutlook } from '#shared/domain/schedule/outlook.ts';
+import { daysBetween } from '#shared/domain/time/calendar.ts';
+import { dayFromToday, TODAY } from '#tests/support/a-candidate.ts';
+import { difficulties, grades, memories, spread } from './scheduler-arbitraries.ts';
 
-const grades = fc.constantFrom<Grade[]>(1, 2, 3);
-const stabilities = fc.double({ min: 0.001, max: 36_500, noNaN: true });
+const stabilities = spread(0.001, 36_500);
 const dayCounts = fc.integer({ min: 1, max: 2000 });
 const howSure = fc.constantFrom(null, 'guess' as const, 'fairlySure' as const, 'certain' as const);
+const { recall, passed, missed } = {
+  recall: DEFAULT_MODEL.recall.bind(DEFAULT_MODEL),
+  passed: DEFAULT_MODEL.passed.bind(DEFAULT_MODEL),
+  missed: DEFAULT_MODEL.missed.bind(DEFAULT_MODEL),
+};
 
 // Invariants of the scheduling specification, section 8; recall also Q2 and states Q5 of tests/reference/fsrs.
 describe('memory', () => {
@@ -30,12 +33,18 @@ describe('memory', () => {
 
   test('a pass never lowers the stability, a lapse never raises it, and both keep the bounds', () => {
     fc.assert(
-      fc.property(memories, grades, dayCounts, (memory, grade, days) => {
-        const next = nextState(memory, grade, days);
-        // The library rounds to 8 decimals.
-        if (grade === 1) expect(next.stability).toBeLessThanOrEqual(Math.max(0.001, memory.stability) + 1e-8);
-        else expect(next.stability).toBeGreaterThanOrEqual(memory.stability - 1e-8);
-        expect(next.stability).toBeGreaterThanOrEqual(0.001);
+      fc.property(stabilities, difficulties, grades, dayCounts, (stability, difficulty, grade, days) => {
+        const next = DEFAULT_MODEL.next({ stability, difficulty }, grade, days);
+        const recalled = recall(days, stability);
+        const scored =
+          grade === 1 ? missed(stability, difficulty, recalled) : passed(stability, difficulty, recalled, grade);
+        for (const after of [next.stability, scored]) {
+          // The library rounds to 8 decimals.
+          if (grade === 1) expect(after).toBeLessThanOrEqual(stability + 1e-8);
+          else expect(after).toBeGreaterThanOrEqual(stability - 1e-8);
+          expect(after).toBeGreaterThanOrEqual(0.001);
+          expect(after).toBeLessThanOrEqual(36_500);
+        }
         expect(next.difficulty).toBeGreaterThanOrEqual(1);
         expect(next.difficulty).toBeLessThanOrEqual(10);
       }),
@@ -43,13 +52,38 @@ describe('memory', () => {
     );
   });
 
-  test('recall agrees with ts-fsrs, which rounds to 8 decimals', () => {
-    const library = new FSRSAlgorithm({});
+  test('the stability that a recall speaks for gives that recall', () => {
     fc.assert(
-      fc.property(fc.integer({ min: 0, max: 2000 }), stabilities, (days, stability) => {
-        expect(Math.abs(recall(days, stability) - library.forgetting_curve(days, stability))).toBeLessThan(1e-7);
+      fc.property(fc.double({ min: 0.03, max: 0.97, noNaN: true }), dayCounts, (recalled, days) => {
+        expect(Math.abs(recall(days, DEFAULT_MODEL.stabilityOf(recalled, days)) - recalled)).toBeLessThan(1e-9);
+      }),
+    );
+  });
+
+  test('one go gains something in any question attempted before whose paper is within a year', () => {
+    const year = fc.integer({ min: 1, max: 365 });
+    fc.assert(
+      fc.property(memories, fc.integer({ min: 1, max: 400 }), year, (memory, elapsed, days) => {
+        expect(gainOf(attemptedOutlook(DEFAULT_MODEL, memory, elapsed, days))).toBeGreaterThan(0);
       }),
       { numRuns: 1000 },
+    );
+  });
+
+  test('an outlook holds chances, and without a go no question is recalled better later', () => {
+    const priors = fc.record({ recall: fc.double({ min: 0.03, max: 0.97, noNaN: true }), days: dayCounts });
+    fc.assert(
+      fc.property(memories, priors, fc.integer({ min: 1, max: 400 }), dayCounts, (memory, prior, elapsed, days) => {
+        for (const { today, without, withGo } of [
+          attemptedOutlook(DEFAULT_MODEL, memory, elapsed, days),
+          unseenOutlook(DEFAULT_MODEL, prior, days),
+        ]) {
+          expect(without).toBeGreaterThan(0);
+          expect(without).toBeLessThanOrEqual(today);
+          expect(withGo).toBeGreaterThan(0);
+          expect(withGo).toBeLessThanOrEqual(1);
+        }
+      }),
     );
   });
 
@@ -68,9 +102,9 @@ describe('memory', () => {
     const daysToPaper = fc.integer({ min: 2, max: 200 });
     fc.assert(
       fc.property(memories, fc.integer({ min: 1, max: 300 }), daysToPaper, (memory, days, toPaper) => {
-        const paperOn = addDays(TODAY, toPaper);
+        const paperOn = dayFromToday(toPaper);
         const dates = ([1, 2, 3] as const).map((grade) =>
-          returnOn({ ...nextState(memory, grade, days), lastOn: TODAY }, paperOn, TODAY),
+          returnOn({ ...DEFAULT_MODEL.next(memory, grade, days), lastOn: TODAY }, paperOn, TODAY),
         );
         expect(dates).toEqual([...dates].sort());
         for (const date of dates) {
@@ -78,63 +112,6 @@ describe('memory', () => {
           expect(wait).toBeGreaterThanOrEqual(1);
           expect(wait).toBeLessThan(toPaper);
         }
-      }),
-    );
-  });
-});
-
-describe('the memory an answer log adds up to', () => {
-  const logs: fc.Arbitrary<AnswerEvent[]> = fc
-    .array(fc.record({ hours: fc.integer({ min: 0, max: 2000 }), grade: fc.option(grades, { freq: 5 }) }), {
-      maxLength: 25,
-    })
-    .map((rows) =>
-      rows.map(({ hours, grade }, index) => ({
-        answerId: `a${index}`,
-        givenAt: hours * 3_600_000,
-        givenOn: addDays('1970-01-01', Math.floor(hours / 24)),
-        grade,
-      })),
-    );
-
-  test('does not hang on the order of arrival, nor on repeats', () => {
-    const shuffled = logs.chain((log) =>
-      fc.tuple(fc.constant(log), fc.shuffledSubarray([...log, ...log], { minLength: 2 * log.length })),
-    );
-    fc.assert(
-      fc.property(shuffled, ([log, arrived]) => {
-        expect(foldLog(arrived)).toEqual(foldLog(log));
-      }),
-    );
-  });
-
-  test('is what the answers give one by one, in time order', () => {
-    fc.assert(
-      fc.property(logs, (log) => {
-        const inOrder = [...log].sort(
-          (a, b) => Number(a.givenAt) - Number(b.givenAt) || (a.answerId < b.answerId ? -1 : 1),
-        );
-        let folded = UNATTEMPTED;
-        for (const [index, event] of inOrder.entries()) {
-          folded = foldNext(folded, event);
-          expect(folded).toEqual(foldLog(inOrder.slice(0, index + 1)));
-        }
-      }),
-    );
-  });
-
-  test('is the same with all but each day’s first marked answer left out', () => {
-    fc.assert(
-      fc.property(logs, (log) => {
-        const firsts = new Map<string, AnswerEvent>();
-        const isBefore = (a: AnswerEvent, b: AnswerEvent) =>
-          a.givenAt < b.givenAt || (a.givenAt === b.givenAt && a.answerId < b.answerId);
-        for (const event of log.filter(({ grade }) => grade !== null)) {
-          const first = firsts.get(event.givenOn);
-          if (!first || isBefore(event, first)) firsts.set(event.givenOn, event);
-        }
-        expect(foldLog([...firsts.values()]).memory).toEqual(foldLog(log).memory);
-        expect(foldLog(log).attempts).toBe(log.filter(({ grade }) => grade !== null).length);
       }),
     );
   });

@@ -1,19 +1,13 @@
 import type { SetKind } from '#shared/schemas/practice.ts';
 import type { Reason } from '#shared/schemas/reason.ts';
-import type { Candidate } from './candidate.ts';
 import { type ConfusablePair, orderSet } from './order.ts';
-import { selectSet } from './select.ts';
-import { dueWeakNearest } from './value.ts';
+import { reasonFor } from './reason-for.ts';
+import { contextFor, type Selection, selectSet } from './select.ts';
+import type { Prior } from './unseen.ts';
+import { tieredGain } from './value.ts';
 
-export interface SetRequest {
-  /** All live questions the student is entered for, those answered today included. */
-  candidates: readonly Candidate[];
-  /** The student's local date. */
-  today: string;
-  /** 1,500 for a mixed set, 900 for a morning set, unless the school says otherwise. */
-  budgetSeconds: number;
-  /** School setting, 2 to 8. */
-  maxSubjects: number;
+/** All live questions the student is entered for, those answered today included, and how a set is made of them. */
+export interface SetRequest extends Selection {
   mode: SetKind;
   confusable: readonly ConfusablePair[];
 }
@@ -27,26 +21,25 @@ export interface BuiltItem {
   position: number;
   expectedSeconds: number;
   reason: Reason;
+  /** What was believed of a question never attempted: its first attempt starts from there. */
+  prior: Prior | null;
 }
 
 /** Chooses and orders a set. The same input gives the same set, in whatever order the candidates come. */
 export function buildSet({ mode, confusable, ...selection }: SetRequest): BuiltItem[] {
-  const chosen = selectSet({ ...selection, value: dueWeakNearest }).map((choice, priority) => ({
-    questionId: choice.candidate.questionId,
-    topicId: choice.candidate.topicId,
-    subjectId: choice.candidate.subjectId,
-    recall: choice.recall,
-    priority,
-    expectedSeconds: choice.seconds,
-    reason: choice.reason,
-  }));
+  const context = contextFor(selection);
+  const chosen = selectSet(selection, tieredGain, context).map((choice, priority) => {
+    const { questionId, topicId, subjectId } = choice.candidate;
+    return { choice, questionId, topicId, subjectId, recall: choice.outlook.today, priority };
+  });
   const ordered = orderSet(chosen, mode === 'morning' ? 'hardestFirst' : 'normal', confusable);
-  return ordered.map(({ questionId, topicId, subjectId, expectedSeconds, reason }, index) => ({
+  return ordered.map(({ choice, questionId, topicId, subjectId }, index) => ({
     questionId,
     topicId,
     subjectId,
     position: index + 1,
-    expectedSeconds,
-    reason,
+    expectedSeconds: choice.seconds,
+    reason: reasonFor(choice, context),
+    prior: choice.candidate.memory === null ? context.prior(choice.candidate) : null,
   }));
 }

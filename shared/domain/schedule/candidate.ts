@@ -18,12 +18,16 @@ export interface Candidate {
   subjectId: string;
   /** Null where the student has no marked answer to it. */
   memory: MemoryState | null;
+  /** Grade of the first marked answer; null where there is none. */
+  firstGrade: Grade | null;
   /** True where the latest marked answer earned under half the marks. */
   lastWasBelowHalf: boolean;
   /** Null where it was not answered today. */
   answeredToday: AnsweredToday | null;
   /** True where it waits in another set that is open today. */
   isTaken: boolean;
+  /** True where a teacher of the student set it and it has not been answered since. */
+  isSet: boolean;
   /** Marks available for the question. */
   marks: number;
   /** The author's estimate or the median observed, reading the feedback included. */
@@ -32,20 +36,17 @@ export interface Candidate {
   topicWeight: number;
   /** Marks the topic carries in the papers still to sit. */
   topicMarks: number;
-  /** Live questions of the topic, this one included: they share its weight. */
-  itemsInTopic: number;
-  /** Local date of the next paper that examines it, today only until it starts; without sittings, the season's end. */
-  examOn: string;
+  /**
+   * Local date of the next paper that examines it, today only until it starts; without sittings, the season's end.
+   * Null once its last paper has been sat.
+   */
+  examOn: string | null;
   /** Null where `examOn` is the season's end. */
   paperId: string | null;
-  /** Local date on which the class was taught the topic; null where nobody said. */
+  /** Local date on which the class was taught the topic; null where it was not. */
   taughtOn: string | null;
 }
 
 /** Expected seconds within the bounds the scheduler trusts: 20 to 75 a mark, at least 120. */
 export const secondsOf = ({ expectedSeconds, marks }: Pick<Candidate, 'expectedSeconds' | 'marks'>): number =>
   Math.min(Math.max(120, 75 * marks), Math.max(20, expectedSeconds));
-
-/** Share of the subject's marks that rests on this one item. */
-export const itemWeight = ({ topicWeight, itemsInTopic }: Pick<Candidate, 'topicWeight' | 'itemsInTopic'>): number =>
-  topicWeight / Math.max(1, itemsInTopic);

@@ -1,25 +1,39 @@
 import { compareText } from './compare-text.ts';
-import type { Value } from './value.ts';
 
 /** Items that speak for a subject. */
 const BEST_ITEMS = 10;
 const TIER_1_FACTOR = 3;
 
-type Valued = Pick<Value, 'tier' | 'score'> & { candidate: { subjectId: string } };
+interface Valued {
+  candidate: { subjectId: string };
+  /** 0 where a teacher set it. */
+  tier: 0 | 1 | 2;
+  score: number;
+  isOfChosenTopic: boolean;
+}
 
-/** Groups by subject, most valuable subject first: by its ten best positive items, tier 1 counting threefold. */
+/**
+ * Groups by subject, the most valuable first: those with something a teacher set or the student chose, then by their ten best positive items,
+ * tier 1 counting threefold.
+ */
 export function groupBySubject<T extends Valued>(items: readonly T[]): T[][] {
-  const groups = new Map<string, { members: T[]; best: number[] }>();
+  const groups = new Map<string, { members: T[]; best: number[]; isWanted: boolean }>();
   for (const item of items) {
     const { subjectId } = item.candidate;
-    const group = groups.get(subjectId) ?? { members: [], best: [] };
-    groups.set(subjectId, group);
+    let group = groups.get(subjectId);
+    if (!group) {
+      group = { members: [], best: [], isWanted: false };
+      groups.set(subjectId, group);
+    }
     group.members.push(item);
+    group.isWanted ||= item.tier === 0 || item.isOfChosenTopic;
     keepBest(group.best, item.tier === 1 ? TIER_1_FACTOR * item.score : item.score);
   }
   return [...groups]
-    .map(([subjectId, { members, best }]) => ({ subjectId, members, value: best.reduce((sum, one) => sum + one, 0) }))
-    .sort((a, b) => b.value - a.value || compareText(a.subjectId, b.subjectId))
+    .map(([subjectId, { best, ...group }]) => ({ ...group, subjectId, value: best.reduce((sum, one) => sum + one, 0) }))
+    .sort(
+      (a, b) => Number(b.isWanted) - Number(a.isWanted) || b.value - a.value || compareText(a.subjectId, b.subjectId),
+    )
     .map(({ members }) => members);
 }
 

@@ -1,8 +1,7 @@
-import { dayNumber } from '#shared/domain/time/calendar.ts';
-import type { Reason } from '#shared/schemas/reason.ts';
-import { type Candidate, itemWeight } from './candidate.ts';
-import type { ValueContext } from './context.ts';
-import { recallNow, recallPercent, type TopicRecall, UNSEEN_RECALL } from './expected-recall.ts';
+import type { Candidate } from './candidate.ts';
+import { secondsOf } from './candidate.ts';
+import type { StudyContext } from './context.ts';
+import { attemptedOutlook, gainOf, type Outlook } from './outlook.ts';
 
 /** What one go at a question is worth today. */
 export interface Value {
@@ -10,64 +9,40 @@ export interface Value {
   tier: 1 | 2;
   /** Higher is chosen first within a tier. */
   score: number;
-  /** Expected recall today, 0 to 1: the hardest-first order goes by it. */
-  recall: number;
-  reason: Reason;
+  outlook: Outlook;
 }
 
-/** The scheduler's policy. Null where the question should not be asked today. */
-export type ValueFunction = (candidate: Candidate, context: ValueContext) => Value | null;
+/** A way to value questions: the product's own, and those it is compared with. */
+export type ValueFunction = (candidate: Candidate, context: StudyContext) => Value;
 
-/** Days to a paper at which its pull has fallen to half. */
+/** Days to the last chance at which a question's pull has fallen to half. */
 const NEARNESS_DAYS = 5;
-const SOON_DAYS = 7;
 /** Stability in days under which a memory is barely formed. */
 const BARELY_FORMED = 1;
 
-/**
- * Questions due or new, worth more where the topic carries much of its subject, is weak for its paper, and where the
- * paper is near: share of marks relative to the subject's average question × (1 − topic's exam-day recall) ×
- * 5 ÷ (days + 5), shared out among the topic's questions by turn: the first counts whole, the second half, and so on,
- * so that a set takes short turns on many topics. Seconds only fill the budget, and the share is relative, so that a
- * subject with long questions or a large bank is not put last for it.
- */
-export const dueWeakNearest: ValueFunction = (candidate, context) => {
+/** True where a question was attempted and its memory would not last a day. */
+export const isBarelyFormed = ({ memory }: Pick<Candidate, 'memory'>): boolean =>
+  memory !== null && memory.stability < BARELY_FORMED;
+
+/** Expected recall of a question today and on its exam day. */
+export function outlookOf(candidate: Candidate, context: StudyContext): Outlook {
   const { memory } = candidate;
-  const days = Math.max(1, dayNumber(candidate.examOn) - context.todayNumber);
-  const elapsed = memory === null ? 0 : context.todayNumber - dayNumber(memory.lastOn);
-  if (memory !== null && elapsed < memory.stability) return null;
-  const weakness = 1 - recallWithUnseen(context.topics.get(candidate.topicId));
-  const share = itemWeight(candidate) * (context.itemsInSubject.get(candidate.subjectId) ?? 1);
-  const turn = context.turnInTopic.get(candidate.questionId) ?? 1;
-  const isBarelyFormed = memory !== null && memory.stability < BARELY_FORMED;
-  const recallToday = recallNow(memory, context.todayNumber);
+  return memory === null
+    ? context.unseenOutlook(candidate)
+    : attemptedOutlook(context.model, memory, context.elapsed(memory.lastOn), context.daysToExam(candidate));
+}
+
+/**
+ * The scheduler's policy, tiered gain: exam-day marks gained per second, leaning towards the nearest paper, with last
+ * chances and barely formed memories before the rest. Source: scheduling specification, section 4.
+ */
+export const tieredGain: ValueFunction = (candidate, context) => {
+  const lastChance = context.daysToLastChance(context.daysToExam(candidate));
+  const outlook = outlookOf(candidate, context);
+  const perSecond = (context.weight(candidate) / secondsOf(candidate)) * gainOf(outlook);
   return {
-    tier: days === 1 || isBarelyFormed ? 1 : 2,
-    score: (share * weakness * NEARNESS_DAYS) / (days + NEARNESS_DAYS) / turn,
-    recall: recallToday,
-    reason: reasonFor(candidate, context, { days, isBarelyFormed, recallToday }),
+    tier: lastChance === 1 || isBarelyFormed(candidate) ? 1 : 2,
+    score: (perSecond * NEARNESS_DAYS) / (lastChance + NEARNESS_DAYS),
+    outlook,
   };
 };
-
-/** A topic's exam-day recall with its questions never attempted counted in, so that they are not left out for good. */
-function recallWithUnseen(topic: TopicRecall | undefined): number {
-  if (topic === undefined || topic.onExamDay === null) return UNSEEN_RECALL;
-  return (topic.attempted * topic.onExamDay + (topic.items - topic.attempted) * UNSEEN_RECALL) / topic.items;
-}
-
-interface Facts {
-  days: number;
-  isBarelyFormed: boolean;
-  recallToday: number;
-}
-
-/** The first reason that holds, most pressing first. */
-function reasonFor(candidate: Candidate, context: ValueContext, { days, isBarelyFormed, recallToday }: Facts): Reason {
-  const { memory, paperId, topicId } = candidate;
-  if (days === 1) return { kind: 'lastLook', paperId };
-  if (isBarelyFormed) return { kind: candidate.lastWasBelowHalf ? 'missedLast' : 'notFirm' };
-  if (memory === null) return { kind: 'firstLook', topicMarks: Math.round(candidate.topicMarks) };
-  if (days <= SOON_DAYS) return { kind: 'paperSoon', paperId, days };
-  if (context.weakerTopicIds.has(topicId)) return { kind: 'weakTopic' };
-  return { kind: 'due', recallPercent: recallPercent(recallToday) };
-}

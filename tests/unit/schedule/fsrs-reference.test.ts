@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest';
 import { isDue, returnOn } from '#shared/domain/schedule/due.ts';
 import { foldLog } from '#shared/domain/schedule/fold.ts';
 import type { Grade } from '#shared/domain/schedule/grade.ts';
-import { firstState, type Memory, nextState, recall } from '#shared/domain/schedule/memory.ts';
+import { DEFAULT_MODEL, type Memory } from '#shared/domain/schedule/memory.ts';
 import { addDays, daysBetween } from '#shared/domain/time/calendar.ts';
 import sequences from '#tests/reference/fsrs/computed-sequences.json' with { type: 'json' };
 import disagreements from '#tests/reference/fsrs/known-disagreements.json' with { type: 'json' };
@@ -18,7 +18,9 @@ function run(grades: readonly number[], gaps: readonly number[]): Memory[] {
   const states: Memory[] = [];
   for (const [index, grade] of grades.entries()) {
     const last = states.at(-1);
-    states.push(last ? nextState(last, asGrade(grade), gaps[index] ?? 0) : firstState(asGrade(grade)));
+    states.push(
+      last ? DEFAULT_MODEL.next(last, asGrade(grade), gaps[index] ?? 0) : DEFAULT_MODEL.first(asGrade(grade)),
+    );
   }
   return states;
 }
@@ -57,7 +59,7 @@ describe('published vectors', () => {
     const { stability, difficulty } = caseOf('P3').expect;
     if (!stability || !difficulty) throw new Error('P3 has no states');
     for (const grade of [1, 2, 3, 4]) {
-      const first = firstState(asGrade(grade));
+      const first = DEFAULT_MODEL.first(asGrade(grade));
       expect(Math.abs(first.stability - (stability[grade - 1] ?? 0))).toBeLessThan(1e-6);
       expect(Math.abs(first.difficulty - (difficulty[grade - 1] ?? 0))).toBeLessThan(1e-6);
     }
@@ -68,16 +70,16 @@ describe('published vectors', () => {
     for (const [index, interval] of days.entries()) {
       const retention = (index + 1) / 10;
       const isCapped = interval === 36_500;
-      if (!isCapped) expect(recall(interval + 0.5, 1)).toBeLessThanOrEqual(retention + 1e-9);
-      if (interval > 1) expect(recall(interval - 0.5, 1)).toBeGreaterThanOrEqual(retention - 1e-9);
+      if (!isCapped) expect(DEFAULT_MODEL.recall(interval + 0.5, 1)).toBeLessThanOrEqual(retention + 1e-9);
+      if (interval > 1) expect(DEFAULT_MODEL.recall(interval - 0.5, 1)).toBeGreaterThanOrEqual(retention - 1e-9);
     }
     expect(days).toHaveLength(10);
   });
 
   test('P5 (py-fsrs test_stability_lower_bound): 1,000 lapses', () => {
-    let memory = firstState(1);
+    let memory = DEFAULT_MODEL.first(1);
     for (let time = 0; time < 1000; time += 1) {
-      memory = nextState(memory, 1, Math.max(1, Math.round(memory.stability)) + 1);
+      memory = DEFAULT_MODEL.next(memory, 1, Math.max(1, Math.round(memory.stability)) + 1);
       expect(memory.stability).toBeGreaterThanOrEqual(0.001);
     }
   });
@@ -87,7 +89,7 @@ describe('published vectors', () => {
     let on = '2027-03-01';
     let memory: Memory | null = null;
     for (const grade of caseOf('P6').grades ?? []) {
-      memory = memory === null ? firstState(asGrade(grade)) : nextState(memory, asGrade(grade), 8);
+      memory = memory === null ? DEFAULT_MODEL.first(asGrade(grade)) : DEFAULT_MODEL.next(memory, asGrade(grade), 8);
       const back = returnOn({ ...memory, lastOn: on }, paperOn, on);
       expect(back).not.toBeNull();
       expect(daysBetween(back ?? paperOn, paperOn)).toBeGreaterThanOrEqual(1);
@@ -100,7 +102,7 @@ describe('published properties and tables', () => {
   test('Q1: recall after as many days as the stability is 90%; so an item is due from then on', () => {
     const examples = published.properties.flatMap(({ examples: rows }) => rows ?? []);
     for (const { stability, t_days, R } of examples) {
-      expect(Math.abs(recall(t_days, stability) - R)).toBeLessThan(1e-6);
+      expect(Math.abs(DEFAULT_MODEL.recall(t_days, stability) - R)).toBeLessThan(1e-6);
     }
     expect(examples.length).toBeGreaterThan(0);
     const memory = { stability: 7, difficulty: 5, lastOn: '2027-03-01' };
@@ -110,13 +112,13 @@ describe('published properties and tables', () => {
 
   test('the forgetting curve', () => {
     for (const { t_days, stability, R } of published.forgetting_curve.rows) {
-      expect(Math.abs(recall(t_days, stability) - R)).toBeLessThan(1e-6);
+      expect(Math.abs(DEFAULT_MODEL.recall(t_days, stability) - R)).toBeLessThan(1e-6);
     }
   });
 
   test('the intervals from a wanted retention', () => {
     for (const { desired_retention, stability, interval_unrounded } of published.interval_from_retention.rows) {
-      expect(Math.abs(recall(interval_unrounded, stability) - desired_retention)).toBeLessThan(1e-6);
+      expect(Math.abs(DEFAULT_MODEL.recall(interval_unrounded, stability) - desired_retention)).toBeLessThan(1e-6);
     }
   });
 });
@@ -126,9 +128,10 @@ describe('20 histories computed with py-fsrs 6.3.1', () => {
     let memory: Memory | null = null;
     for (const { day_gap, grade, retrievability_before, stability, difficulty } of reviews) {
       if (memory !== null && retrievability_before !== null) {
-        expect(Math.abs(recall(day_gap, memory.stability) - retrievability_before)).toBeLessThan(1e-6);
+        expect(Math.abs(DEFAULT_MODEL.recall(day_gap, memory.stability) - retrievability_before)).toBeLessThan(1e-6);
       }
-      memory = memory === null ? firstState(asGrade(grade)) : nextState(memory, asGrade(grade), day_gap);
+      memory =
+        memory === null ? DEFAULT_MODEL.first(asGrade(grade)) : DEFAULT_MODEL.next(memory, asGrade(grade), day_gap);
       expect(Math.abs(memory.stability / stability - 1)).toBeLessThan(1e-5);
       expect(Math.abs(memory.difficulty - difficulty)).toBeLessThan(1e-5);
     }
@@ -143,9 +146,10 @@ describe('known disagreements between libraries', () => {
       givenAt: index,
       givenOn: '2027-03-01',
       grade: asGrade(grade),
+      prior: null,
     }));
     expect(events).toHaveLength(2);
-    expect(foldLog(events).memory).toEqual({ ...firstState(2), lastOn: '2027-03-01' });
-    expect(foldLog(events).attempts).toBe(2);
+    expect(foldLog(events, DEFAULT_MODEL).memory).toEqual({ ...DEFAULT_MODEL.first(2), lastOn: '2027-03-01' });
+    expect(foldLog(events, DEFAULT_MODEL).attempts).toBe(2);
   });
 });

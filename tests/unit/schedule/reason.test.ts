@@ -14,15 +14,26 @@ test.each<[Reason, string]>([
   [{ kind: 'firstLook', topicMarks: 0 }, 'First look at this question on Osmosis.'],
   [{ kind: 'paperSoon', paperId: 'p', days: 5 }, 'Biology Paper 1 is in 5 days.'],
   [{ kind: 'weakTopic' }, 'Osmosis is one of your weaker topics.'],
+  [
+    { kind: 'gain', withoutPercent: 43, withGoPercent: 88 },
+    'Without this go, expect to recall it with a chance of about 45% on the day; after it, about 90%. An estimate.',
+  ],
+  [
+    { kind: 'gain', withoutPercent: 83, withGoPercent: 87 },
+    'Without this go, expect to recall it with a chance of about 85% on the day. An estimate.',
+  ],
+  [{ kind: 'setByTeacher' }, 'Your teacher set this one.'],
+  [{ kind: 'chosenTopic' }, 'You chose to practise Osmosis.'],
+  [{ kind: 'paperSoon', paperId: 'p', days: 1 }, 'Biology Paper 1 is tomorrow.'],
   [{ kind: 'due', recallPercent: 83 }, 'Due again: expected recall today is about 85%, an estimate.'],
 ])('%j', (reason, words) => {
   expect(reasonWords(reasonSchema.parse(reason), names)).toBe(words);
 });
 
 test('a paper that is not known by name', () => {
-  expect(reasonWords({ kind: 'lastLook', paperId: null }, { topic: 'Osmosis', paper: null })).toBe(
-    'Last look before the exam.',
-  );
+  const unnamed = { topic: 'Osmosis', paper: null };
+  expect(reasonWords({ kind: 'lastLook', paperId: null }, unnamed)).toBe('Last look before the exam.');
+  expect(reasonWords({ kind: 'paperSoon', paperId: null, days: 3 }, unnamed)).toBe('The exam is in 3 days.');
 });
 
 test('estimates are rounded to 5 and never certain', () => {
@@ -86,9 +97,12 @@ describe('the sentence on Today', () => {
 
   test('says what most of the questions were chosen for, where one reason holds for more than half', () => {
     const subjects = [line('Biology', 2, 3), line('Chemistry', 2, 4)];
-    expect(subjectsSentence(subjects, ['due', 'due', 'due', 'firstLook'])).toBe(
-      '4 questions from 2 subjects. Most are due again.',
+    expect(subjectsSentence(subjects, ['gain', 'gain', 'gain', 'firstLook'])).toBe(
+      '4 questions from 2 subjects. Most are where one go adds most for the day of the paper.',
     );
-    expect(subjectsSentence(subjects, ['due', 'due', 'firstLook', 'firstLook'])).toBe('4 questions from 2 subjects.');
+    expect(subjectsSentence(subjects, ['chosenTopic', 'setByTeacher', 'chosenTopic'])).toBe(
+      '4 questions from 2 subjects. Most are of the topics you chose.',
+    );
+    expect(subjectsSentence(subjects, ['gain', 'gain', 'firstLook', 'firstLook'])).toBe('4 questions from 2 subjects.');
   });
 });

@@ -1,99 +1,92 @@
 import { describe, expect, test } from 'vitest';
 import type { Candidate } from '#shared/domain/schedule/candidate.ts';
-import { contextOf } from '#shared/domain/schedule/context.ts';
-import { dueWeakNearest } from '#shared/domain/schedule/value.ts';
-import { aCandidate, TODAY } from '#tests/support/a-candidate.ts';
+import { StudyContext, type StudyMoment } from '#shared/domain/schedule/context.ts';
+import { gainOf } from '#shared/domain/schedule/outlook.ts';
+import { tieredGain } from '#shared/domain/schedule/value.ts';
+import { aCandidate, aMemory, dayFromToday, MOMENT, TODAY } from '#tests/support/a-candidate.ts';
 
-const memory = (stability: number, lastOn: string) => ({ stability, difficulty: 5, lastOn });
-const worthOf = (candidate: Candidate, others: readonly Candidate[] = []) =>
-  dueWeakNearest(candidate, contextOf([candidate, ...others], TODAY));
+/** The worth of the one question of a topic that carries one mark, so that w is the topic's weight. */
+const worthOf = (given: Partial<Candidate>, moment: Partial<StudyMoment> = {}) => {
+  const candidate = aCandidate({ questionId: 'q', topicMarks: 1, ...given });
+  return tieredGain(candidate, new StudyContext([candidate], { ...MOMENT, ...moment }));
+};
 
-/** Topics with one attempted question each, recalled the better the higher the number. */
-const rankedTopics = (count: number): Candidate[] =>
-  Array.from({ length: count }, (_, index) =>
-    aCandidate({ questionId: `q${index}`, topicId: `t${index}`, memory: memory(5 * (index + 1), '2027-01-01') }),
-  );
-
-describe('what is asked', () => {
-  test('the new and the due, not what is still well recalled', () => {
-    expect(worthOf(aCandidate({ questionId: 'new' }))).not.toBeNull();
-    expect(worthOf(aCandidate({ questionId: 'due', memory: memory(5, '2027-04-15') }))).not.toBeNull();
-    expect(worthOf(aCandidate({ questionId: 'early', memory: memory(5.5, '2027-04-15') }))).toBeNull();
+// Tolerances as stated there.
+describe('worked numbers of the scheduling specification, section 8', () => {
+  test.each<[Candidate['memory'], number, number, number, number, number, 1 | 2]>([
+    [aMemory(10, 10), 30, 1, 45, 0.0939, 2.98e-4, 2],
+    [aMemory(2.3065, 3, 2.1181), 1, 1, 45, 0.1168, 2.163e-3, 1],
+    [aMemory(0.5, 1, 6.4133), 40, 1, 45, 0.1141, 2.817e-4, 1],
+    [aMemory(50, 20), 60, 2, 60, 0.046, 1.179e-4, 2],
+  ])('%j, paper in %d days, w %d, c %d: gain %d, score %d, tier %d', (memory, days, w, c, gain, score, tier) => {
+    const worth = worthOf({ memory, examOn: dayFromToday(days), topicWeight: w, expectedSeconds: c });
+    expect(Math.abs(gainOf(worth.outlook) - gain)).toBeLessThanOrEqual(1e-4);
+    expect(Math.abs(worth.score / score - 1)).toBeLessThanOrEqual(1e-3);
+    expect(worth.tier).toBe(tier);
   });
 
-  test('tier 1 is the last day before the paper or a barely formed memory', () => {
-    expect(worthOf(aCandidate({ questionId: 'q', examOn: '2027-04-21' }))?.tier).toBe(1);
-    expect(worthOf(aCandidate({ questionId: 'q', examOn: TODAY }))?.tier).toBe(1);
-    expect(worthOf(aCandidate({ questionId: 'q', memory: memory(0.9, '2027-04-19') }))?.tier).toBe(1);
-    expect(worthOf(aCandidate({ questionId: 'q', memory: memory(1, '2027-04-19') }))?.tier).toBe(2);
-    expect(worthOf(aCandidate({ questionId: 'q' }))?.tier).toBe(2);
-  });
-});
-
-describe('what counts more', () => {
-  const score = (given: Partial<Candidate>) => worthOf(aCandidate({ questionId: 'q', ...given }))?.score ?? 0;
-
-  test('the share of marks on a nearer paper', () => {
-    expect(score({})).toBeCloseTo((0.01 * 0.5 * 5) / 35, 12);
-    expect(score({ topicWeight: 0.2 })).toBeCloseTo(2 * score({}), 12);
-    expect(score({ examOn: '2027-04-30' })).toBeGreaterThan(score({}));
-    expect(score({ examOn: '2027-04-25' })).toBeCloseTo((score({}) * 35) / 10, 12);
+  test('recall today, and on the day without and with a go', () => {
+    const { today, without, withGo } = worthOf({ memory: aMemory(10, 10), examOn: dayFromToday(30) }).outlook;
+    expect(Math.abs(today - 0.9)).toBeLessThanOrEqual(1e-4);
+    expect(Math.abs(without - 0.7821)).toBeLessThanOrEqual(1e-4);
+    expect(Math.abs(withGo - 0.876)).toBeLessThanOrEqual(1e-4);
   });
 
-  test('the same whether a question is short or long, and whether the bank is small or large', () => {
-    expect(score({ marks: 4, expectedSeconds: 180 })).toBe(score({}));
-    const scoreIn = (size: number) => {
-      const [first, ...others] = Array.from({ length: size }, (_, index) =>
-        aCandidate({ questionId: `q${String(index).padStart(3, '0')}`, itemsInTopic: size }),
-      );
-      return (first && worthOf(first, others)?.score) ?? 0;
-    };
-    expect(scoreIn(50)).toBeCloseTo(scoreIn(5), 12);
-  });
-
-  test('the first turns of a topic: the least recalled question whole, the next half', () => {
-    const [first, second] = [aCandidate({ questionId: 'a' }), aCandidate({ questionId: 'b' })];
-    expect(worthOf(second, [first])?.score).toBeCloseTo((worthOf(first, [second])?.score ?? 0) / 2, 12);
-    const forgotten = aCandidate({ questionId: 'c', memory: memory(0.5, '2026-01-01') });
-    const context = contextOf([first, second, forgotten], TODAY);
-    expect([...context.turnInTopic]).toEqual([
-      ['c', 1],
-      ['a', 2],
-      ['b', 3],
-    ]);
-  });
-
-  test('a topic that is weak for its paper', () => {
-    const due = aCandidate({ questionId: 'due', memory: memory(5, '2027-04-15') });
-    const firm = aCandidate({ questionId: 'firm', memory: memory(200, '2027-04-19') });
-    const lost = aCandidate({ questionId: 'lost', memory: memory(0.3, '2027-01-01') });
-    expect(worthOf(due, [lost])?.score ?? 0).toBeGreaterThan(worthOf(due, [firm])?.score ?? 0);
-  });
-});
-
-describe('the reason is the first that applies', () => {
-  const reason = (given: Partial<Candidate>, others: readonly Candidate[] = []) =>
-    worthOf(aCandidate({ questionId: 'zz', ...given }), others)?.reason;
-  const barely = memory(0.5, '2027-04-19');
-  const due = memory(10, '2027-04-08');
-
-  test.each<[string, Partial<Candidate>, unknown]>([
-    ['paper tomorrow', { examOn: '2027-04-21', memory: barely }, { kind: 'lastLook', paperId: 'paper' }],
-    ['barely formed and missed', { memory: barely, lastWasBelowHalf: true }, { kind: 'missedLast' }],
-    ['barely formed after a pass', { memory: barely }, { kind: 'notFirm' }],
-    ['never attempted', { examOn: '2027-04-24' }, { kind: 'firstLook', topicMarks: 12 }],
-    ['paper within a week', { memory: due, examOn: '2027-04-27' }, { kind: 'paperSoon', paperId: 'paper', days: 7 }],
-    ['otherwise due', { memory: due, examOn: '2027-04-28' }, { kind: 'due', recallPercent: 89 }],
-  ])('%s', (_what, given, expected) => {
-    expect(reason(given)).toEqual(expected);
-  });
-
-  test('a weak topic is one of the lowest third', () => {
-    expect(reason({ topicId: 'mine', memory: memory(1, '2027-01-01') }, rankedTopics(5))).toEqual({
-      kind: 'weakTopic',
+  test('a question never attempted, taught 200 days ago, paper in 60 days', () => {
+    const { score, tier, outlook } = worthOf({
+      taughtOn: dayFromToday(-200),
+      examOn: dayFromToday(60),
+      topicWeight: 1,
     });
-    expect(reason({ topicId: 'mine', memory: memory(60, '2027-01-01') }, rankedTopics(5))?.kind).toBe('due');
-    expect(contextOf(rankedTopics(5), TODAY).weakerTopicIds).toEqual(new Set(['t0']));
-    expect(contextOf(rankedTopics(2), TODAY).weakerTopicIds.size).toBe(0);
+    expect(Math.abs(gainOf(outlook) - 0.2237)).toBeLessThanOrEqual(1e-4);
+    // The gain's four figures allow no closer look: (1 ÷ 45) · 0.2237 · 5 ÷ 65.
+    expect(Math.abs(score / ((0.2237 / 45) * (5 / 65)) - 1)).toBeLessThanOrEqual(1e-3);
+    expect(tier).toBe(2);
+  });
+});
+
+describe('the tier', () => {
+  test.each<[string, Partial<Candidate>, 1 | 2]>([
+    ['paper tomorrow', { examOn: dayFromToday(1) }, 1],
+    ['paper today, not yet begun', { examOn: TODAY }, 1],
+    ['paper the day after tomorrow', { examOn: dayFromToday(2) }, 2],
+    ['barely formed', { memory: aMemory(0.99, 1) }, 1],
+    ['formed', { memory: aMemory(1, 1) }, 2],
+    ['never attempted', {}, 2],
+  ])('%s', (_what, given, tier) => {
+    expect(worthOf(given).tier).toBe(tier);
+  });
+
+  test('is 1 on the last planned study day, however far the paper', () => {
+    expect(worthOf({}, { lastStudyOn: TODAY }).tier).toBe(1);
+    expect(worthOf({}, { lastStudyOn: dayFromToday(-3) }).tier).toBe(1);
+    expect(worthOf({}, { lastStudyOn: dayFromToday(1) }).tier).toBe(2);
+  });
+});
+
+describe('the score', () => {
+  test('counts the days to the last chance, which practice that ends before the paper brings nearer', () => {
+    const ending = (days: number | null) =>
+      worthOf({}, { lastStudyOn: days === null ? null : dayFromToday(days) }).score;
+    // v = min(n, days to the last study day + 1), n = 30; the score goes with 5 ÷ (v + 5).
+    expect(ending(4)).toBeCloseTo((ending(null) * 35) / 10, 12);
+    expect(ending(29)).toBe(ending(null));
+    expect(ending(60)).toBe(ending(null));
+  });
+
+  test('goes by the mark share and the seconds, held within their bounds', () => {
+    expect(worthOf({ topicWeight: 0.2 }).score).toBeCloseTo(2 * worthOf({}).score, 12);
+    expect(worthOf({ expectedSeconds: 90 }).score).toBeCloseTo(worthOf({}).score / 2, 12);
+    expect(worthOf({ expectedSeconds: 1 }).score).toBe(worthOf({ expectedSeconds: 20 }).score);
+  });
+
+  test('is not above 0 where a go gains nothing, which leaves the question a candidate', () => {
+    const known = Array.from({ length: 100 }, (_, index) =>
+      aCandidate({ questionId: `k${index}`, memory: aMemory(300, 2), firstGrade: 3 }),
+    );
+    const unseen = aCandidate({ questionId: 'unseen', taughtOn: dayFromToday(-200), examOn: dayFromToday(200) });
+    const worth = tieredGain(unseen, new StudyContext([...known, unseen], MOMENT));
+    expect(worth.score).toBeLessThanOrEqual(0);
+    expect(worth.tier).toBe(2);
   });
 });
