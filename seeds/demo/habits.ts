@@ -26,7 +26,7 @@ function habitOf(student: Student, days: number): Habit {
 /** One session of practice: the day counted from the start, what it is, and when it begins. */
 export interface Session {
   day: number;
-  kind: SetKind;
+  kind: Exclude<SetKind, 'chosen'>;
   /** Wall-clock time at school, "17:25". */
   startsAt: string;
   /** Questions after which the student leaves early; most go on to the end. */

@@ -122,6 +122,8 @@ const TABLES = {
     subject_id: 'uuid',
     topic_id: 'uuid',
     reason: 'jsonb',
+    prior_recall: 'double precision',
+    prior_days: 'integer',
   },
   answers: {
     id: 'uuid',
@@ -156,6 +158,7 @@ const TABLES = {
     difficulty: 'double precision',
     last_on: 'date',
     attempts: 'integer',
+    first_grade: 'integer',
     last_grade: 'integer',
     last_share: 'double precision',
   },

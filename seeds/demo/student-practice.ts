@@ -2,9 +2,10 @@ import { type BuiltItem, buildSet } from '#shared/domain/schedule/build-set.ts';
 import type { Candidate } from '#shared/domain/schedule/candidate.ts';
 import { foldNext, type ItemMemory, UNATTEMPTED } from '#shared/domain/schedule/fold.ts';
 import { gradeOf, type MarkedAnswer } from '#shared/domain/schedule/grade.ts';
+import { DEFAULT_MODEL } from '#shared/domain/schedule/memory.ts';
+import type { Prior } from '#shared/domain/schedule/unseen.ts';
 import { dayNumber } from '#shared/domain/time/calendar.ts';
 import { instantOf } from '#shared/domain/time/zone.ts';
-import type { SetKind } from '#shared/schemas/practice.ts';
 import { attempt } from './attempt.ts';
 import type { Session } from './habits.ts';
 import { idFor } from './ids.ts';
@@ -17,7 +18,7 @@ import type { StudyItem } from './study.ts';
 
 /** How the school builds sets. */
 export interface SetRules {
-  budgetSeconds: Record<SetKind, number>;
+  budgetSeconds: Record<Session['kind'], number>;
   confusable: readonly [string, string][];
 }
 
@@ -64,6 +65,9 @@ export class StudentPractice {
     const built = buildSet({
       candidates: this.#offered(random),
       today: date,
+      lastStudyOn: null,
+      model: DEFAULT_MODEL,
+      optimism: 0,
       budgetSeconds,
       maxSubjects: SUBJECTS_PER_SET,
       mode: session.kind,
@@ -73,10 +77,10 @@ export class StudentPractice {
     const openedAt = instantOf(date, session.startsAt, SCHOOL.zone).getTime();
     this.#addItems(setId, built);
     let clock = openedAt + 3000;
-    for (const [index, { questionId }] of built.entries()) {
+    for (const [index, item] of built.entries()) {
       // A set closes after the question in hand once its time is up.
       if (clock - openedAt >= budgetSeconds * 1000 || index >= session.leavesAfter) break;
-      clock = this.#answer(idFor(setId, index + 1), questionId, date, clock, random);
+      clock = this.#answer(idFor(setId, index + 1), item, date, clock, random);
     }
     this.#rows.sets.push({
       id: setId,
@@ -100,6 +104,7 @@ export class StudentPractice {
         difficulty: folded.memory.difficulty,
         last_on: folded.memory.lastOn,
         attempts: folded.attempts,
+        first_grade: folded.firstGrade,
         last_grade: folded.lastGrade,
         last_share: lastShare,
       });
@@ -120,12 +125,13 @@ export class StudentPractice {
       const isBarelyFormed = memory !== null && memory.stability < 1;
       if (!subjects.has(facts.subjectId) || !(isOffered || isBarelyFormed)) return [];
       const lastWasBelowHalf = history !== undefined && history.lastShare < 0.5;
-      return [{ ...facts, memory, lastWasBelowHalf, answeredToday: null, isTaken: false }];
+      const firstGrade = history?.folded.firstGrade ?? null;
+      return [{ ...facts, memory, firstGrade, lastWasBelowHalf, answeredToday: null, isTaken: false, isSet: false }];
     });
   }
 
   #addItems(setId: string, built: readonly BuiltItem[]): void {
-    for (const { position, questionId, subjectId, topicId, reason } of built) {
+    for (const { position, questionId, subjectId, topicId, reason, prior } of built) {
       this.#rows.set_items.push({
         id: idFor(setId, position),
         set_id: setId,
@@ -135,12 +141,14 @@ export class StudentPractice {
         subject_id: subjectId,
         topic_id: topicId,
         reason,
+        prior_recall: prior?.recall ?? null,
+        prior_days: prior?.days ?? null,
       });
     }
   }
 
   /** One question answered and marked. @returns the time at which the next one is shown */
-  #answer(setItemId: string, questionId: string, date: string, shownAt: number, random: Random): number {
+  #answer(setItemId: string, { questionId, prior }: BuiltItem, date: string, shownAt: number, random: Random): number {
     const { question, facts, taughtDay, difficulty, related } = this.#item(questionId);
     const known = { questionId, topicId: facts.topicId, subjectId: facts.subjectId, difficulty };
     const day = dayNumber(date);
@@ -165,13 +173,13 @@ export class StudentPractice {
       receivedAt,
       markedAt,
     });
-    this.#remember(questionId, date, { marks, maxMarks: facts.marks, howSure });
+    this.#remember(questionId, date, prior, { marks, maxMarks: facts.marks, howSure });
     return markedAt + between(READING, random) * 1000;
   }
 
-  #remember(questionId: string, givenOn: string, answer: MarkedAnswer): void {
+  #remember(questionId: string, givenOn: string, prior: Prior | null, answer: MarkedAnswer): void {
     const before = this.#histories.get(questionId)?.folded ?? UNATTEMPTED;
-    const folded = foldNext(before, { givenOn, grade: gradeOf(answer) });
+    const folded = foldNext(before, { givenOn, grade: gradeOf(answer), prior }, DEFAULT_MODEL);
     this.#histories.set(questionId, { folded, lastShare: answer.marks / answer.maxMarks });
   }
 

@@ -9,12 +9,15 @@ import { randomFor } from './random.ts';
 import type { Season } from './timetable.ts';
 
 /** A candidate but for what the student has made of it. */
-type Facts = Omit<Candidate, 'memory' | 'lastWasBelowHalf' | 'answeredToday' | 'isTaken' | 'taughtOn' | 'itemsInTopic'>;
+type Facts = Omit<
+  Candidate,
+  'memory' | 'firstGrade' | 'lastWasBelowHalf' | 'answeredToday' | 'isTaken' | 'isSet' | 'taughtOn' | 'examOn'
+>;
 
 /** One question as a class meets it. */
 export interface StudyItem {
   question: BankQuestion;
-  facts: Facts & { taughtOn: string; itemsInTopic: number };
+  facts: Facts & { taughtOn: string; examOn: string };
   taughtDay: number;
   difficulty: number;
   /** Parts of questions on the topic, whose answers may be confused with this one's. */
@@ -76,7 +79,6 @@ export function studyItems(
         expectedSeconds: question.content.seconds,
         topicWeight: topicMarks / subjectMarks,
         topicMarks,
-        itemsInTopic: inTopic.length,
         examOn: next.on,
         paperId: next.id,
         taughtOn,

@@ -1,4 +1,4 @@
-import { withSchool } from '#server/db/scope.ts';
+import { execute, withSchool } from '#server/db/scope.ts';
 import { Answer } from '#server/models/answer.ts';
 import { MarkEvent } from '#server/models/mark-event.ts';
 import { PracticeSet } from '#server/models/practice-set.ts';
@@ -67,3 +67,25 @@ export async function anAnswerGiven(
     return { id: answer.id };
   });
 }
+
+interface MemoryValues {
+  stability: number;
+  lastOn: string;
+  lastShare?: number;
+}
+
+/** A memory of a question, as if answers had left it: for what goes by states alone, since no log bears it out. */
+export const aMemory = (
+  school: FactorySchool,
+  student: FactoryPerson,
+  questionId: string,
+  { stability, lastOn, lastShare = 1 }: MemoryValues,
+): Promise<object[]> =>
+  withSchool(school.id, () =>
+    execute(
+      `INSERT INTO memory_states
+         (school_id, user_id, question_id, stability, difficulty, last_on, attempts, first_grade, last_grade, last_share)
+       VALUES ($1, $2, $3, $4, 5, $5, 2, 3, 3, $6)`,
+      [school.id, student.id, questionId, stability, lastOn, lastShare],
+    ),
+  );

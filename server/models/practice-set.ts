@@ -8,6 +8,8 @@ export class PracticeSet extends Model<InferAttributes<PracticeSet>, InferCreati
   declare schoolId: CreationOptional<string>;
   declare userId: string;
   declare kind: SetKind;
+  /** Topics the student chose, in order of id; none in a mixed or morning set. */
+  declare topicIds: CreationOptional<string[]>;
   declare setOn: string;
   declare budgetSeconds: number;
   declare openedAt: Date;
@@ -19,6 +21,7 @@ PracticeSet.init(
     ...tenantColumns,
     userId: reference(),
     kind: required(DataTypes.TEXT),
+    topicIds: { type: DataTypes.ARRAY(DataTypes.UUID), allowNull: false, defaultValue: [] },
     setOn: required(DataTypes.DATEONLY),
     budgetSeconds: required(DataTypes.INTEGER),
     openedAt: required(DataTypes.DATE),

@@ -13,6 +13,9 @@ export class SetItem extends Model<InferAttributes<SetItem>, InferCreationAttrib
   declare subjectId: string;
   declare topicId: string;
   declare reason: Reason;
+  /** What was believed of a question never attempted: recall 0–1, and days since its topic was taught. */
+  declare priorRecall: CreationOptional<number | null>;
+  declare priorDays: CreationOptional<number | null>;
 }
 
 SetItem.init(
@@ -25,6 +28,8 @@ SetItem.init(
     subjectId: reference(),
     topicId: reference(),
     reason: required(DataTypes.JSONB),
+    priorRecall: { type: DataTypes.DOUBLE, allowNull: true },
+    priorDays: { type: DataTypes.INTEGER, allowNull: true },
   },
   tenantOptions('SetItem', 'set_items'),
 );

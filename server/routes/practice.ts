@@ -20,7 +20,7 @@ export const practiceRoutes: Route[] = [
     path: '/sets',
     access: ['student'],
     body: openSetSchema,
-    run: (scope, { body }) => openSet(scope, body.kind),
+    run: (scope, { body }) => openSet(scope, body),
   }),
   route({ method: 'get', path: '/sets/:id', ...student, run: (scope, { params }) => showSet(scope, params.id) }),
   route({

@@ -4,18 +4,27 @@ import { sittingSchema, subjectRefSchema } from './curriculum.ts';
 import { howSureSchema } from './how-sure.ts';
 import { markCodeSchema, questionKindSchema } from './question-body.ts';
 
-export const setKindSchema = z.enum(['mixed', 'morning']);
+/** `chosen`: of topics that the student picked, still interleaved. */
+export const setKindSchema = z.enum(['mixed', 'morning', 'chosen']);
 export type SetKind = z.output<typeof setKindSchema>;
 
-export const setKindWords: Record<SetKind, string> = { mixed: 'Mixed set', morning: 'Morning set' };
+export const setKindWords: Record<SetKind, string> = {
+  mixed: 'Mixed set',
+  morning: 'Morning set',
+  chosen: 'Set from chosen topics',
+};
 
-/** Standing of a topic by expected recall; `notStarted` where nothing was attempted. */
-export const standingSchema = z.enum(['secure', 'developing', 'weak', 'notStarted']);
+/**
+ * Standing of a topic by exam-day recall; `notEnough` where its range is over 50 wide, `notStarted` where nothing was
+ * attempted.
+ */
+export const standingSchema = z.enum(['secure', 'developing', 'weak', 'notEnough', 'notStarted']);
 export type Standing = z.output<typeof standingSchema>;
 export const standingWords: Record<Standing, string> = {
   secure: 'Secure',
   developing: 'Developing',
   weak: 'Weak',
+  notEnough: 'Not enough yet',
   notStarted: 'Not started',
 };
 
@@ -107,7 +116,14 @@ export const setSchema = z.object({
 });
 export type SetDto = z.output<typeof setSchema>;
 
-export const openSetSchema = z.strictObject({ kind: setKindSchema });
+/** Most topics that one set can be chosen from. */
+export const MOST_CHOSEN_TOPICS = 20;
+
+export const openSetSchema = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.enum(['mixed', 'morning']) }),
+  z.strictObject({ kind: z.literal('chosen'), topicIds: z.array(z.uuid()).min(1).max(MOST_CHOSEN_TOPICS) }),
+]);
+export type OpenSet = z.output<typeof openSetSchema>;
 
 /** One handed-in answer. The client makes `id` before sending and keeps it until it is acknowledged. */
 export const handInSchema = z.strictObject({
@@ -134,8 +150,12 @@ export const selfMarkSchema = z.strictObject({
 });
 export type SelfMark = z.output<typeof selfMarkSchema>;
 
+const percentSchema = z.int().min(0).max(100);
+/** What is probably not left, either way: an 80% range. */
+const rangeSchema = z.object({ low: percentSchema, high: percentSchema });
+
 /** A topic by what could be recalled of it on the day of its paper, 0–100: an estimate. */
-const topicStandingSchema = z.object({ recallOnDay: z.int(), standing: standingSchema });
+const topicStandingSchema = z.object({ recallOnDay: percentSchema, standing: standingSchema });
 
 /** How a set went. */
 export const setSummarySchema = z.object({
@@ -190,6 +210,8 @@ export const todaySetSchema = z.object({
   strands: z.array(z.object({ subject: subjectRefSchema, isAnswered: z.boolean() })).max(60),
   /** Why these subjects, in one or two sentences. */
   sentence: z.string(),
+  /** Why these questions: each reason once, in words, the commonest first. */
+  reasons: z.array(z.object({ words: z.string(), questions: z.int() })).max(60),
   finishedAt: instantSchema.nullable(),
   marks: z.int().nullable(),
   maxMarks: z.int().nullable(),
@@ -220,17 +242,49 @@ export const myTopicSchema = z.object({
   subject: subjectRefSchema,
   topic: topicRefSchema,
   standing: standingSchema,
-  /** Expected recall today, 0–100, over the questions attempted; null where none was. */
-  recallNow: z.int().nullable(),
-  /** The same on the day of its next paper if practice stopped now: what the standing goes by. */
-  recallOnDay: z.int().nullable(),
+  /** Expected recall on the day of its next paper if practice stopped now; null where it is not known well enough. */
+  recallOnDay: percentSchema.nullable(),
+  /** What it is probably within; null where nothing was attempted. */
+  range: rangeSchema.nullable(),
   attempted: z.int(),
   questions: z.int(),
   lastPractisedOn: daySchema.nullable(),
   returnsOn: daySchema.nullable(),
   nextPaper: z.object({ title: z.string(), on: daySchema, daysAway: z.int() }).nullable(),
   isTaught: z.boolean(),
+  /** True where a set of it could be opened now. */
+  canPractise: z.boolean(),
 });
 export type MyTopicDto = z.output<typeof myTopicSchema>;
-/** A student's topics: bounded by their subjects. */
-export const myTopicListSchema = z.object({ on: daySchema, items: z.array(myTopicSchema).max(1000) });
+
+/** What today's standing would mean in one paper still to sit: an estimate, for the student alone. */
+export const paperForecastSchema = z.object({
+  paperId: z.uuid(),
+  subject: subjectRefSchema,
+  title: z.string(),
+  on: daySchema.nullable(),
+  /** Marks of the whole paper. */
+  marks: z.int(),
+  /** Marks it would probably be within; null where that is not known well enough. */
+  range: z.object({ low: z.int(), high: z.int() }).nullable(),
+});
+export type PaperForecastDto = z.output<typeof paperForecastSchema>;
+
+/** A student's topics and papers: bounded by their subjects. */
+export const myTopicListSchema = z.object({
+  on: daySchema,
+  items: z.array(myTopicSchema).max(1000),
+  papers: z.array(paperForecastSchema).max(200),
+  /** A set of chosen topics opened today and not finished; null where there is none. */
+  openSet: z
+    .object({
+      id: z.uuid(),
+      topicIds: z.array(z.uuid()).max(MOST_CHOSEN_TOPICS),
+      questions: z.int(),
+      answered: z.int(),
+    })
+    .nullable(),
+  /** True where the estimates have lately been too high for this student, so that ranges reach further down. */
+  isTooHopeful: z.boolean(),
+});
+export type MyTopicListDto = z.output<typeof myTopicListSchema>;

@@ -6,10 +6,10 @@ const OUTSIDE_THE_WALL = ['rate_limit', 'schema_migration', 'school_directory', 
 
 /** The tables people edit and the logs that only grow, as the app's own role may use them. */
 const EDITED =
-  `access_arrangements carer_links class_teachers classes confusable_topics enrolments memberships memory_states papers
-  question_topics question_versions questions seasons sets sittings specifications subjects topic_teachings
-  topic_weights topics tutor_groups users year_groups`.split(/\s+/);
-const LOGS = ['answers', 'audit', 'mark_events', 'set_items'];
+  `access_arrangements carer_links class_questions class_teachers classes confusable_topics enrolments memberships
+  memory_states papers question_topics question_versions questions seasons sets sittings specifications student_models
+  subjects topic_teachings topic_weights topics tutor_groups users year_groups`.split(/\s+/);
+const LOGS = ['answers', 'audit', 'mark_events', 'memory_models', 'set_items'];
 
 const APP_GRANTS = Object.fromEntries([
   ...EDITED.map((table) => [table, 'DELETE INSERT SELECT UPDATE']),

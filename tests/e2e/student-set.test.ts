@@ -1,8 +1,8 @@
 import type { Page } from 'playwright-core';
 import { expect, test } from 'vitest';
+import { aMemory } from '#seeds/factories/answer.ts';
 import { aStudy, type Study } from '#seeds/factories/study.ts';
-import { execute, select, withSchool } from '#server/db/scope.ts';
-import { recall } from '#shared/domain/schedule/memory.ts';
+import { select, withSchool } from '#server/db/scope.ts';
 import { addDays } from '#shared/domain/time/calendar.ts';
 import { axe, DESK, PHONE, withChromium } from '#tests/support/chromium.ts';
 import { expectFocus, tabTo } from '#tests/support/keyboard.ts';
@@ -151,12 +151,7 @@ async function remember({ school, student }: Study): Promise<{ stem: string; sta
     );
     const lastOn = addDays(now.toISOString().slice(0, 10), -DAYS_AGO);
     for (const [index, { id }] of questions.entries()) {
-      await execute(
-        `INSERT INTO memory_states
-           (school_id, user_id, question_id, stability, difficulty, last_on, attempts, last_grade, last_share)
-         VALUES ($1, $2, $3, $4, 5, $5, 1, 3, 1)`,
-        [school.id, student.id, id, STABILITIES[index], lastOn],
-      );
+      await aMemory(school, student, id, { stability: STABILITIES[index] ?? 1, lastOn });
     }
     return questions.map(({ stem }, index) => ({ stem, stability: STABILITIES[index] ?? 0 }));
   });
@@ -165,7 +160,7 @@ async function remember({ school, student }: Study): Promise<{ stem: string; sta
 test('the morning set asks the hardest first and closes after the question at fifteen minutes', async () => {
   const study = await aStudy({ subjects: 1, topics: 6, questions: 1 });
   const remembered = await remember(study);
-  const hardestFirst = [...remembered].sort((a, b) => recall(DAYS_AGO, a.stability) - recall(DAYS_AGO, b.stability));
+  const hardestFirst = [...remembered].sort((a, b) => a.stability - b.stability);
   const { page, troubles, context } = await signIn(study.student, { viewport: PHONE });
   await page.clock.install();
   await page.goto('/today');

@@ -1,9 +1,8 @@
-import { anAnswerGiven } from '#seeds/factories/answer.ts';
+import { aMemory, anAnswerGiven } from '#seeds/factories/answer.ts';
 import { aClass, aSitting, aSubject, aTopic, type FactorySubject, taught } from '#seeds/factories/curriculum.ts';
 import { aHeadOfDepartment, aStudent, aTeacher, type FactoryPerson } from '#seeds/factories/people.ts';
 import { aNumberBody, aQuestion, aRecallBody } from '#seeds/factories/question.ts';
 import { aSchool, type FactorySchool } from '#seeds/factories/school.ts';
-import { execute, withSchool } from '#server/db/scope.ts';
 import { addDays } from '#shared/domain/time/calendar.ts';
 import type { QuestionBody } from '#shared/schemas/question-body.ts';
 
@@ -74,14 +73,11 @@ export async function aSchoolInUse(): Promise<SchoolInUse> {
       await aQuestion(school, subject, { ...at, status: 'inReview', body });
       await aQuestion(school, subject, { ...at, status: 'draft', body });
       await anAnswerGiven(school, subject, { student, question, topicId: topic.id, marks: [1], maxMarks: 4 });
-      await withSchool(school.id, () =>
-        execute(
-          `INSERT INTO memory_states
-             (school_id, user_id, question_id, stability, difficulty, last_on, attempts, last_grade, last_share)
-           VALUES ($1, $2, $3, $4, 5, $5, 2, 3, 0.25)`,
-          [school.id, student.id, question.id, [2, 12, 90][n - 1], addDays(day, -15)],
-        ),
-      );
+      await aMemory(school, student, question.id, {
+        stability: [2, 12, 90][n - 1] ?? 1,
+        lastOn: addDays(day, -15),
+        lastShare: 0.25,
+      });
     }
   }
   if (!staff) throw new Error('no subject was made');

@@ -7,6 +7,7 @@ import { allBankRows, planDemo, planPractice, studyRows } from '#seeds/demo/plan
 import { markPart } from '#shared/domain/marking/mark-part.ts';
 import { foldLog } from '#shared/domain/schedule/fold.ts';
 import { gradeOf } from '#shared/domain/schedule/grade.ts';
+import { DEFAULT_MODEL } from '#shared/domain/schedule/memory.ts';
 import { daysBetween, weekday } from '#shared/domain/time/calendar.ts';
 import { localDate } from '#shared/domain/time/zone.ts';
 import { signInPageSchema } from '#shared/schemas/auth.ts';
@@ -175,6 +176,7 @@ function groupAnswers(): Map<string, typeof practice.answers> {
 describe('simulated practice', () => {
   const bodies = new Map(bank.question_versions?.map(({ id, body }) => [id, body]));
   const events = new Map(practice.mark_events.map((event) => [event.answer_id, event]));
+  const items = new Map(practice.set_items.map((item) => [item.id, item]));
 
   test('lies before the day of seeding, each answer within its day', () => {
     for (const { given_at, given_on } of practice.answers) {
@@ -215,17 +217,24 @@ describe('simulated practice', () => {
     expect(practice.memory_states).toHaveLength(logs.size);
     for (const state of practice.memory_states) {
       const folded = foldLog(
-        (logs.get(`${state.user_id} ${state.question_id}`) ?? []).map(({ id, given_at, given_on, how_sure }) => {
-          const { marks, max_marks } = events.get(id) ?? { marks: null, max_marks: null };
-          const grade = gradeOf({ marks: marks ?? 0, maxMarks: max_marks ?? 0, howSure: how_sure as HowSure });
-          return { answerId: id ?? '', givenAt: new Date(given_at ?? ''), givenOn: given_on ?? '', grade };
-        }),
+        (logs.get(`${state.user_id} ${state.question_id}`) ?? []).map(
+          ({ id, set_item_id, given_at, given_on, how_sure }) => {
+            const { marks, max_marks } = events.get(id) ?? { marks: null, max_marks: null };
+            const grade = gradeOf({ marks: marks ?? 0, maxMarks: max_marks ?? 0, howSure: how_sure as HowSure });
+            const { prior_recall: recall, prior_days: days } = items.get(set_item_id) ?? {};
+            const prior = recall && days ? { recall, days } : null;
+            return { answerId: id ?? '', givenAt: new Date(given_at ?? ''), givenOn: given_on ?? '', grade, prior };
+          },
+        ),
+        DEFAULT_MODEL,
       );
-      expect({ ...folded.memory, attempts: folded.attempts, lastGrade: folded.lastGrade }).toEqual({
+      const { memory, ...counts } = folded;
+      expect({ ...memory, ...counts }).toEqual({
         stability: state.stability,
         difficulty: state.difficulty,
         lastOn: state.last_on,
         attempts: state.attempts,
+        firstGrade: state.first_grade,
         lastGrade: state.last_grade,
       });
     }

@@ -1,58 +1,73 @@
-import type { z } from 'zod';
 import { authorize } from '#server/policies/authorize.ts';
 import { practicePolicy } from '#server/policies/practice-policy.ts';
-import { presentSubject, presentTopic } from '#server/presenters/practice.ts';
+import { presentForecast, presentMyTopic, presentSubject } from '#server/presenters/practice.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
-import { returnOn } from '#shared/domain/schedule/due.ts';
-import { recallPercent, standingOf, topicRecall } from '#shared/domain/schedule/expected-recall.ts';
-import { daysBetween } from '#shared/domain/time/calendar.ts';
-import type { MyTopicDto, myTopicListSchema } from '#shared/schemas/practice.ts';
-import { loadTopicStates, type TopicStates } from './load-topic-states.ts';
+import { StudyContext } from '#shared/domain/schedule/context.ts';
+import { forecastPaper } from '#shared/domain/schedule/forecast.ts';
+import { canBeAsked } from '#shared/domain/schedule/select.ts';
+import type { MyTopicDto, MyTopicListDto, Standing } from '#shared/schemas/practice.ts';
+import { findOpenChosenSet } from './find-set.ts';
+import { groupBy } from './group-by.ts';
+import type { LoadedCandidate } from './load-candidates.ts';
+import { loadMyPapers, loadMyTopics, type MyPaper, type MyTopic } from './load-my-topics.ts';
+import { loadStudy } from './load-study.ts';
 import { loadNextPapers } from './next-papers.ts';
 import { loadSubjects, need } from './study-facts.ts';
 
-const percent = (recalled: number | null): number | null => (recalled === null ? null : recallPercent(recalled));
+// Weak, then developing, secure, and last what cannot be said.
+const ORDER: Record<Standing, number> = { weak: 0, developing: 1, secure: 2, notEnough: 3, notStarted: 4 };
 
-function figures({ states, examOn, isAhead }: TopicStates, { today, school }: Scope) {
-  const recalled = topicRecall(
-    states.map((memory) => ({ memory, examOn: examOn ?? school.seasonEndsOn })),
-    today,
-  );
-  const returns = isAhead ? states.flatMap((memory) => returnOn(memory, examOn, today) ?? []).sort() : [];
-  const practised = states.map((memory) => memory.lastOn).sort();
-  return {
-    standing: standingOf(recalled.onExamDay),
-    recallNow: percent(recalled.now),
-    recallOnDay: percent(recalled.onExamDay),
-    returnsOn: returns[0] ?? null,
-    lastPractisedOn: practised.at(-1) ?? null,
-  };
-}
+const weakestFirst = (a: MyTopicDto, b: MyTopicDto): number =>
+  ORDER[a.standing] - ORDER[b.standing] || (a.recallOnDay ?? 100) - (b.recallOnDay ?? 100);
 
-// Weak, then developing, then not started, then secure: what needs attention comes first.
-const ORDER: Record<MyTopicDto['standing'], number> = { weak: 0, developing: 1, notStarted: 2, secure: 3 };
+const isTakenElsewhere = ({ waitsIn }: LoadedCandidate): boolean => waitsIn !== null && waitsIn !== 'chosen';
 
-/** The acting student's topics with what they could expect to recall of each, weakest first. */
-export async function listMyTopics(scope: Scope): Promise<z.output<typeof myTopicListSchema>> {
+/** What today's standing would mean in one paper. */
+const forecastOf = (paper: MyPaper, topics: readonly MyTopic[], context: StudyContext) =>
+  forecastPaper({
+    marks: paper.marks,
+    topics: topics.flatMap(({ id, marks }) =>
+      marks[paper.id] === undefined
+        ? []
+        : [{ marks: marks[paper.id] ?? 0, mastery: context.masteries.get(id) ?? null }],
+    ),
+    recallElsewhere: context.recallInSubject(paper.subjectId),
+    optimism: context.optimism,
+  });
+
+/** The acting student's topics with what they could expect to recall of each, weakest first, and what it would mean. */
+export async function listMyTopics(scope: Scope): Promise<MyTopicListDto> {
   authorize(practicePolicy, 'read', scope.actor, { userId: scope.actor.userId });
-  const topics = await loadTopicStates(scope);
+  const { candidates, ...moment } = await loadStudy(scope);
+  const topics = await loadMyTopics(scope);
+  const papers = await loadMyPapers(scope);
   const subjects = await loadSubjects();
-  const papers = await loadNextPapers(
+  const nextPapers = await loadNextPapers(
     scope,
     topics.map((topic) => topic.id),
   );
-  const items = topics.map((topic): MyTopicDto => {
-    const paper = papers.get(topic.id);
-    return {
+  const context = new StudyContext(candidates, moment);
+  const byTopic = groupBy(candidates, ({ topicId }) => topicId);
+  const items = topics.map((topic) => {
+    const own = byTopic.get(topic.id) ?? [];
+    return presentMyTopic({
+      topic,
       subject: presentSubject(need(subjects, topic.subjectId)),
-      topic: presentTopic(topic),
-      ...figures(topic, scope),
-      attempted: topic.states.length,
-      questions: topic.questions,
-      nextPaper: paper ? { title: paper.title, on: paper.on, daysAway: daysBetween(scope.today, paper.on) } : null,
-      isTaught: topic.isTaught,
-    };
+      mastery: context.masteries.get(topic.id),
+      memories: own.flatMap(({ memory }) => memory ?? []),
+      isAhead: own.some(({ examOn }) => examOn !== null),
+      canPractise: own.some((candidate) => !isTakenElsewhere(candidate) && canBeAsked(candidate, context)),
+      paper: nextPapers.get(topic.id) ?? null,
+      today: scope.today,
+    });
   });
-  items.sort((a, b) => ORDER[a.standing] - ORDER[b.standing] || (a.recallOnDay ?? 100) - (b.recallOnDay ?? 100));
-  return { on: scope.today, items };
+  return {
+    on: scope.today,
+    items: items.sort(weakestFirst),
+    papers: papers.map((paper) =>
+      presentForecast(paper, presentSubject(need(subjects, paper.subjectId)), forecastOf(paper, topics, context)),
+    ),
+    openSet: await findOpenChosenSet(scope),
+    isTooHopeful: context.optimism > 0,
+  };
 }

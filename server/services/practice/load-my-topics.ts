@@ -1,42 +1,57 @@
 import { select } from '#server/db/scope.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
-import type { MemoryState } from '#shared/domain/schedule/memory.ts';
 import type { TopicFact } from './study-facts.ts';
 import { STUDY } from './study-sql.ts';
 
-/** One of the student's topics with the memory of its live questions. */
-export interface TopicStates extends TopicFact {
+/** One of the student's topics, with questions or without. */
+export interface MyTopic extends TopicFact {
   isTaught: boolean;
-  /** False once its last paper has been sat. */
-  isAhead: boolean;
-  /** Day of the next paper that examines it; null where no sitting is known. */
-  examOn: string | null;
-  questions: number;
-  states: (MemoryState & { questionId: string })[];
+  /** Marks it carries in each paper still to sit, by paper id. */
+  marks: Record<string, number>;
 }
 
-/** Most topics one student can have: a few hundred, many times over. */
-const MOST = 1000;
+/** One of the papers the student has still to sit. */
+export interface MyPaper {
+  id: string;
+  subjectId: string;
+  /** "Biology Paper 1". */
+  title: string;
+  /** Its next sitting; null where none is known. */
+  on: string | null;
+  marks: number;
+}
 
-/** The acting student's topics, all or some, by subject and number. One statement. */
-export const loadTopicStates = (
-  { actor, today, now }: Scope,
-  topicIds: readonly string[] | null = null,
-): Promise<TopicStates[]> =>
-  select<TopicStates>(
+/** Most topics and papers one student can have: a few hundred, many times over. */
+const MOST_TOPICS = 1000;
+const MOST_PAPERS = 200;
+
+/** The acting student's topics, by subject and number. One statement. */
+export const loadMyTopics = ({ actor, today, now }: Scope): Promise<MyTopic[]> =>
+  select<MyTopic>(
     `WITH ${STUDY}
-     SELECT topic.id, topic.number, topic.title, topic.subject_id AS "subjectId", topic.is_ahead AS "isAhead",
-       bool_or(topic.taught_on IS NOT NULL) AS "isTaught", to_char(topic.exam_on, 'YYYY-MM-DD') AS "examOn",
-       count(live.question_id)::int AS questions,
-       coalesce(jsonb_agg(jsonb_build_object('questionId', ms.question_id, 'stability', ms.stability,
-         'difficulty', ms.difficulty, 'lastOn', ms.last_on) ORDER BY ms.question_id)
-         FILTER (WHERE ms.question_id IS NOT NULL), '[]') AS states
+     SELECT topic.id, topic.number, topic.title, topic.subject_id AS "subjectId",
+       bool_or(topic.taught_on IS NOT NULL) AS "isTaught",
+       coalesce(jsonb_object_agg(ahead.paper_id, ahead.marks) FILTER (WHERE ahead.paper_id IS NOT NULL), '{}') AS marks
      FROM topic
-     LEFT JOIN live ON live.topic_id = topic.id
-     LEFT JOIN memory_states ms ON ms.user_id = $1 AND ms.question_id = live.question_id
-     WHERE $4::uuid[] IS NULL OR topic.id = ANY($4)
-     GROUP BY topic.id, topic.number, topic.title, topic.subject_id, topic.is_ahead, topic.exam_on, topic.position
+     LEFT JOIN LATERAL (
+       SELECT paper.id AS paper_id, w.marks FROM topic_weights w JOIN paper ON paper.id = w.paper_id
+       WHERE w.topic_id = topic.id AND paper.is_ahead
+     ) ahead ON true
+     GROUP BY topic.id, topic.number, topic.title, topic.subject_id, topic.position
      ORDER BY topic.position, topic.id
-     LIMIT ${MOST}`,
-    [actor.userId, today, now, topicIds],
+     LIMIT ${MOST_TOPICS}`,
+    [actor.userId, today, now],
+  );
+
+/** The papers the acting student has still to sit, soonest first. One statement. */
+export const loadMyPapers = ({ actor, today, now }: Scope): Promise<MyPaper[]> =>
+  select<MyPaper>(
+    `WITH ${STUDY}
+     SELECT DISTINCT paper.id, paper.subject_id AS "subjectId", sub.name || ' ' || paper.title AS title,
+       to_char(paper.next_on, 'YYYY-MM-DD') AS on, paper.marks
+     FROM paper JOIN subjects sub ON sub.id = paper.subject_id
+     WHERE paper.is_ahead
+     ORDER BY "on", title, paper.id
+     LIMIT ${MOST_PAPERS}`,
+    [actor.userId, today, now],
   );

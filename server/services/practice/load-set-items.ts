@@ -10,6 +10,7 @@ export interface LoadedItem {
   question_id: string;
   question_version_id: string;
   subject_id: string;
+  /** The topic it was asked under, or the one that this was merged into since. */
   topic_id: string;
   reason: Reason;
   number: number;
@@ -18,9 +19,11 @@ export interface LoadedItem {
 }
 
 const ITEM = `
-  SELECT i.id, i.set_id, i.position, i.question_id, i.question_version_id, i.subject_id, i.topic_id, i.reason,
+  SELECT i.id, i.set_id, i.position, i.question_id, i.question_version_id, i.subject_id,
+    coalesce(t.merged_into_id, t.id) AS topic_id, i.reason,
     q.number, v.kind, v.body
   FROM set_items i
+  JOIN topics t ON t.id = i.topic_id
   JOIN questions q ON q.id = i.question_id
   JOIN question_versions v ON v.id = i.question_version_id`;
 

@@ -2,10 +2,10 @@ import { select } from '#server/db/scope.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
 import { type BuiltItem, buildSet } from '#shared/domain/schedule/build-set.ts';
 import type { SetKind } from '#shared/schemas/practice.ts';
-import type { LoadedCandidate } from './load-candidates.ts';
+import type { Study } from './load-study.ts';
 
 /** Seconds of work in a set: a 25-minute session, and fifteen minutes in the morning. */
-export const BUDGET_SECONDS: Record<SetKind, number> = { mixed: 1500, morning: 900 };
+export const BUDGET_SECONDS: Record<SetKind, number> = { mixed: 1500, morning: 900, chosen: 1500 };
 
 /** Pairs of topics that the department says are easily confused. */
 export async function loadConfusable(): Promise<[string, string][]> {
@@ -15,19 +15,26 @@ export async function loadConfusable(): Promise<[string, string][]> {
   return rows.map((row) => [row.topic_id, row.other_topic_id]);
 }
 
-/** The set that would be opened now, without what waits in a set of the other kind. The same facts give the same set. */
+/** What a set is asked to be: its kind, and the topics chosen for it where it is of chosen topics. */
+export interface SetWish {
+  kind: SetKind;
+  topicIds?: readonly string[];
+}
+
+/** The set that would be opened now, without what waits in a set of another kind. The same facts give the same set. */
 export const proposeSet = (
-  { today, school }: Pick<Scope, 'today' | 'school'>,
-  kind: SetKind,
-  candidates: readonly LoadedCandidate[],
+  { school }: Pick<Scope, 'school'>,
+  { kind, topicIds = [] }: SetWish,
+  study: Study,
   confusable: readonly [string, string][],
 ): BuiltItem[] =>
   buildSet({
-    candidates: candidates.map((candidate) => ({
+    ...study,
+    candidates: study.candidates.map((candidate) => ({
       ...candidate,
       isTaken: candidate.waitsIn !== null && candidate.waitsIn !== kind,
     })),
-    today,
+    topicIds,
     budgetSeconds: BUDGET_SECONDS[kind],
     maxSubjects: school.subjectsPerSet,
     mode: kind,

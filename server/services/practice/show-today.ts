@@ -4,18 +4,20 @@ import { practicePolicy } from '#server/policies/practice-policy.ts';
 import { presentSubject, presentTopic } from '#server/presenters/practice.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
 import type { BuiltItem } from '#shared/domain/schedule/build-set.ts';
-import { compareText } from '#shared/domain/schedule/compare-text.ts';
-import { contextOf } from '#shared/domain/schedule/context.ts';
-import { recallPercent, standingOf, type TopicRecall } from '#shared/domain/schedule/expected-recall.ts';
+import { StudyContext } from '#shared/domain/schedule/context.ts';
+import { recallPercent } from '#shared/domain/schedule/mastery.ts';
+import { countReasons } from '#shared/domain/schedule/reason.ts';
 import { subjectsSentence } from '#shared/domain/schedule/subjects-sentence.ts';
 import type { SittingDto } from '#shared/schemas/curriculum.ts';
-import type { SetKind, Standing, TodayDto, TodaySetDto } from '#shared/schemas/practice.ts';
+import type { SetKind, TodayDto, TodaySetDto } from '#shared/schemas/practice.ts';
 import type { Reason } from '#shared/schemas/reason.ts';
 import { listSittings } from './list-sittings.ts';
-import { type LoadedCandidate, loadCandidates } from './load-candidates.ts';
+import type { LoadedCandidate } from './load-candidates.ts';
+import { loadStudy } from './load-study.ts';
 import { BUDGET_SECONDS, loadConfusable, proposeSet } from './propose-set.ts';
-import { loadSubjects, loadTopics, need, type SubjectFact } from './study-facts.ts';
+import { loadPaperTitles, loadSubjects, loadTopics, need, type SubjectFact } from './study-facts.ts';
 import { NEWEST_MARK } from './study-sql.ts';
+import { type WeakTopic, weakestTopics, weakFor } from './weak-topics.ts';
 
 const NEXT_PAPERS = 4;
 const WEAK_TOPICS = 4;
@@ -25,7 +27,7 @@ interface SetRow {
   kind: SetKind;
   finished_at: Date | null;
   subject_ids: string[];
-  reasons: Reason['kind'][];
+  reasons: Reason[];
   answered: boolean[];
   marks: number;
   max_marks: number;
@@ -36,7 +38,7 @@ const loadTodaysSets = ({ actor, today }: Scope) =>
   select<SetRow>(
     `SELECT s.id, s.kind, s.finished_at,
        array_agg(i.subject_id ORDER BY i.position) AS subject_ids,
-       array_agg(i.reason ->> 'kind' ORDER BY i.position) AS reasons,
+       jsonb_agg(i.reason ORDER BY i.position) AS reasons,
        array_agg(a.id IS NOT NULL ORDER BY i.position) AS answered,
        coalesce(sum(m.marks), 0)::int AS marks, coalesce(sum(m.max_marks), 0)::int AS max_marks
      FROM sets s
@@ -50,19 +52,23 @@ const loadTodaysSets = ({ actor, today }: Scope) =>
   );
 
 /** Words for a set from the questions it asks. */
-type SayWhy = (subjectIds: readonly string[], reasons: readonly Reason['kind'][]) => string;
+type SayWhy = (subjectIds: readonly string[], reasons: readonly Reason[]) => string;
+
+/** The sets that Today shows; one of chosen topics is started from Topics. */
+type TodayKind = Exclude<SetKind, 'chosen'>;
 
 interface SetFacts {
-  kind: SetKind;
+  kind: TodayKind;
   row: SetRow | undefined;
   proposed: readonly BuiltItem[];
   subjects: ReadonlyMap<string, SubjectFact>;
+  paperTitles: ReadonlyMap<string, string>;
   sayWhy: SayWhy;
 }
 
-function presentTodaySet({ kind, row, proposed, subjects, sayWhy }: SetFacts): TodaySetDto {
+function presentTodaySet({ kind, row, proposed, subjects, paperTitles, sayWhy }: SetFacts): TodaySetDto {
   const shown = row?.subject_ids ?? proposed.map((item) => item.subjectId);
-  const reasons = row?.reasons ?? proposed.map((item) => item.reason.kind);
+  const reasons = row?.reasons ?? proposed.map((item) => item.reason);
   const answered = row?.answered ?? [];
   const nothingOrReady = proposed.length ? 'ready' : 'nothing';
   return {
@@ -77,39 +83,12 @@ function presentTodaySet({ kind, row, proposed, subjects, sayWhy }: SetFacts): T
       isAnswered: answered[index] ?? false,
     })),
     sentence: sayWhy(shown, reasons),
+    reasons: countReasons(reasons, paperTitles),
     finishedAt: row?.finished_at?.toISOString() ?? null,
     marks: row ? row.marks : null,
     maxMarks: row ? row.max_marks : null,
   };
 }
-
-interface WeakTopic {
-  topicId: string;
-  subjectId: string;
-  paperId: string | null;
-  onExamDay: number;
-  standing: Standing;
-}
-
-/** Topics with something attempted and not secure, weakest on their exam day first. */
-function weakestTopics(topics: ReadonlyMap<string, TopicRecall>, candidates: readonly LoadedCandidate[]): WeakTopic[] {
-  const candidateOf = new Map(candidates.map((candidate) => [candidate.topicId, candidate]));
-  return [...topics]
-    .flatMap(([topicId, { onExamDay }]) => {
-      const candidate = candidateOf.get(topicId);
-      if (onExamDay === null || !candidate) return [];
-      const { subjectId, paperId } = candidate;
-      return [{ topicId, subjectId, paperId, onExamDay, standing: standingOf(onExamDay) }];
-    })
-    .filter(({ standing }) => standing !== 'secure')
-    .sort((a, b) => a.onExamDay - b.onExamDay || compareText(a.topicId, b.topicId));
-}
-
-/** Those that the next papers examine; all of them where no paper is known. */
-const weakFor = (weak: readonly WeakTopic[], papers: readonly SittingDto[]): WeakTopic[] =>
-  papers.length === 0
-    ? [...weak]
-    : weak.filter(({ paperId }) => paperId !== null && papers.some((paper) => paper.paperId === paperId));
 
 /** Says which subjects come up most and why, from the student's papers and standings. */
 function whyWords(
@@ -128,30 +107,31 @@ function whyWords(
         daysToPaper: sittings.find((sitting) => sitting.subject.id === id)?.daysAway ?? null,
         hasWeakTopic: weakSubjects.has(id),
       })),
-      reasons,
+      reasons.map(({ kind }) => kind),
     );
 }
 
 /** Everything the Today page shows. */
 export async function showToday(scope: Scope): Promise<TodayDto> {
   authorize(practicePolicy, 'practise', scope.actor, { userId: scope.actor.userId });
-  const candidates = await loadCandidates(scope);
+  const study = await loadStudy(scope);
   const confusable = await loadConfusable();
   const sittings = await listSittings(scope);
   const subjects = await loadSubjects();
   const sets = await loadTodaysSets(scope);
-  const context = contextOf(candidates, scope.today);
+  const context = new StudyContext(study.candidates, study);
 
   const nextPapers = sittings.slice(0, NEXT_PAPERS);
-  const weak = weakestTopics(context.topics, candidates);
+  const weak = weakestTopics(context, study.candidates);
   const shownWeak = weakFor(weak, nextPapers).slice(0, WEAK_TOPICS);
   const topics = await loadTopics(shownWeak.map(({ topicId }) => topicId));
-  const sayWhy = whyWords(candidates, subjects, sittings, weak);
+  const sayWhy = whyWords(study.candidates, subjects, sittings, weak);
+  const paperTitles = await loadPaperTitles(study.candidates.flatMap(({ paperId }) => paperId ?? []));
 
-  const todaySet = (kind: SetKind) => {
+  const todaySet = (kind: TodayKind) => {
     const row = sets.find((set) => set.kind === kind);
-    const proposed = row ? [] : proposeSet(scope, kind, candidates, confusable);
-    return presentTodaySet({ kind, row, proposed, subjects, sayWhy });
+    const proposed = row ? [] : proposeSet(scope, { kind }, study, confusable);
+    return presentTodaySet({ kind, row, proposed, subjects, paperTitles, sayWhy });
   };
   return {
     on: scope.today,

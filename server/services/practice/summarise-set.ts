@@ -5,13 +5,14 @@ import type { Scope } from '#server/services/people/load-scope.ts';
 import type { SetSummaryDto } from '#shared/schemas/practice.ts';
 import { bodyMarks } from '#shared/schemas/question-body.ts';
 import { changeSet, findSet } from './find-set.ts';
+import { groupBy } from './group-by.ts';
 import { type LoadedItem, loadSetItems } from './load-set-items.ts';
-import { loadTopicStates } from './load-topic-states.ts';
+import { loadStudy } from './load-study.ts';
 import { loadLog } from './rebuild-memory.ts';
 import { secondsSoFar } from './show-set.ts';
 import { loadSubjects, loadTopics, need } from './study-facts.ts';
 import { NEWEST_MARK } from './study-sql.ts';
-import { groupBy, memoriesBefore, topicChange } from './topic-change.ts';
+import { topicChanges } from './topic-change.ts';
 
 /** Minutes of break after a session, and the longer one after every third of a day. Common practice. */
 const BREAK_MINUTES = 10;
@@ -57,12 +58,12 @@ async function summarise(scope: Scope, set: PracticeSet): Promise<SetSummaryDto>
   const byTopic = groupBy(answered, ({ item }) => item.topic_id);
   const subjects = await loadSubjects();
   const topics = await loadTopics(byTopic.keys());
-  const states = new Map((await loadTopicStates(scope, [...byTopic.keys()])).map((topic) => [topic.id, topic]));
+  const study = await loadStudy(scope);
   const log = await loadLog(
     scope.actor.userId,
     answered.map(({ item }) => item.question_id),
   );
-  const before = memoriesBefore(log, set.id);
+  const changeOf = topicChanges(study, log, set.id);
   return {
     id: set.id,
     kind: set.kind,
@@ -84,7 +85,7 @@ async function summarise(scope: Scope, set: PracticeSet): Promise<SetSummaryDto>
         subject: presentSubject(need(subjects, topic.subjectId)),
         topic: presentTopic(topic),
         ...sumMarks(rows),
-        ...topicChange(states.get(topicId), before, scope),
+        ...changeOf(topicId),
       };
     }),
     breakMinutes: await breakMinutes(scope),

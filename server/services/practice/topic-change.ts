@@ -1,58 +1,59 @@
-import type { Scope } from '#server/services/people/load-scope.ts';
+import { StudyContext, type StudyMoment } from '#shared/domain/schedule/context.ts';
 import { returnOn } from '#shared/domain/schedule/due.ts';
-import { recallPercent, standingOf, type TopicItem, topicRecall } from '#shared/domain/schedule/expected-recall.ts';
-import type { MemoryState } from '#shared/domain/schedule/memory.ts';
+import { type Mastery, recallPercent, standingOf } from '#shared/domain/schedule/mastery.ts';
 import type { SetSummaryDto } from '#shared/schemas/practice.ts';
-import type { TopicStates } from './load-topic-states.ts';
-import { foldAnswers, type LoggedAnswer } from './rebuild-memory.ts';
+import type { Study } from './load-study.ts';
+import { type FoldedState, foldAnswers, type LoggedAnswer } from './rebuild-memory.ts';
+import { byQuestion } from './student-log.ts';
 
 type Change = Pick<SetSummaryDto['topics'][number], 'before' | 'after' | 'returnsOn'>;
 
-/** Rows by key, in the order they come. */
-export function groupBy<T, K>(rows: readonly T[], key: (row: T) => K): Map<K, T[]> {
-  const groups = new Map<K, T[]>();
-  for (const row of rows) {
-    const group = groups.get(key(row));
-    if (group) group.push(row);
-    else groups.set(key(row), [row]);
-  }
-  return groups;
-}
-
-/** Memories as they were before a set: each question's log folded without the set's own answers. */
-export const memoriesBefore = (log: readonly LoggedAnswer[], setId: string): Map<string, MemoryState | null> =>
+/** States as they were before a set: each question's log folded without the set's own answers. */
+const statesBefore = (
+  log: readonly LoggedAnswer[],
+  setId: string,
+  { model }: StudyMoment,
+): Map<string, FoldedState | null> =>
   new Map(
-    [...groupBy(log, (answer) => answer.question_id)].map(([questionId, answers]) => [
+    [...byQuestion(log)].map(([questionId, answers]) => [
       questionId,
-      foldAnswers(answers.filter((answer) => answer.set_id !== setId)),
+      foldAnswers(
+        answers.filter((answer) => answer.set_id !== setId),
+        model,
+      ),
     ]),
   );
 
-function standingIn(items: readonly TopicItem[], today: string): Change['after'] {
-  const { onExamDay } = topicRecall(items, today);
-  return onExamDay === null ? null : { recallOnDay: recallPercent(onExamDay), standing: standingOf(onExamDay) };
+function standingIn(mastery: Mastery | undefined): Change['after'] {
+  return mastery === undefined || mastery.attempted === 0
+    ? null
+    : { recallOnDay: recallPercent(mastery.mean), standing: standingOf(mastery) };
 }
 
 /**
- * How a set changed a topic, by what could be recalled on the day of its paper, and about when the first of its
- * questions comes back. @param before memories of the questions that the set asked, as they were
+ * How a set changed each of its topics, by what could be recalled on the day of its paper, and about when the first of
+ * its questions comes back. @param log the answers to the questions that the set asked, the set's own included
  */
-export function topicChange(
-  topic: TopicStates | undefined,
-  before: ReadonlyMap<string, MemoryState | null>,
-  { today, school }: Scope,
-): Change {
-  if (!topic) return { before: null, after: null, returnsOn: null };
-  const examOn = topic.examOn ?? school.seasonEndsOn;
-  const after: TopicItem[] = topic.states.map((memory) => ({ memory, examOn }));
-  const earlier: TopicItem[] = topic.states.flatMap((memory) => {
-    const was = before.get(memory.questionId);
-    if (was === null) return [];
-    return [{ memory: was ?? memory, examOn }];
+export function topicChanges(
+  { candidates, ...moment }: Study,
+  log: readonly LoggedAnswer[],
+  setId: string,
+): (topicId: string) => Change {
+  const before = statesBefore(log, setId, moment);
+  const earlier = candidates.map((candidate) => {
+    const was = before.get(candidate.questionId);
+    return was === undefined ? candidate : { ...candidate, memory: was, firstGrade: was?.firstGrade ?? null };
   });
-  const returns = topic.states
-    .filter((memory) => before.has(memory.questionId))
-    .flatMap((memory) => returnOn(memory, topic.examOn, today) ?? [])
-    .sort();
-  return { before: standingIn(earlier, today), after: standingIn(after, today), returnsOn: returns[0] ?? null };
+  const [then, now] = [new StudyContext(earlier, moment), new StudyContext(candidates, moment)];
+  return (topicId) => {
+    const asked = candidates.filter(({ topicId: own, questionId }) => own === topicId && before.has(questionId));
+    const returns = asked.flatMap(({ memory, paperId, examOn }) =>
+      memory && examOn !== null ? (returnOn(memory, paperId && examOn, moment.today) ?? []) : [],
+    );
+    return {
+      before: standingIn(then.masteries.get(topicId)),
+      after: standingIn(now.masteries.get(topicId)),
+      returnsOn: returns.sort()[0] ?? null,
+    };
+  };
 }

@@ -1,8 +1,11 @@
 import { select } from '#server/db/scope.ts';
 import { earnedMarks } from '#shared/domain/marking/earned-marks.ts';
+import type { MemoryModel } from '#shared/domain/schedule/memory.ts';
 import type { MarkedPart } from '#shared/schemas/marked-part.ts';
 import { bodyMarks, type QuestionBody } from '#shared/schemas/question-body.ts';
+import { loadModel } from './load-study.ts';
 import { type FoldedState, foldAnswers, type LoggedAnswer, loadLog } from './rebuild-memory.ts';
+import { byQuestion } from './student-log.ts';
 
 /** Something in the database that the log does not bear out. Ids only. */
 export interface LogFault {
@@ -36,7 +39,7 @@ const studentsWithAnswers = () =>
 const storedStates = (userId: string) =>
   select<StateRow>(
     `SELECT question_id, stability, difficulty, to_char(last_on, 'YYYY-MM-DD') AS "lastOn", attempts,
-       last_grade AS "lastGrade", last_share AS "lastShare"
+       first_grade AS "firstGrade", last_grade AS "lastGrade", last_share AS "lastShare"
      FROM memory_states WHERE user_id = $1`,
     [userId],
   );
@@ -54,20 +57,21 @@ const isSame = (a: FoldedState, b: FoldedState): boolean =>
   a.difficulty === b.difficulty &&
   a.lastOn === b.lastOn &&
   a.attempts === b.attempts &&
+  a.firstGrade === b.firstGrade &&
   a.lastGrade === b.lastGrade &&
   a.lastShare === b.lastShare;
 
-function compareStates(userId: string, log: readonly LoggedAnswer[], states: readonly StateRow[]): LogFault[] {
-  const byQuestion = new Map<string, LoggedAnswer[]>();
-  for (const answer of log) {
-    const answers = byQuestion.get(answer.question_id);
-    if (answers) answers.push(answer);
-    else byQuestion.set(answer.question_id, [answer]);
-  }
+function compareStates(
+  userId: string,
+  log: readonly LoggedAnswer[],
+  states: readonly StateRow[],
+  model: MemoryModel,
+): LogFault[] {
+  const logged = byQuestion(log);
   const stored = new Map(states.map((state) => [state.question_id, state]));
   const faults: LogFault[] = [];
-  for (const questionId of new Set([...byQuestion.keys(), ...stored.keys()])) {
-    const folded = foldAnswers(byQuestion.get(questionId) ?? []);
+  for (const questionId of new Set([...logged.keys(), ...stored.keys()])) {
+    const folded = foldAnswers(logged.get(questionId) ?? [], model);
     const state = stored.get(questionId);
     if (folded && !state) faults.push({ userId, questionId, fault: 'log without a state' });
     else if (!folded && state) faults.push({ userId, questionId, fault: 'state without a log' });
@@ -94,10 +98,14 @@ export async function verifyLog(): Promise<LogReport> {
   for (const { user_id: userId } of await studentsWithAnswers()) {
     const log = await loadLog(userId, null);
     const states = await storedStates(userId);
+    const { model } = await loadModel(userId);
     report.students += 1;
     report.answers += log.length;
     report.states += states.length;
-    report.faults.push(...compareStates(userId, log, states), ...compareMarks(userId, await markedAnswers(userId)));
+    report.faults.push(
+      ...compareStates(userId, log, states, model),
+      ...compareMarks(userId, await markedAnswers(userId)),
+    );
   }
   return report;
 }
