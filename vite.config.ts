@@ -7,6 +7,8 @@ const serverEntries = {
   main: 'server/main.ts',
   migrate: 'server/commands/migrate.ts',
   'verify-log': 'server/commands/verify-log.ts',
+  nightly: 'server/commands/nightly.ts',
+  'rebuild-memory': 'server/commands/rebuild-memory.ts',
 };
 
 /** Libraries that every page needs, and the small modules of ours that would each become a file of their own. */

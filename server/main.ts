@@ -7,9 +7,12 @@ import { PatientClient } from './db/patient-client.ts';
 import { sequelize } from './db/sequelize.ts';
 import { keepLimitsPruned } from './http/prune-limits.ts';
 import { createLogger } from './http/request-log.ts';
+import { startJobs } from './jobs/start-jobs.ts';
 
 /** Requests in flight get this long to finish once the process is asked to stop. */
 const DRAIN_MS = 15_000;
+/** Background work in hand gets a little less, to be given back in time. */
+const JOBS_MS = 12_000;
 
 /** Says in a sentence why there is no server: whoever starts it needs that, and no stack trace. */
 function giveUp(error: unknown): never {
@@ -53,6 +56,7 @@ const app = createApp({
 });
 
 const stopPruning = keepLimitsPruned(pool, log);
+const stopJobs = startJobs({ databaseUrl: config.DATABASE_URL, log });
 const server = app.listen(config.PORT, config.HOST, (error) => {
   if (error) {
     log.fatal({ err: error }, `cannot listen on ${config.HOST}:${config.PORT}`);
@@ -65,9 +69,11 @@ async function stop(): Promise<void> {
   if (!isServing) return;
   isServing = false;
   stopPruning();
+  const jobsStopped = stopJobs(JOBS_MS).catch((error) => log.warn({ err: error }, 'background work was cut off'));
   const force = setTimeout(() => server.closeAllConnections(), DRAIN_MS);
   server.close(async () => {
     clearTimeout(force);
+    await jobsStopped;
     await Promise.allSettled([sequelize.close(), pool.end()]);
     process.exit(0);
   });

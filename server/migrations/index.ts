@@ -5,7 +5,21 @@ import { questions } from './2026-12-01-04-questions.ts';
 import { practice } from './2026-12-01-05-practice.ts';
 import { audit } from './2026-12-01-06-audit.ts';
 import { jobs } from './2026-12-01-07-jobs.ts';
+import { scheduler } from './2026-12-01-08-scheduler.ts';
+import { topicMerge } from './2026-12-01-09-topic-merge.ts';
+import { nightlyQueue } from './2026-12-01-10-nightly-queue.ts';
 import type { Migration } from './migration.ts';
 
 /** Every migration in the order it runs. An explicit list survives bundling; a merged file is never edited. */
-export const migrations: Migration[] = [tenancy, people, curriculum, questions, practice, audit, jobs];
+export const migrations: Migration[] = [
+  tenancy,
+  people,
+  curriculum,
+  questions,
+  practice,
+  audit,
+  jobs,
+  scheduler,
+  topicMerge,
+  nightlyQueue,
+];
