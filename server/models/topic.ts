@@ -13,6 +13,8 @@ export class Topic extends Model<InferAttributes<Topic>, InferCreationAttributes
   declare tier: CreationOptional<Tier | null>;
   declare option: CreationOptional<string | null>;
   declare position: number;
+  /** The topic that it was merged into, never itself a merged one; null while it is one of the specification's. */
+  declare mergedIntoId: CreationOptional<string | null>;
 }
 
 Topic.init(
@@ -25,6 +27,7 @@ Topic.init(
     tier: { type: DataTypes.TEXT, allowNull: true },
     option: { type: DataTypes.TEXT, allowNull: true },
     position: required(DataTypes.INTEGER),
+    mergedIntoId: optionalReference(),
   },
   tenantOptions('Topic', 'topics'),
 );

@@ -63,6 +63,10 @@ export const createTopicSchema = z.strictObject({
 });
 export type CreateTopic = z.output<typeof createTopicSchema>;
 
+export const topicParamsSchema = z.object({ id: z.uuid() });
+/** The topic of the same specification that one is merged into. */
+export const mergeTopicSchema = z.strictObject({ intoTopicId: z.uuid('Choose the topic to merge into.') });
+
 export const taughtParamsSchema = z.object({ classId: z.uuid(), topicId: z.uuid() });
 export const setTaughtSchema = z.strictObject({ taughtOn: daySchema.nullable() });
 

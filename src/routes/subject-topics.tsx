@@ -83,7 +83,7 @@ function SpecificationTopics({ subject, specification, topics }: SpecificationTo
   return (
     <section aria-labelledby={specification.id} className="mb-10">
       <div className="mb-2 flex flex-wrap items-end justify-between gap-x-4 gap-y-2">
-        <h2 id={specification.id} className="min-w-0">
+        <h2 id={specification.id} tabIndex={-1} className="min-w-0">
           {specification.name}
         </h2>
         <AddTopic subject={subject} specification={specification} topics={topics} />

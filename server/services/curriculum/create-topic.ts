@@ -82,7 +82,7 @@ export async function createTopic(scope: Scope, subjectId: string, input: Create
   if (stored && isSame(stored, input)) return present(scope, subjectId, id);
   if (stored) throw new Problem(409, 'duplicate', 'Another topic was already saved under this id.');
 
-  const topics = await Topic.findAll({ where: { specificationId }, order: [['position', 'ASC']] });
+  const topics = await Topic.findAll({ where: { specificationId, mergedIntoId: null }, order: [['position', 'ASC']] });
   const papers = await select<{ id: string; marks: number }>(
     'SELECT id, marks FROM papers WHERE specification_id = $1',
     [specificationId],

@@ -23,7 +23,7 @@ const TOPICS = `
                            ORDER BY w.version DESC LIMIT 1) v ON true
              JOIN question_topics x ON x.question_version_id IN (v.id, q.live_version_id)
              WHERE q.subject_id = $1 GROUP BY x.topic_id) c ON c.topic_id = t.id
-  WHERE s.subject_id = $1 AND ($3::uuid IS NULL OR t.id = $3)
+  WHERE s.subject_id = $1 AND t.merged_into_id IS NULL AND ($3::uuid IS NULL OR t.id = $3)
   ORDER BY s.name, s.id, t.position, t.id`;
 
 /**

@@ -1,3 +1,4 @@
+import { Transaction } from 'sequelize';
 import { execute } from '#server/db/scope.ts';
 import { notFound, unprocessable } from '#server/errors.ts';
 import { SchoolClass } from '#server/models/school-class.ts';
@@ -28,7 +29,9 @@ export async function setTaught(
   const schoolClass = await SchoolClass.findByPk(classId, { rejectOnEmpty: notFound() });
   authorize(classPolicy, 'setTaught', actor, { classId, subjectId: schoolClass.subjectId });
   const { specificationId } = schoolClass;
-  await Topic.findOne({ where: { id: topicId, specificationId }, rejectOnEmpty: notFound() });
+  // Held until the date stands, so that a merging of the topic takes the date along.
+  const lock = Transaction.LOCK.SHARE;
+  await Topic.findOne({ where: { id: topicId, specificationId, mergedIntoId: null }, lock, rejectOnEmpty: notFound() });
   if (taughtOn !== null && taughtOn > today) {
     throw unprocessable([{ pointer: '#/taughtOn', detail: 'Choose today or an earlier day.' }]);
   }

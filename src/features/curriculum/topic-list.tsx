@@ -1,38 +1,23 @@
-import type { ReactNode } from 'react';
-import { Link } from 'react-router-dom';
 import type { SubjectDto, TopicDto } from '#shared/schemas/curriculum.ts';
-import { tierWords } from '#src/lib/question-words.ts';
+import { MergeButton } from './merge-button.tsx';
+import { MergeDialog } from './merge-dialog.tsx';
 import { TaughtField } from './taught-field.tsx';
-import { orderTopics, type TopicNode } from './topic-tree.ts';
+import { indent, QuestionCount, Title } from './topic-cells.tsx';
+import { TopicRow } from './topic-row.tsx';
+import { orderTopics } from './topic-tree.ts';
+import { useMerging } from './use-merging.ts';
 
-interface TopicListProps {
+export interface TopicListProps {
   subject: SubjectDto;
   specification: SubjectDto['specifications'][number];
   topics: TopicDto[];
 }
 
-const indent = ['', 'pl-5', 'pl-10', 'pl-14'];
-
-function QuestionCount({ subjectId, topic }: { subjectId: string; topic: TopicDto }) {
-  if (topic.liveQuestions === 0) return <span className="text-ink-2">0</span>;
-  return (
-    <Link className="link" to={`/questions?subject=${subjectId}&topic=${topic.id}&status=live`}>
-      {topic.liveQuestions}
-      <span className="sr-only"> live in {topic.title}</span>
-    </Link>
-  );
-}
-
-const Title = ({ topic }: { topic: TopicDto }): ReactNode => (
-  <>
-    {topic.title} {topic.tier ? <span className="tag">{tierWords[topic.tier]}</span> : null}{' '}
-    {topic.option ? <span className="tag !whitespace-normal">{topic.option}</span> : null}
-  </>
-);
-
 /** The topics of one specification: a table at a desk, a list on a phone. */
 export function TopicList({ subject, specification, topics }: TopicListProps) {
   const nodes = orderTopics(topics);
+  const { from, ask, ...merging } = useMerging(specification.id);
+  const canMerge = subject.can.manageTopics;
   const classes = [
     ...new Map(topics.flatMap((topic) => topic.taught.map((row) => [row.classId, row.className] as const))),
   ];
@@ -59,6 +44,11 @@ export function TopicList({ subject, specification, topics }: TopicListProps) {
               <th scope="col" className="r">
                 Live
               </th>
+              {canMerge ? (
+                <th scope="col" className="w-20">
+                  <span className="sr-only">Merge</span>
+                </th>
+              ) : null}
               {classes.map(([id, name]) => (
                 <th key={id} scope="col" className="w-36">
                   {name}
@@ -69,7 +59,7 @@ export function TopicList({ subject, specification, topics }: TopicListProps) {
           </thead>
           <tbody>
             {nodes.map((node) => (
-              <TopicRow key={node.topic.id} {...{ subject, specification, classes, node }} />
+              <TopicRow key={node.topic.id} {...{ subject, specification, topics, classes, node, ask }} />
             ))}
           </tbody>
         </table>
@@ -93,46 +83,11 @@ export function TopicList({ subject, specification, topics }: TopicListProps) {
                 ))}
               </div>
             ) : null}
+            {canMerge ? <MergeButton {...{ topic, topics, ask }} /> : null}
           </li>
         ))}
       </ul>
+      {from ? <MergeDialog {...{ subject, specification, topics, from, ...merging }} /> : null}
     </>
-  );
-}
-
-interface TopicRowProps extends Pick<TopicListProps, 'subject' | 'specification'> {
-  classes: (readonly [string, string])[];
-  node: TopicNode;
-}
-
-function TopicRow({ subject, specification, classes, node: { topic, depth } }: TopicRowProps) {
-  return (
-    <tr>
-      <td className="text-ink-2">{topic.number}</td>
-      <th
-        scope="row"
-        className={`sticky left-0 z-1 bg-ground !border-b !border-rule !text-ink !text-[.875rem] !align-middle ${depth === 0 ? '' : '!font-normal'}`}
-      >
-        <span className={`block ${indent[Math.min(depth, 3)]}`}>
-          <Title topic={topic} />
-        </span>
-      </th>
-      {specification.papers.map((paper) => (
-        <td key={paper.id} className="r">
-          {topic.weights.find((weight) => weight.paperId === paper.id)?.marks ?? <span className="text-ink-3">–</span>}
-        </td>
-      ))}
-      <td className="r font-bold">
-        <QuestionCount subjectId={subject.id} topic={topic} />
-      </td>
-      {classes.map(([id]) => {
-        const row = topic.taught.find((one) => one.classId === id);
-        return (
-          <td key={id}>
-            {row ? <TaughtField subjectId={subject.id} topic={topic} row={row} hasLabel={false} /> : null}
-          </td>
-        );
-      })}
-    </tr>
   );
 }
