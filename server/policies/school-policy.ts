@@ -9,6 +9,7 @@ export const schoolPolicy = {
   manageTimetable: runs,
   manageTermDates: runs,
   manageUsers: runs,
+  managePracticeSettings: runs,
   readAudit: runs,
   exportRecords: runs,
   eraseRecords: runs,
@@ -17,6 +18,7 @@ export const schoolPolicy = {
   | 'manageTimetable'
   | 'manageTermDates'
   | 'manageUsers'
+  | 'managePracticeSettings'
   | 'readAudit'
   | 'exportRecords'
   | 'eraseRecords',

@@ -1,4 +1,6 @@
 import { hasRole, subjectsAs } from '#server/policies/actor.ts';
+import { estimatePolicy } from '#server/policies/estimate-policy.ts';
+import { schoolPolicy } from '#server/policies/school-policy.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
 import type { MeDto } from '#shared/schemas/auth.ts';
 
@@ -15,6 +17,8 @@ export const presentMe = (scope: Scope, username: string, memberships: MeDto['me
     writeQuestions: subjectsAs(scope.actor, 'teacher', 'headOfDepartment').length > 0,
     reviewQuestions: subjectsAs(scope.actor, 'teacher', 'headOfDepartment').length > 0,
     readItemStatistics: subjectsAs(scope.actor, 'teacher', 'headOfDepartment').length > 0,
+    readEstimates: estimatePolicy.read(scope.actor),
+    manageSchool: schoolPolicy.managePracticeSettings(scope.actor),
   },
   isDemo: scope.school.isDemo,
 });

@@ -2,12 +2,15 @@ import { type Route, route } from '#server/http/registry.ts';
 import { createTopic } from '#server/services/curriculum/create-topic.ts';
 import { listSubjects } from '#server/services/curriculum/list-subjects.ts';
 import { listTopics } from '#server/services/curriculum/list-topics.ts';
+import { mergeTopic } from '#server/services/curriculum/merge-topic.ts';
 import { setTaught } from '#server/services/curriculum/set-taught.ts';
 import {
   createTopicSchema,
+  mergeTopicSchema,
   setTaughtSchema,
   subjectParamsSchema,
   taughtParamsSchema,
+  topicParamsSchema,
 } from '#shared/schemas/curriculum.ts';
 import type { Role } from '#shared/schemas/role.ts';
 
@@ -31,6 +34,14 @@ export const curriculumRoutes: Route[] = [
     body: createTopicSchema,
     status: 201,
     run: (scope, { params, body }) => createTopic(scope, params.subjectId, body),
+  }),
+  route({
+    method: 'post',
+    path: '/topics/:id/merge',
+    access,
+    params: topicParamsSchema,
+    body: mergeTopicSchema,
+    run: (scope, { params, body }) => mergeTopic(scope, params.id, body.intoTopicId),
   }),
   route({
     method: 'put',

@@ -5,6 +5,7 @@ import { contentPolicyRoutes } from './content-policy.ts';
 import { curriculumRoutes } from './curriculum.ts';
 import { practiceRoutes } from './practice.ts';
 import { questionRoutes } from './questions.ts';
+import { schoolRoutes } from './school.ts';
 import { statisticsRoutes } from './statistics.ts';
 
 /** Every route there is. What is not in this list is not mounted, and the tests of rights walk all of it. */
@@ -14,5 +15,6 @@ export const allRoutes = (account: AccountDeps, log: Logger): Route[] => [
   ...practiceRoutes,
   ...curriculumRoutes,
   ...questionRoutes,
+  ...schoolRoutes,
   ...statisticsRoutes,
 ];

@@ -1,7 +1,9 @@
 import { z } from 'zod';
 import { type Route, route } from '#server/http/registry.ts';
+import { chooseForClass } from '#server/services/questions/choose-for-class.ts';
 import { createQuestion } from '#server/services/questions/create-question.ts';
 import { discardDraft } from '#server/services/questions/discard-draft.ts';
+import { listClassQuestions } from '#server/services/questions/list-class-questions.ts';
 import { listQuestions } from '#server/services/questions/list-questions.ts';
 import { listReviews } from '#server/services/questions/list-reviews.ts';
 import { putQuestionLive } from '#server/services/questions/put-question-live.ts';
@@ -11,6 +13,7 @@ import { saveDraft } from '#server/services/questions/save-draft.ts';
 import { sendForReview } from '#server/services/questions/send-for-review.ts';
 import { showQuestion } from '#server/services/questions/show-question.ts';
 import { startVersion } from '#server/services/questions/start-version.ts';
+import { chooseForClassSchema, classQuestionParamsSchema } from '#shared/schemas/class-question.ts';
 import { idParamsSchema, pageQuerySchema } from '#shared/schemas/common.ts';
 import {
   createQuestionSchema,
@@ -104,6 +107,21 @@ export const questionRoutes: Route[] = [
     params,
     body: nothing,
     run: (scope, input) => retireQuestion(scope, input.params.id),
+  }),
+  route({
+    method: 'get',
+    path: '/questions/:id/classes',
+    access,
+    params,
+    run: (scope, input) => listClassQuestions(scope, input.params.id),
+  }),
+  route({
+    method: 'put',
+    path: '/questions/:id/classes/:classId',
+    access,
+    params: classQuestionParamsSchema,
+    body: chooseForClassSchema,
+    run: (scope, input) => chooseForClass(scope, input.params, input.body),
   }),
   route({
     method: 'get',

@@ -63,6 +63,8 @@ export const meSchema = z.object({
     writeQuestions: z.boolean(),
     reviewQuestions: z.boolean(),
     readItemStatistics: z.boolean(),
+    readEstimates: z.boolean(),
+    manageSchool: z.boolean(),
   }),
   isDemo: z.boolean(),
 });

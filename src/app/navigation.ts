@@ -25,6 +25,8 @@ export function placesOf({ can }: Pick<MeDto, 'can'>): Place[] {
   if (can.writeQuestions) places.push({ to: '/subjects', label: can.practise ? 'Specification' : 'Topics' });
   if (can.readItemStatistics) places.push({ to: '/item-statistics', label: 'Item statistics' });
   if (places.length === 0) places.push({ to: '/home', label: 'Home' });
+  if (can.readEstimates) places.push({ to: '/estimates', label: 'Estimates' });
+  if (can.manageSchool) places.push({ to: '/settings/practice', label: 'Settings' });
   return places;
 }
 

@@ -74,6 +74,23 @@ export function Component() {
         <div>
           <p className="max-w-[38rem]">
             {sights.length > 0 ? 'Those pages are not there yet. ' : null}
+            {me.can.manageSchool ? (
+              <>
+                Under{' '}
+                <Link className="link" to="/settings/practice">
+                  Settings
+                </Link>{' '}
+                you choose how many subjects one set mixes.{' '}
+              </>
+            ) : null}
+            {me.can.readEstimates ? (
+              <>
+                <Link className="link" to="/estimates">
+                  Estimates
+                </Link>{' '}
+                shows how far expected recall can be trusted.{' '}
+              </>
+            ) : null}
             You can change your password, and choose light or dark colours under your name at the top right. Nothing
             else waits for you here.
           </p>

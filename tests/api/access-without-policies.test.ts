@@ -30,8 +30,8 @@ describe.each(naming.map((route) => ({ name: nameOf(route), route })))('$name', 
 
   test('another school’s is still as good as none', async () => {
     const elsewhere = await world.things('teacher', 'elsewhere', expectation.status ?? 'live');
-    const { setId, subjectId, classId, questionId } = await world.things('teacher', 'unknown', 'live');
-    const unknown = { ...elsewhere, setId, subjectId, classId, questionId };
+    const { setId, subjectId, classId, topicInAddress, questionId } = await world.things('teacher', 'unknown', 'live');
+    const unknown = { ...elsewhere, setId, subjectId, classId, topicInAddress, questionId };
     const before = await databaseHash();
     for (const who of WHO) {
       const foreign = await ask(world.agents[who], route, expectation, elsewhere);

@@ -39,6 +39,7 @@ const STUDENT: Who[] = ['student'];
 const WORKS: Who[] = ['teacher', 'headOfDepartment', 'multiRole'];
 const LEADS: Who[] = ['headOfDepartment'];
 const TEACHES: Who[] = ['teacher', 'multiRole'];
+const ADMIN: Who[] = ['schoolAdmin'];
 
 const draft = { kind: 'shortAnswer' as const, tier: null, expectedSeconds: 60 };
 const revision = () => ({ body: { revision: 1 } });
@@ -96,6 +97,9 @@ export const EXPECTATIONS: Record<string, Expectation> = {
   },
   'POST /sets/:id/finish': { ...ownSet, request: nothing },
 
+  'GET /school/practice-settings': { passes: { own: ADMIN } },
+  'PUT /school/practice-settings': { request: () => ({ body: { subjectsPerSet: 5 } }), passes: { own: ADMIN } },
+
   'GET /subjects': { passes: { own: WORKS } },
   'GET /subjects/:subjectId/topics': { ...inSubject, names: 'inAddress' },
   'POST /subjects/:subjectId/topics': {
@@ -115,6 +119,17 @@ export const EXPECTATIONS: Record<string, Expectation> = {
     passes: { own: LEADS, other: LEADS },
     refused: { own: TEACHES, other: TEACHES },
     passStatus: 201,
+  },
+  // Into itself: the answer of somebody who was let through, and nothing merged.
+  'POST /topics/:id/merge': {
+    names: 'inAddress',
+    request: ({ topicId, topicInAddress }) => ({
+      path: `/topics/${topicInAddress}/merge`,
+      body: { intoTopicId: topicId },
+    }),
+    passes: { own: LEADS, other: LEADS },
+    refused: { own: TEACHES, other: TEACHES },
+    passStatus: 422,
   },
   'PUT /classes/:classId/topics/:topicId/taught': {
     names: 'inAddress',
@@ -167,7 +182,16 @@ export const EXPECTATIONS: Record<string, Expectation> = {
   },
   'POST /questions/:id/versions': { ...anyQuestion, status: 'live', request: nothing },
   'POST /questions/:id/retire': { ...ownDraft, status: 'live', request: nothing },
+  'GET /questions/:id/classes': { ...anyQuestion, status: 'live' },
+  'PUT /questions/:id/classes/:classId': {
+    names: 'inAddress',
+    status: 'live',
+    request: () => ({ body: { choice: 'set' } }),
+    passes: { own: WORKS, other: LEADS },
+    refused: { other: TEACHES },
+  },
   'GET /review-queue': { passes: { own: WORKS } },
+  'GET /estimates': { passes: { own: ['headOfDepartment', 'headOfYear', 'schoolAdmin', 'multiRole'] } },
   'GET /item-statistics': {
     ...inSubject,
     names: 'inRequest',

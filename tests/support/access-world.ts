@@ -51,6 +51,8 @@ export interface Things {
   specificationId: string;
   classId: string;
   topicId: string;
+  /** The same, where the address alone is in question. */
+  topicInAddress: string;
   questionId: string;
 }
 
@@ -147,6 +149,7 @@ export async function anAccessWorld(app: Express): Promise<AccessWorld> {
     specificationId: subject.specificationId,
     classId,
     topicId: pick(subject.topicIds, 0),
+    topicInAddress: pick(subject.topicIds, 0),
   });
   const places = {
     own: { ...sets.own, ...thing(first, first.classId) },
@@ -163,6 +166,7 @@ export async function anAccessWorld(app: Express): Promise<AccessWorld> {
         setId: randomUUID(),
         subjectId: randomUUID(),
         classId: randomUUID(),
+        topicInAddress: randomUUID(),
         questionId: randomUUID(),
       };
     }

@@ -3,6 +3,7 @@ import { Problem } from '#server/errors.ts';
 import type { Actor, ActorMembership } from '#server/policies/actor.ts';
 import { authorize, type Rule } from '#server/policies/authorize.ts';
 import { classPolicy } from '#server/policies/class-policy.ts';
+import { estimatePolicy } from '#server/policies/estimate-policy.ts';
 import { practicePolicy } from '#server/policies/practice-policy.ts';
 import { type QuestionFacts, questionPolicy } from '#server/policies/question-policy.ts';
 import { schoolPolicy } from '#server/policies/school-policy.ts';
@@ -125,6 +126,7 @@ const ofPractice = rowsOf('practice', practicePolicy);
 const ofSubject = rowsOf('subject', subjectPolicy);
 const ofClass = rowsOf('class', classPolicy);
 const ofQuestion = rowsOf('question', questionPolicy);
+const ofEstimates = rowsOf('estimates', estimatePolicy);
 const ofSchool = rowsOf('school', schoolPolicy);
 
 const seesStanding: Person[] = [
@@ -171,7 +173,11 @@ const table: Row[] = [
     readItemStatistics: inMaths,
     manageTopics: ['head'],
   }),
-  ...ofClass('set 1', { classId: 'maths 1', ...maths }, { read: inMaths, setTaught: ['teacher', 'head'] }),
+  ...ofClass(
+    'set 1',
+    { classId: 'maths 1', ...maths },
+    { read: inMaths, setTaught: ['teacher', 'head'], chooseQuestions: ['teacher', 'head'] },
+  ),
   ...ofQuestion('the teacher’s draft', draft, {
     read: inMaths,
     edit: ['teacher', 'head'],
@@ -218,6 +224,12 @@ const table: Row[] = [
   }),
   ...ofQuestion('retired', retired, { read: inMaths, edit: [], putLive: [], startVersion: inMaths, retire: [] }),
   ...ofQuestion('retired, with a draft', retiredWithDraft, { read: inMaths, startVersion: [], retire: [] }),
+  // Nothing in them is of one student: heads and admins, whatever their subject or year.
+  ...ofEstimates(
+    'the school’s',
+    {},
+    { read: ['head', 'otherHead', 'headElsewhere', 'headOfYear', 'otherHeadOfYear', 'admin'] },
+  ),
   ...ofSchool(
     'ours',
     {},
@@ -226,6 +238,7 @@ const table: Row[] = [
       manageTimetable: ['admin'],
       manageTermDates: ['admin'],
       manageUsers: ['admin'],
+      managePracticeSettings: ['admin'],
       readAudit: ['admin'],
       exportRecords: ['admin'],
       eraseRecords: ['admin'],
@@ -244,6 +257,7 @@ test('the table knows every action of every policy', () => {
     subject: subjectPolicy,
     class: classPolicy,
     question: questionPolicy,
+    estimates: estimatePolicy,
     school: schoolPolicy,
   };
   for (const [noun, policy] of Object.entries(policies)) {

@@ -23,13 +23,14 @@ export async function topicIdsOf(questionVersionId: string): Promise<string[]> {
   return rows.map((row) => row.topicId);
 }
 
-/** Topics as chosen, each once. @throws Problem 422 where one is not of the subject's specifications */
+/** Topics as chosen, each once, none of them merged before the version stands under it. @throws Problem 422 where one is not of the subject's specifications */
 export async function checkTopics(subjectId: string, topicIds: string[]): Promise<string[]> {
   const chosen = [...new Set(topicIds)];
   if (chosen.length === 0) return chosen;
   const known = await select<{ id: string }>(
     `SELECT t.id FROM topics t JOIN specifications s ON s.id = t.specification_id
-     WHERE s.subject_id = $1 AND t.id = ANY($2::uuid[])`,
+     WHERE s.subject_id = $1 AND t.id = ANY($2::uuid[]) AND t.merged_into_id IS NULL
+     FOR SHARE OF t`,
     [subjectId, chosen],
   );
   if (known.length < chosen.length) {

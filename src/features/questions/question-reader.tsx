@@ -8,6 +8,7 @@ import { kindWords, tierWords } from '#src/lib/question-words.ts';
 import { subjectLang, subjectWords } from '#src/lib/subject-words.ts';
 import { useMe } from '#src/queries/me.ts';
 import { questionQuery } from '#src/queries/questions.ts';
+import { ClassChoices } from './class-choices.tsx';
 import { LiveStatistics } from './live-statistics.tsx';
 import { ModelChecks } from './model-checks.tsx';
 import { QuestionActions } from './question-actions.tsx';
@@ -71,6 +72,7 @@ export function QuestionReader({ question, subject }: QuestionReaderProps) {
         <div className="min-w-0">
           <h2 className="sr-only">The question</h2>
           <QuestionSheet body={current.body} kind={current.kind} number={question.number} lang={lang} hasModelAnswers />
+          {question.live ? <ClassChoices question={question} zone={me.school.zone} /> : null}
         </div>
         <aside className="min-w-0 lg:border-l lg:border-rule lg:pl-8">
           <h2 className="border-b border-ink pb-2 !text-[1.25rem]">{can.putLive ? 'Before you decide' : 'About it'}</h2>
