@@ -15,7 +15,7 @@ import { waitingWords } from '#src/features/practice/summary-words.ts';
 import { kept } from '#src/lib/kept.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { useMe } from '#src/queries/me.ts';
-import { summaryQuery } from '#src/queries/practice.ts';
+import { summaryQuery } from '#src/queries/sets.ts';
 
 const arrivalSchema = z.object({ breakEndsAt: z.number() });
 

@@ -5,7 +5,7 @@ import type { SetSummaryDto } from '#shared/schemas/practice.ts';
 import { Runner } from '#src/features/practice/runner.tsx';
 import { queryClient } from '#src/lib/query-client.ts';
 import { useMe } from '#src/queries/me.ts';
-import { finishSet, setQuery } from '#src/queries/practice.ts';
+import { finishSet, setQuery } from '#src/queries/sets.ts';
 
 export async function loader({ params }: LoaderFunctionArgs): Promise<Response | null> {
   const id = params.id ?? '';

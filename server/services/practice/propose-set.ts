@@ -30,10 +30,10 @@ export const proposeSet = (
 ): BuiltItem[] =>
   buildSet({
     ...study,
-    candidates: study.candidates.map((candidate) => ({
-      ...candidate,
-      isTaken: candidate.waitsIn !== null && candidate.waitsIn !== kind,
-    })),
+    // Few wait in another set; the rest go on as they are, because copying a large bank takes as long as scoring it.
+    candidates: study.candidates.map((candidate) =>
+      candidate.waitsIn !== null && candidate.waitsIn !== kind ? { ...candidate, isTaken: true } : candidate,
+    ),
     topicIds,
     budgetSeconds: BUDGET_SECONDS[kind],
     maxSubjects: school.subjectsPerSet,

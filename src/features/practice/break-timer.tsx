@@ -78,9 +78,15 @@ export function BreakTimer({ kind, minutes, endsAt }: BreakTimerProps) {
         <Link className="btn" to="/today">
           Stop here for today
         </Link>
-        <Link className="btn quiet" to={`/set/${kind}?another=1`}>
-          Start another {setKindWords[kind].toLowerCase()}
-        </Link>
+        {kind === 'chosen' ? (
+          <Link className="btn quiet" to="/topics">
+            Choose topics for another set
+          </Link>
+        ) : (
+          <Link className="btn quiet" to={`/set/${kind}?another=1`}>
+            Start another {setKindWords[kind].toLowerCase()}
+          </Link>
+        )}
       </div>
     </aside>
   );

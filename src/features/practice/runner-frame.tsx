@@ -79,7 +79,10 @@ export function RunnerFrame({ state, seconds, headingRef, notes, children }: Run
       <title>{`Question ${place + 1}, ${name.toLowerCase()} – Plait`}</title>
       <header className="px-5 md:px-10 pt-4 md:pt-5 pb-3">
         <div className="max-w-[62rem] mx-auto grid grid-cols-[auto_1fr_auto] md:grid-cols-[1fr_minmax(0,34rem)_1fr] items-center gap-4 md:gap-6">
-          <Link to="/today" className="btn bare !px-0 !min-h-11 min-w-11 !justify-start">
+          <Link
+            to={set.kind === 'chosen' ? '/topics' : '/today'}
+            className="btn bare !px-0 !min-h-11 min-w-11 !justify-start"
+          >
             <X aria-hidden="true" size={20} strokeWidth={1.75} />
             <span className="max-md:sr-only">
               Leave<span className="sr-only"> the set</span>

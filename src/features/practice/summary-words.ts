@@ -3,7 +3,7 @@ import { type SetSummaryDto, type Standing, standingWords } from '#shared/schema
 type Row = SetSummaryDto['topics'][number];
 
 export interface Change extends Pick<Row, 'subject' | 'topic'> {
-  /** "Weak to developing, about 62% on the day". */
+  /** "Weak to developing, about 62% on the day"; without a figure where there is not enough yet. */
   words: string;
   standing: Standing;
 }
@@ -13,15 +13,20 @@ const lower = (standing: Standing): string => standingWords[standing].toLowerCas
 function changeOf({ before, after, subject, topic, maxMarks }: Row): Change | null {
   // Nothing of it is marked yet, so nothing has changed.
   if (!after || maxMarks === 0) return null;
-  const { standing } = after;
-  const about = `about ${after.recallOnDay}% on the day`;
-  const change = (words: string): Change => ({ subject, topic, standing, words: `${words}, ${about}` });
-  if (!before) return change(`First look: ${lower(standing)}`);
-  if (before.standing !== standing) return change(`${standingWords[before.standing]} to ${lower(standing)}`);
-  return standing === 'weak' ? change('Still weak') : null;
+  const { standing, recallOnDay } = after;
+  const change = (words: string): Change => ({ subject, topic, standing, words });
+  if (before?.standing === standing && standing !== 'weak') return null;
+  // Where there is not enough yet, no figure is given.
+  if (standing === 'notEnough') {
+    return change(before ? `${standingWords[before.standing]} to not enough yet` : 'First look: not enough yet');
+  }
+  const about = `about ${recallOnDay}% on the day`;
+  if (!before) return change(`First look: ${lower(standing)}, ${about}`);
+  if (before.standing === standing) return change(`Still weak, ${about}`);
+  return change(`${standingWords[before.standing]} to ${lower(standing)}, ${about}`);
 }
 
-const ORDER: Standing[] = ['secure', 'developing', 'weak', 'notStarted'];
+const ORDER: Standing[] = ['secure', 'developing', 'weak', 'notEnough', 'notStarted'];
 
 /** The topics that moved to another standing, were met for the first time or are still weak, the strongest first. */
 export const changesOf = (rows: Row[]): Change[] =>

@@ -4,7 +4,7 @@ import { isTransient, NetworkError, ProblemError } from '#src/lib/api.ts';
 import { kept, onGoneElsewhere } from '#src/lib/kept.ts';
 import { isSignedOut, noticeSignedOut } from '#src/lib/query-client.ts';
 import { checkSignedInAs } from '#src/queries/me.ts';
-import { handIn, saveSelfMark } from '#src/queries/practice.ts';
+import { handIn, saveSelfMark } from '#src/queries/sets.ts';
 import { AnswerQueue, ageOf, type Waiting } from './answer-queue.ts';
 
 const FIRST_WAIT_MS = 1000;

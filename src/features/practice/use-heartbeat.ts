@@ -1,5 +1,5 @@
 import { useEffect } from 'react';
-import { sendHeartbeat } from '#src/queries/practice.ts';
+import { sendHeartbeat } from '#src/queries/sets.ts';
 
 const EVERY_MS = 5 * 60_000;
 

@@ -32,6 +32,22 @@ function timeWords(set: TodaySetDto, zone: string): string {
   return `about ${durationWords(set.minutes)}${set.status === 'open' ? ' in all' : ''}`;
 }
 
+/** The questions by why they were chosen, for those who ask; of one question it would give the topic away. */
+function Reasons({ set }: { set: TodaySetDto }) {
+  return (
+    <details className="text-sm text-ink-2">
+      <summary className="w-fit py-3 cursor-pointer">Why these questions</summary>
+      <ul className="num">
+        {set.reasons.map(({ words, questions }) => (
+          <li key={words} className="flex gap-2">
+            <b>{questions}</b> {words}
+          </li>
+        ))}
+      </ul>
+    </details>
+  );
+}
+
 function Strands({ set }: { set: TodaySetDto }) {
   const items = ribbonItems(set);
   return (
@@ -117,6 +133,7 @@ export function MixedSetCard({ set, zone, aside }: CardProps) {
           <MarksBadge marks={set.marks} maxMarks={set.maxMarks} />
         ) : null}
       </div>
+      {set.status === 'done' ? null : <Reasons set={set} />}
       <Strands set={set} />
       <div className="flex flex-wrap items-center gap-x-5 gap-y-3 mt-5">
         <Step set={set} />

@@ -1,10 +1,8 @@
 import { useState } from 'react';
 
-const FIRST_ROWS = 12;
-
-/** The first rows of a long group, and the rest on request. */
-export function useShownRows<Row>(rows: Row[]) {
+/** The first rows of a long list, and the rest on request. */
+export function useShownRows<Row>(rows: Row[], first: number) {
   const [isWhole, setIsWhole] = useState(false);
-  const shown = isWhole ? rows : rows.slice(0, FIRST_ROWS);
+  const shown = isWhole ? rows : rows.slice(0, first);
   return { shown, hiddenCount: rows.length - shown.length, showAll: () => setIsWhole(true) };
 }

@@ -29,6 +29,20 @@ test('says what moved, what is new and what is still weak, the strongest first; 
   ]);
 });
 
+test('no figure is given where there is not enough yet to say where a topic stands', () => {
+  const changes = changesOf([
+    row('Respiration', null, { recallOnDay: 55, standing: 'notEnough' }),
+    row('Ecology', { recallOnDay: 50, standing: 'notEnough' }, { recallOnDay: 58, standing: 'notEnough' }),
+    row('Genetics', { recallOnDay: 55, standing: 'notEnough' }, { recallOnDay: 41, standing: 'weak' }),
+    row('Evolution', { recallOnDay: 45, standing: 'weak' }, { recallOnDay: 52, standing: 'notEnough' }),
+  ]);
+  expect(changes.map(({ topic, words }) => `${topic.title}: ${words}`)).toEqual([
+    'Genetics: Not enough yet to weak, about 41% on the day',
+    'Respiration: First look: not enough yet',
+    'Evolution: Weak to not enough yet',
+  ]);
+});
+
 test('answers that wait for their own student are said in words', () => {
   expect(waitingWords(0)).toBeNull();
   expect(waitingWords(1)).toMatch(/^One answer waits for you/);
