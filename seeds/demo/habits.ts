@@ -1,5 +1,5 @@
 import { weekday } from '#shared/domain/time/calendar.ts';
-import type { SetKind } from '#shared/schemas/practice.ts';
+import type { SetKind } from '#shared/schemas/set-kind.ts';
 import { PRACTISED_STUDENT, type Student } from './people.ts';
 import { type Random, randomFor } from './random.ts';
 

@@ -1,5 +1,5 @@
 import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize';
-import type { SetKind } from '#shared/schemas/practice.ts';
+import type { SetKind } from '#shared/schemas/set-kind.ts';
 import { reference, required, tenantColumns, tenantOptions } from './tenant.ts';
 
 /** A session's questions for one student. */

@@ -8,7 +8,8 @@ import { reasonWords } from '#shared/domain/schedule/reason.ts';
 import { daysBetween } from '#shared/domain/time/calendar.ts';
 import type { HowSure } from '#shared/schemas/how-sure.ts';
 import type { MarkedPart } from '#shared/schemas/marked-part.ts';
-import type { AnswerResultDto, MyTopicDto, PaperForecastDto, SetItemDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto, PaperForecastDto } from '#shared/schemas/my-topics.ts';
+import type { AnswerResultDto, SetItemDto } from '#shared/schemas/practice.ts';
 import { bodyMarks, type QuestionBody } from '#shared/schemas/question-body.ts';
 import type { Reason } from '#shared/schemas/reason.ts';
 
@@ -78,7 +79,7 @@ export function presentResult(facts: ResultFacts): AnswerResultDto {
 }
 
 export interface MyTopicFacts {
-  topic: AnswerResultDto['topic'] & { isTaught: boolean };
+  topic: AnswerResultDto['topic'] & { isTaught: boolean; notBefore: string | null };
   subject: SetItemDto['subject'];
   /** Undefined where it has no live question. */
   mastery: Mastery | undefined;
@@ -122,6 +123,7 @@ export function presentMyTopic({
     returnsOn: returns.sort()[0] ?? null,
     nextPaper: paper && { title: paper.title, on: paper.on, daysAway: daysBetween(today, paper.on) },
     isTaught: topic.isTaught,
+    notBefore: topic.isTaught ? null : topic.notBefore,
     canPractise: facts.canPractise,
   };
 }

@@ -1,34 +1,10 @@
 import { z } from 'zod';
 import { daySchema, instantSchema } from './common.ts';
-import { sittingSchema, subjectRefSchema } from './curriculum.ts';
+import { subjectRefSchema } from './curriculum.ts';
 import { howSureSchema } from './how-sure.ts';
 import { markCodeSchema, questionKindSchema } from './question-body.ts';
-
-/** `chosen`: of topics that the student picked, still interleaved. */
-export const setKindSchema = z.enum(['mixed', 'morning', 'chosen']);
-export type SetKind = z.output<typeof setKindSchema>;
-
-export const setKindWords: Record<SetKind, string> = {
-  mixed: 'Mixed set',
-  morning: 'Morning set',
-  chosen: 'Set from chosen topics',
-};
-
-/**
- * Standing of a topic by exam-day recall; `notEnough` where its range is over 50 wide, `notStarted` where nothing was
- * attempted.
- */
-export const standingSchema = z.enum(['secure', 'developing', 'weak', 'notEnough', 'notStarted']);
-export type Standing = z.output<typeof standingSchema>;
-export const standingWords: Record<Standing, string> = {
-  secure: 'Secure',
-  developing: 'Developing',
-  weak: 'Weak',
-  notEnough: 'Not enough yet',
-  notStarted: 'Not started',
-};
-
-export const topicRefSchema = z.object({ id: z.uuid(), number: z.string(), title: z.string() });
+import { MOST_CHOSEN_TOPICS, setKindSchema } from './set-kind.ts';
+import { percentSchema, standingSchema, topicRefSchema } from './standing.ts';
 
 /** A question as the student meets it: no scheme, no topic, nothing to read the answer from. */
 export const askedQuestionSchema = z.object({
@@ -116,9 +92,6 @@ export const setSchema = z.object({
 });
 export type SetDto = z.output<typeof setSchema>;
 
-/** Most topics that one set can be chosen from. */
-export const MOST_CHOSEN_TOPICS = 20;
-
 export const openSetSchema = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.enum(['mixed', 'morning']) }),
   z.strictObject({ kind: z.literal('chosen'), topicIds: z.array(z.uuid()).min(1).max(MOST_CHOSEN_TOPICS) }),
@@ -149,10 +122,6 @@ export const selfMarkSchema = z.strictObject({
   ticks: z.array(z.array(z.boolean()).max(20)).min(1).max(8),
 });
 export type SelfMark = z.output<typeof selfMarkSchema>;
-
-const percentSchema = z.int().min(0).max(100);
-/** What is probably not left, either way: an 80% range. */
-const rangeSchema = z.object({ low: percentSchema, high: percentSchema });
 
 /** A topic by what could be recalled of it on the day of its paper, 0–100: an estimate. */
 const topicStandingSchema = z.object({ recallOnDay: percentSchema, standing: standingSchema });
@@ -197,94 +166,3 @@ export const setSummarySchema = z.object({
   breakMinutes: z.int(),
 });
 export type SetSummaryDto = z.output<typeof setSummarySchema>;
-
-/** A set offered, under way or done on Today. */
-export const todaySetSchema = z.object({
-  kind: setKindSchema,
-  status: z.enum(['ready', 'open', 'done', 'nothing']),
-  setId: z.uuid().nullable(),
-  minutes: z.int(),
-  questions: z.int(),
-  answered: z.int(),
-  /** The strands in the order they will be asked. */
-  strands: z.array(z.object({ subject: subjectRefSchema, isAnswered: z.boolean() })).max(60),
-  /** Why these subjects, in one or two sentences. */
-  sentence: z.string(),
-  /** Why these questions: each reason once, in words, the commonest first. */
-  reasons: z.array(z.object({ words: z.string(), questions: z.int() })).max(60),
-  finishedAt: instantSchema.nullable(),
-  marks: z.int().nullable(),
-  maxMarks: z.int().nullable(),
-});
-export type TodaySetDto = z.output<typeof todaySetSchema>;
-
-const weakTopicSchema = z.object({
-  subject: subjectRefSchema,
-  topic: topicRefSchema,
-  /** Expected recall on the day of its paper, 0–100. */
-  recall: z.int(),
-  standing: standingSchema,
-});
-
-export const todaySchema = z.object({
-  on: daySchema,
-  /** Days to the first sitting still to come; null without sittings. */
-  daysToFirst: z.int().nullable(),
-  nextPapers: z.array(sittingSchema).max(4),
-  mixed: todaySetSchema,
-  morning: todaySetSchema,
-  weakTopics: z.array(weakTopicSchema).max(5),
-});
-export type TodayDto = z.output<typeof todaySchema>;
-
-/** One topic of the student's own, weakest first. */
-export const myTopicSchema = z.object({
-  subject: subjectRefSchema,
-  topic: topicRefSchema,
-  standing: standingSchema,
-  /** Expected recall on the day of its next paper if practice stopped now; null where it is not known well enough. */
-  recallOnDay: percentSchema.nullable(),
-  /** What it is probably within; null where nothing was attempted. */
-  range: rangeSchema.nullable(),
-  attempted: z.int(),
-  questions: z.int(),
-  lastPractisedOn: daySchema.nullable(),
-  returnsOn: daySchema.nullable(),
-  nextPaper: z.object({ title: z.string(), on: daySchema, daysAway: z.int() }).nullable(),
-  isTaught: z.boolean(),
-  /** True where a set of it could be opened now. */
-  canPractise: z.boolean(),
-});
-export type MyTopicDto = z.output<typeof myTopicSchema>;
-
-/** What today's standing would mean in one paper still to sit: an estimate, for the student alone. */
-export const paperForecastSchema = z.object({
-  paperId: z.uuid(),
-  subject: subjectRefSchema,
-  title: z.string(),
-  on: daySchema.nullable(),
-  /** Marks of the whole paper. */
-  marks: z.int(),
-  /** Marks it would probably be within; null where that is not known well enough. */
-  range: z.object({ low: z.int(), high: z.int() }).nullable(),
-});
-export type PaperForecastDto = z.output<typeof paperForecastSchema>;
-
-/** A student's topics and papers: bounded by their subjects. */
-export const myTopicListSchema = z.object({
-  on: daySchema,
-  items: z.array(myTopicSchema).max(1000),
-  papers: z.array(paperForecastSchema).max(200),
-  /** A set of chosen topics opened today and not finished; null where there is none. */
-  openSet: z
-    .object({
-      id: z.uuid(),
-      topicIds: z.array(z.uuid()).max(MOST_CHOSEN_TOPICS),
-      questions: z.int(),
-      answered: z.int(),
-    })
-    .nullable(),
-  /** True where the estimates have lately been too high for this student, so that ranges reach further down. */
-  isTooHopeful: z.boolean(),
-});
-export type MyTopicListDto = z.output<typeof myTopicListSchema>;

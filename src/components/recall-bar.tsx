@@ -1,4 +1,4 @@
-import type { Standing } from '#shared/schemas/practice.ts';
+import type { Standing } from '#shared/schemas/standing.ts';
 
 const COLOURS: Record<Standing, string> = {
   secure: 'var(--accent)',

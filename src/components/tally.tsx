@@ -1,4 +1,4 @@
-import { type Standing, standingWords } from '#shared/schemas/practice.ts';
+import { type Standing, standingWords } from '#shared/schemas/standing.ts';
 
 const STROKES: Record<Standing, number> = { secure: 3, developing: 2, weak: 1, notEnough: 0, notStarted: 0 };
 const COLOURS = ['', 'var(--gap)', 'var(--caution)', 'var(--accent)'];

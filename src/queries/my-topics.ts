@@ -1,5 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
-import { myTopicListSchema } from '#shared/schemas/practice.ts';
+import { myTopicListSchema } from '#shared/schemas/my-topics.ts';
 import { api } from '#src/lib/api.ts';
 import { practiceKeys } from './practice.ts';
 

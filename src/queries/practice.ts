@@ -1,5 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
-import { todaySchema } from '#shared/schemas/practice.ts';
+import { todaySchema } from '#shared/schemas/today.ts';
 import { api } from '#src/lib/api.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 

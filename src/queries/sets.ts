@@ -6,12 +6,11 @@ import {
   type OpenSet,
   type SelfMark,
   type SetDto,
-  type SetKind,
   type SetSummaryDto,
-  setKindSchema,
   setSchema,
   setSummarySchema,
 } from '#shared/schemas/practice.ts';
+import { type SetKind, setKindSchema } from '#shared/schemas/set-kind.ts';
 import { api } from '#src/lib/api.ts';
 import { queryClient } from '#src/lib/query-client.ts';
 import { forgetOverviews, practiceKeys } from './practice.ts';

@@ -1,5 +1,7 @@
 import { Link, type LoaderFunctionArgs, redirect, useLoaderData } from 'react-router-dom';
-import { type OpenSet, openSetSchema, type SetKind, setKindWords, type TodaySetDto } from '#shared/schemas/practice.ts';
+import { type OpenSet, openSetSchema } from '#shared/schemas/practice.ts';
+import { type SetKind, setKindWords } from '#shared/schemas/set-kind.ts';
+import type { TodaySetDto } from '#shared/schemas/today.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { nothingWords } from '#src/features/topics/nothing-words.ts';
 import { ProblemError } from '#src/lib/api.ts';

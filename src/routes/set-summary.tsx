@@ -3,7 +3,7 @@ import { useEffect } from 'react';
 import { Link, type LoaderFunctionArgs, useLocation, useParams } from 'react-router-dom';
 import { z } from 'zod';
 import { dayWords } from '#shared/domain/time/words.ts';
-import { setKindWords } from '#shared/schemas/practice.ts';
+import { setKindWords } from '#shared/schemas/set-kind.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { MarksBadge } from '#src/components/marks-badge.tsx';
 import { BreakTimer } from '#src/features/practice/break-timer.tsx';

@@ -1,7 +1,7 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import type { FormEvent } from 'react';
 import { Link, useNavigate, useSearchParams } from 'react-router-dom';
-import type { MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { ChoiceBar } from '#src/features/topics/choice-bar.tsx';
 import { groupTopics, subjectsAmong } from '#src/features/topics/group-topics.ts';
@@ -34,7 +34,7 @@ function MainStep({ topics, isQuiet }: { topics: MyTopicDto[]; isQuiet: boolean 
 
 /** The student's own topics, weakest first, and what they would mean in the papers. */
 export function Component() {
-  const { on, items, papers, isTooHopeful } = useSuspenseQuery(myTopicsQuery()).data;
+  const { on, items, papers, openSet, isTooHopeful } = useSuspenseQuery(myTopicsQuery()).data;
   const [search] = useSearchParams();
   const navigate = useNavigate();
   const choice = useTopicChoice(items);
@@ -72,6 +72,14 @@ export function Component() {
             <p className="note cau mb-5 max-w-[46rem]">
               Lately you have recalled less than these estimates said, so the ranges reach further down until the
               estimates have caught up. Questions still come when they help most.
+            </p>
+          ) : null}
+          {openSet ? (
+            <p className="note mb-5 max-w-[46rem]">
+              Your set from chosen topics is open, {openSet.answered} of {openSet.questions} answered.{' '}
+              <Link className="link" to={`/sets/${openSet.id}`}>
+                Continue it
+              </Link>
             </p>
           ) : null}
           <SubjectTabs subjects={subjects} chosenId={subject?.id ?? null} />

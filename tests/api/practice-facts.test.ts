@@ -6,7 +6,8 @@ import { execute, select, withSchool } from '#server/db/scope.ts';
 import { loadScope } from '#server/services/people/load-scope.ts';
 import { loadCandidates } from '#server/services/practice/load-candidates.ts';
 import { verifyLog } from '#server/services/practice/verify-log.ts';
-import { type SetDto, setSummarySchema, todaySchema } from '#shared/schemas/practice.ts';
+import { type SetDto, setSummarySchema } from '#shared/schemas/practice.ts';
+import { todaySchema } from '#shared/schemas/today.ts';
 import { signedInAs, testApp } from '#tests/support/app.ts';
 import { anAnswer, itemOf, openSet } from '#tests/support/practise.ts';
 

@@ -5,13 +5,9 @@ import { aStudy, type Study } from '#seeds/factories/study.ts';
 import { withSchool } from '#server/db/scope.ts';
 import { Answer } from '#server/models/answer.ts';
 import { MarkEvent } from '#server/models/mark-event.ts';
-import {
-  answerResultSchema,
-  myTopicListSchema,
-  setSchema,
-  setSummarySchema,
-  todaySchema,
-} from '#shared/schemas/practice.ts';
+import { myTopicListSchema } from '#shared/schemas/my-topics.ts';
+import { answerResultSchema, setSchema, setSummarySchema } from '#shared/schemas/practice.ts';
+import { todaySchema } from '#shared/schemas/today.ts';
 import { browser, signedInAs, testApp } from '#tests/support/app.ts';
 import { countQueries } from '#tests/support/count-queries.ts';
 import { anAnswer, itemOf, openSet } from '#tests/support/practise.ts';

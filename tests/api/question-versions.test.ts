@@ -3,7 +3,7 @@ import { aClass, aTopic, taught } from '#seeds/factories/curriculum.ts';
 import { aStudent, type FactoryPerson } from '#seeds/factories/people.ts';
 import { aQuestion } from '#seeds/factories/question.ts';
 import { topicListSchema } from '#shared/schemas/curriculum.ts';
-import { myTopicListSchema } from '#shared/schemas/practice.ts';
+import { myTopicListSchema } from '#shared/schemas/my-topics.ts';
 import { type QuestionDto, questionPageSchema } from '#shared/schemas/question.ts';
 import { signedInAs, testApp } from '#tests/support/app.ts';
 import { asRole, inSchool, sqlState } from '#tests/support/as-role.ts';

@@ -4,8 +4,8 @@ import { buildSet } from '#shared/domain/schedule/build-set.ts';
 import { secondsOf } from '#shared/domain/schedule/candidate.ts';
 import { type Chosen, type Selection, selectSet } from '#shared/domain/schedule/select.ts';
 import { tieredGain } from '#shared/domain/schedule/value.ts';
-import { setKindSchema } from '#shared/schemas/practice.ts';
 import { reasonSchema } from '#shared/schemas/reason.ts';
+import { setKindSchema } from '#shared/schemas/set-kind.ts';
 import { TODAY } from '#tests/support/a-candidate.ts';
 import { candidateLists, chosenTopics, confusablePairs, moments } from './scheduler-arbitraries.ts';
 

@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest';
 import { StudyContext } from '#shared/domain/schedule/context.ts';
 import { forecastPaper, type PaperFacts } from '#shared/domain/schedule/forecast.ts';
 import { type Mastery, standingOf } from '#shared/domain/schedule/mastery.ts';
-import { standingSchema } from '#shared/schemas/practice.ts';
+import { standingSchema } from '#shared/schemas/standing.ts';
 import { candidateLists, moments } from './scheduler-arbitraries.ts';
 
 const chance = fc.double({ min: 0, max: 1, noNaN: true });

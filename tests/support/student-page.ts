@@ -15,8 +15,11 @@ export async function threeQuestions(): Promise<Study> {
   const study = await aStudy({ subjects: 3, topics: 1, questions: 2 });
   await withSchool(study.school.id, () =>
     execute(
-      `UPDATE questions SET live_version_id = NULL
-       WHERE id IN (SELECT question_id FROM question_versions WHERE kind = 'recallCard')`,
+      `WITH retired AS (
+         UPDATE question_versions SET status = 'retired' WHERE kind = 'recallCard' RETURNING question_id
+       )
+       UPDATE questions SET live_version_id = NULL, retired_at = now()
+       WHERE id IN (SELECT question_id FROM retired)`,
     ),
   );
   return study;

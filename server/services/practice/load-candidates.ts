@@ -3,7 +3,7 @@ import type { Scope } from '#server/services/people/load-scope.ts';
 import type { Candidate } from '#shared/domain/schedule/candidate.ts';
 import { type Grade, gradeOf } from '#shared/domain/schedule/grade.ts';
 import type { HowSure } from '#shared/schemas/how-sure.ts';
-import type { SetKind } from '#shared/schemas/practice.ts';
+import type { SetKind } from '#shared/schemas/set-kind.ts';
 import { MEMORY_COLUMNS, type MemoryRow, memoryOf } from './memory-row.ts';
 import { NEWEST_MARK, STUDY } from './study-sql.ts';
 

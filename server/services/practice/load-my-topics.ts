@@ -6,6 +6,8 @@ import { STUDY } from './study-sql.ts';
 /** One of the student's topics, with questions or without. */
 export interface MyTopic extends TopicFact {
   isTaught: boolean;
+  /** The day on which a class of the student is to be taught it; null where none is set. */
+  notBefore: string | null;
   /** Marks it carries in each paper still to sit, by paper id. */
   marks: Record<string, number>;
 }
@@ -31,6 +33,8 @@ export const loadMyTopics = ({ actor, today, now }: Scope): Promise<MyTopic[]> =
     `WITH ${STUDY}
      SELECT topic.id, topic.number, topic.title, topic.subject_id AS "subjectId",
        bool_or(topic.taught_on IS NOT NULL) AS "isTaught",
+       (SELECT to_char(min(tt.taught_on), 'YYYY-MM-DD') FROM entry JOIN topic_teachings tt ON tt.class_id = entry.class_id
+        WHERE tt.topic_id = topic.id AND tt.taught_on > $2) AS "notBefore",
        coalesce(jsonb_object_agg(ahead.paper_id, ahead.marks) FILTER (WHERE ahead.paper_id IS NOT NULL), '{}') AS marks
      FROM topic
      LEFT JOIN LATERAL (

@@ -1,7 +1,7 @@
 import { select } from '#server/db/scope.ts';
 import type { Scope } from '#server/services/people/load-scope.ts';
 import { type BuiltItem, buildSet } from '#shared/domain/schedule/build-set.ts';
-import type { SetKind } from '#shared/schemas/practice.ts';
+import type { SetKind } from '#shared/schemas/set-kind.ts';
 import type { Study } from './load-study.ts';
 
 /** Seconds of work in a set: a 25-minute session, and fifteen minutes in the morning. */

@@ -1,5 +1,5 @@
-import type { SetKind } from '#shared/schemas/practice.ts';
 import type { Reason } from '#shared/schemas/reason.ts';
+import type { SetKind } from '#shared/schemas/set-kind.ts';
 import { type ConfusablePair, orderSet } from './order.ts';
 import { reasonFor } from './reason-for.ts';
 import { contextFor, type Selection, selectSet } from './select.ts';

@@ -1,4 +1,4 @@
-import type { Standing } from '#shared/schemas/practice.ts';
+import type { Standing } from '#shared/schemas/standing.ts';
 import type { Candidate } from './candidate.ts';
 import type { StudyContext } from './context.ts';
 import { unseenOnDay } from './outlook.ts';

@@ -35,7 +35,7 @@ export function reasonWords(reason: Reason, { topic, paper }: ReasonNames): stri
 /** Rounded to 5, both may read the same; then only where it stands is said. */
 function gainWords({ withoutPercent, withGoPercent }: Extract<Reason, { kind: 'gain' }>): string {
   const [without, withGo] = [roundedPercent(withoutPercent), roundedPercent(withGoPercent)];
-  const before = `Without this go, expect to recall it with a chance of about ${without}% on the day`;
+  const before = `Before this go, about ${without}% on the day of the paper`;
   return withGo > without ? `${before}; after it, about ${withGo}%. An estimate.` : `${before}. An estimate.`;
 }
 
@@ -63,7 +63,7 @@ function reasonLine(reason: Reason, paper: string | null): string {
     case 'weakTopic':
       return 'From your weaker topics';
     case 'gain':
-      return 'Where one go adds most for the day';
+      return 'Where one go adds most by the day of the paper';
     case 'setByTeacher':
       return 'Set by your teacher';
     case 'chosenTopic':

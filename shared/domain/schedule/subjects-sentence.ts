@@ -39,9 +39,9 @@ const MOST_WORDS: Record<Reason['kind'], string> = {
   firstLook: 'Most are questions you have not met yet.',
   paperSoon: 'Most are for a paper this week.',
   weakTopic: 'Most are from your weaker topics.',
-  gain: 'Most are where one go adds most for the day of the paper.',
+  gain: 'Most are where one go adds most by the day of the paper.',
   setByTeacher: 'Most were set by your teachers.',
-  chosenTopic: 'Most are of the topics you chose.',
+  chosenTopic: 'Most are from the topics you chose.',
   due: 'Most are due again.',
 };
 

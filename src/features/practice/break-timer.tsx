@@ -1,6 +1,6 @@
 import { useEffect, useState } from 'react';
 import { Link } from 'react-router-dom';
-import { type SetKind, setKindWords } from '#shared/schemas/practice.ts';
+import { type SetKind, setKindWords } from '#shared/schemas/set-kind.ts';
 
 interface BreakTimerProps {
   kind: SetKind;

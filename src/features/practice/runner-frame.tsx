@@ -1,7 +1,8 @@
 import { X } from 'lucide-react';
 import { type ReactNode, type Ref, useMemo } from 'react';
 import { Link } from 'react-router-dom';
-import { type SetDto, setKindWords } from '#shared/schemas/practice.ts';
+import type { SetDto } from '#shared/schemas/practice.ts';
+import { setKindWords } from '#shared/schemas/set-kind.ts';
 import { type RibbonItem, ribbonSizes } from '#src/components/ribbon-geometry.ts';
 import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { timerWords } from '#src/lib/dates.ts';

@@ -1,4 +1,4 @@
-import { type Standing, standingWords } from '#shared/schemas/practice.ts';
+import { type Standing, standingWords } from '#shared/schemas/standing.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { Tally } from '#src/components/tally.tsx';
 import { type Change, changesOf } from './summary-words.ts';

@@ -1,4 +1,5 @@
-import { type SetSummaryDto, setKindWords } from '#shared/schemas/practice.ts';
+import type { SetSummaryDto } from '#shared/schemas/practice.ts';
+import { setKindWords } from '#shared/schemas/set-kind.ts';
 import { type RibbonItem, ribbonSizes } from '#src/components/ribbon-geometry.ts';
 import { RibbonRows } from '#src/components/ribbon-rows.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';

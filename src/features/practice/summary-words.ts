@@ -1,4 +1,5 @@
-import { type SetSummaryDto, type Standing, standingWords } from '#shared/schemas/practice.ts';
+import type { SetSummaryDto } from '#shared/schemas/practice.ts';
+import { type Standing, standingWords } from '#shared/schemas/standing.ts';
 
 type Row = SetSummaryDto['topics'][number];
 

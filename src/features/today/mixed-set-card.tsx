@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { durationWords } from '#shared/domain/time/words.ts';
-import type { TodaySetDto } from '#shared/schemas/practice.ts';
+import type { TodaySetDto } from '#shared/schemas/today.ts';
 import { EmptyState } from '#src/components/empty-state.tsx';
 import { MarksBadge } from '#src/components/marks-badge.tsx';
 import { ribbonSizes } from '#src/components/ribbon-geometry.ts';

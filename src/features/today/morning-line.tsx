@@ -1,5 +1,5 @@
 import { Link } from 'react-router-dom';
-import type { TodaySetDto } from '#shared/schemas/practice.ts';
+import type { TodaySetDto } from '#shared/schemas/today.ts';
 import { Tick } from '#src/components/tick.tsx';
 import { clockWords } from '#src/lib/dates.ts';
 

@@ -1,6 +1,6 @@
 import { Link } from 'react-router-dom';
 import { durationWords } from '#shared/domain/time/words.ts';
-import type { TodaySetDto } from '#shared/schemas/practice.ts';
+import type { TodaySetDto } from '#shared/schemas/today.ts';
 import { Ribbon } from '#src/components/ribbon.tsx';
 import { ribbonSizes } from '#src/components/ribbon-geometry.ts';
 import { ribbonItems } from './ribbon-items.ts';

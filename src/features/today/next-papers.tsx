@@ -1,5 +1,5 @@
 import { dayTimeWords, durationWords } from '#shared/domain/time/words.ts';
-import type { TodayDto } from '#shared/schemas/practice.ts';
+import type { TodayDto } from '#shared/schemas/today.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 
 type Sitting = TodayDto['nextPapers'][number];

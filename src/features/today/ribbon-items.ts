@@ -1,4 +1,4 @@
-import type { TodaySetDto } from '#shared/schemas/practice.ts';
+import type { TodaySetDto } from '#shared/schemas/today.ts';
 import type { RibbonItem } from '#src/components/ribbon-geometry.ts';
 
 type Subject = TodaySetDto['strands'][number]['subject'];

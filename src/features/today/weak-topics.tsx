@@ -1,5 +1,5 @@
 import { Link } from 'react-router-dom';
-import type { TodayDto } from '#shared/schemas/practice.ts';
+import type { TodayDto } from '#shared/schemas/today.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { Tally } from '#src/components/tally.tsx';
 

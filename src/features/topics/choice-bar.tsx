@@ -1,4 +1,4 @@
-import { MOST_CHOSEN_TOPICS } from '#shared/schemas/practice.ts';
+import { MOST_CHOSEN_TOPICS } from '#shared/schemas/set-kind.ts';
 import { mixWords, topicCount } from './topic-words.ts';
 import type { TopicChoice } from './use-topic-choice.ts';
 

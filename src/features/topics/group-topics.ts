@@ -1,4 +1,5 @@
-import type { MyTopicDto, Standing } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
+import type { Standing } from '#shared/schemas/standing.ts';
 
 export interface TopicGroup {
   standing: Standing;

@@ -1,4 +1,4 @@
-import type { MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
 
 /** Why no set could be opened of some topics, undefined where not the student's own, and when it can be. */
 export function nothingWords(chosen: (MyTopicDto | undefined)[]): string {

@@ -1,5 +1,5 @@
 import { dayWords } from '#shared/domain/time/words.ts';
-import type { PaperForecastDto } from '#shared/schemas/practice.ts';
+import type { PaperForecastDto } from '#shared/schemas/my-topics.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { MarksBar } from './marks-bar.tsx';
 import { likelyWord, marksWords } from './topic-words.ts';

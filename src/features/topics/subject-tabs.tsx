@@ -1,5 +1,5 @@
 import { Link } from 'react-router-dom';
-import type { MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 
 interface SubjectTabsProps {

@@ -1,4 +1,4 @@
-import type { MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
 import { dayMonthWords, returnWords } from '#src/lib/dates.ts';
 import { rangeWords } from './topic-words.ts';
 
@@ -24,7 +24,13 @@ export function RecallRange({ range }: { range: MyTopicDto['range'] }) {
 
 /** When it comes back; what is due stands out. */
 export function ComesBack({ topic, today }: { topic: MyTopicDto; today: string }) {
-  if (!topic.isTaught) return <span className="text-ink-2">Not taught yet</span>;
+  if (!topic.isTaught) {
+    return (
+      <span className="text-ink-2">
+        {topic.notBefore ? `Not before ${returnWords(topic.notBefore, today)}` : 'Not taught yet'}
+      </span>
+    );
+  }
   if (!topic.returnsOn)
     return <span className="text-ink-2">{topic.questions === 0 ? 'No questions yet' : 'In a coming set'}</span>;
   const words = returnWords(topic.returnsOn, today);

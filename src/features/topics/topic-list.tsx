@@ -1,4 +1,5 @@
-import { type MyTopicDto, standingWords } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
+import { standingWords } from '#shared/schemas/standing.ts';
 import { RecallBar } from '#src/components/recall-bar.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { Tally } from '#src/components/tally.tsx';

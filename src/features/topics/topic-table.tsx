@@ -1,4 +1,4 @@
-import { standingWords } from '#shared/schemas/practice.ts';
+import { standingWords } from '#shared/schemas/standing.ts';
 import { RecallBar } from '#src/components/recall-bar.tsx';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { Tally } from '#src/components/tally.tsx';

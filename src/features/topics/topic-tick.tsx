@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import type { MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
 import type { TopicChoice } from './use-topic-choice.ts';
 
 interface TopicTickProps {

@@ -1,4 +1,6 @@
-import { MOST_CHOSEN_TOPICS, type MyTopicDto, type PaperForecastDto, type Standing } from '#shared/schemas/practice.ts';
+import type { MyTopicDto, PaperForecastDto } from '#shared/schemas/my-topics.ts';
+import { MOST_CHOSEN_TOPICS } from '#shared/schemas/set-kind.ts';
+import type { Standing } from '#shared/schemas/standing.ts';
 
 /** What puts a topic into the group of its standing. */
 export const groupMeaning: Record<Standing, string> = {

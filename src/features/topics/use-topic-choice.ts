@@ -1,5 +1,6 @@
 import { useState } from 'react';
-import { MOST_CHOSEN_TOPICS, type MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
+import { MOST_CHOSEN_TOPICS } from '#shared/schemas/set-kind.ts';
 
 export interface TopicChoice {
   /** Topics ticked that can be practised now. */

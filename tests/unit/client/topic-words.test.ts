@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest';
-import { MOST_CHOSEN_TOPICS, type MyTopicDto } from '#shared/schemas/practice.ts';
+import type { MyTopicDto } from '#shared/schemas/my-topics.ts';
+import { MOST_CHOSEN_TOPICS } from '#shared/schemas/set-kind.ts';
 import { groupTopics } from '#src/features/topics/group-topics.ts';
 import { nothingWords } from '#src/features/topics/nothing-words.ts';
 import { chosenSetPath, marksWords, mixWords, rangeWords, weakStep } from '#src/features/topics/topic-words.ts';
@@ -16,6 +17,7 @@ const topic = (id: string, values: Partial<MyTopicDto> = {}): MyTopicDto => ({
   returnsOn: '2027-04-20',
   nextPaper: null,
   isTaught: true,
+  notBefore: null,
   canPractise: true,
   ...values,
 });
