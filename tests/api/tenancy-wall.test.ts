@@ -9,7 +9,7 @@ import { aFullSchool } from '#tests/support/full-school.ts';
 
 const app = testApp();
 const REFUSED = '42501';
-const LOGS = ['answers', 'audit', 'mark_events', 'set_items'];
+const LOGS = ['answers', 'audit', 'mark_events', 'memory_models', 'set_items'];
 
 const tenantTables = (
   await allRows<{ name: string }>(

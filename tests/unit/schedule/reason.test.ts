@@ -16,11 +16,11 @@ test.each<[Reason, string]>([
   [{ kind: 'weakTopic' }, 'Osmosis is one of your weaker topics.'],
   [
     { kind: 'gain', withoutPercent: 43, withGoPercent: 88 },
-    'Without this go, expect to recall it with a chance of about 45% on the day; after it, about 90%. An estimate.',
+    'Before this go, about 45% on the day of the paper; after it, about 90%. An estimate.',
   ],
   [
     { kind: 'gain', withoutPercent: 83, withGoPercent: 87 },
-    'Without this go, expect to recall it with a chance of about 85% on the day. An estimate.',
+    'Before this go, about 85% on the day of the paper. An estimate.',
   ],
   [{ kind: 'setByTeacher' }, 'Your teacher set this one.'],
   [{ kind: 'chosenTopic' }, 'You chose to practise Osmosis.'],
@@ -98,10 +98,10 @@ describe('the sentence on Today', () => {
   test('says what most of the questions were chosen for, where one reason holds for more than half', () => {
     const subjects = [line('Biology', 2, 3), line('Chemistry', 2, 4)];
     expect(subjectsSentence(subjects, ['gain', 'gain', 'gain', 'firstLook'])).toBe(
-      '4 questions from 2 subjects. Most are where one go adds most for the day of the paper.',
+      '4 questions from 2 subjects. Most are where one go adds most by the day of the paper.',
     );
     expect(subjectsSentence(subjects, ['chosenTopic', 'setByTeacher', 'chosenTopic'])).toBe(
-      '4 questions from 2 subjects. Most are of the topics you chose.',
+      '4 questions from 2 subjects. Most are from the topics you chose.',
     );
     expect(subjectsSentence(subjects, ['gain', 'gain', 'firstLook', 'firstLook'])).toBe('4 questions from 2 subjects.');
   });
