@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { describe, expect, test } from 'vitest';
+import { aMemory } from '#seeds/factories/answer.ts';
 import { aSitting } from '#seeds/factories/curriculum.ts';
 import { aStudy, type Study } from '#seeds/factories/study.ts';
 import { execute, select, withSchool } from '#server/db/scope.ts';
@@ -13,17 +14,19 @@ import { anAnswer, itemOf, openSet } from '#tests/support/practise.ts';
 
 const app = testApp();
 
-/** What the student could be asked at a moment. */
-const candidatesAt = (study: Study, now: Date) =>
+/** What the student could be asked at a moment, and until when it is worth practising. */
+const loadedAt = (study: Study, now: Date) =>
   withSchool(
     study.school.id,
     async (school) => {
       const scope = await loadScope(school, study.student.id);
       if (!scope) throw new Error('the student cannot be loaded');
-      return (await loadCandidates(scope)).candidates;
+      return loadCandidates(scope);
     },
     { now },
   );
+
+const candidatesAt = async (study: Study, now: Date) => (await loadedAt(study, now)).candidates;
 
 const first = (study: Study) => {
   const [subject] = study.subjects;
@@ -59,6 +62,31 @@ describe('what is still to be examined', () => {
     const [mock] = await candidatesAt(study, new Date('2027-01-05T12:00:00Z'));
     const [summer] = await candidatesAt(study, new Date('2027-01-12T12:00:00Z'));
     expect([mock?.examOn, summer?.examOn]).toEqual(['2027-01-11', '2027-06-01']);
+  });
+});
+
+describe('the last day worth practising', () => {
+  const now = new Date('2027-05-01T12:00:00Z');
+
+  /** Two subjects, each question with a memory of last month, which says nothing of the future. */
+  async function twoPapers(): Promise<Study> {
+    const study = await aStudy({ subjects: 2, topics: 1, questions: 2 });
+    await aSitting(study.school, first(study), { on: '2027-06-01' });
+    for (const { questionId } of await candidatesAt(study, now)) {
+      await aMemory(study.school, study.student, questionId, { stability: 9, lastOn: '2027-04-02' });
+    }
+    return study;
+  }
+
+  test('is the last sitting still to come', async () => {
+    const study = await twoPapers();
+    const [, second] = study.subjects;
+    if (second) await aSitting(study.school, second, { on: '2027-06-18' });
+    expect((await loadedAt(study, now)).lastStudyOn).toBe('2027-06-18');
+  });
+
+  test('is the season’s end while a paper has no sitting', async () => {
+    expect((await loadedAt(await twoPapers(), now)).lastStudyOn).toBe('2099-06-30');
   });
 });
 

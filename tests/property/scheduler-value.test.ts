@@ -3,7 +3,7 @@ import { expect, test } from 'vitest';
 import type { Candidate } from '#shared/domain/schedule/candidate.ts';
 import { StudyContext } from '#shared/domain/schedule/context.ts';
 import { gainOf } from '#shared/domain/schedule/outlook.ts';
-import { tieredGain } from '#shared/domain/schedule/value.ts';
+import { outlookOf, tieredGain } from '#shared/domain/schedule/value.ts';
 import { candidateLists, moments } from './scheduler-arbitraries.ts';
 
 // Invariant of the scheduling specification, section 8.
@@ -25,10 +25,10 @@ test('halving the seconds or doubling the weight never lowers a question within 
       const standing = (candidates: readonly Candidate[]) => {
         const context = new StudyContext(candidates, moment);
         const values = candidates.map((candidate) => tieredGain(candidate, context));
-        const mine = values[index];
-        if (!mine) throw new Error('It is in the list');
+        const [own, mine] = [candidates[index], values[index]];
+        if (!own || !mine) throw new Error('It is in the list');
         const rank = values.filter(({ tier, score }) => tier === mine.tier && score > mine.score).length;
-        return { tier: mine.tier, gain: gainOf(mine.outlook), rank };
+        return { tier: mine.tier, gain: gainOf(outlookOf(own, context)), rank };
       };
       const [before, after] = [standing(list), standing(changed)];
       expect(after.tier).toBe(before.tier);

@@ -7,7 +7,6 @@ import { aCandidate, MOMENT } from '#tests/support/a-candidate.ts';
 const byWeight: ValueFunction = ({ topicWeight }) => ({
   tier: topicWeight >= 10 ? 1 : 2,
   score: topicWeight,
-  outlook: { today: 0.5, without: 0.5, withGo: 0.5 },
 });
 
 /** Chooses 300 seconds from at most four subjects by the weights of the candidates. */

@@ -4,7 +4,7 @@ import { type ConfusablePair, orderSet } from './order.ts';
 import { reasonFor } from './reason-for.ts';
 import { contextFor, type Selection, selectSet } from './select.ts';
 import type { Prior } from './unseen.ts';
-import { tieredGain } from './value.ts';
+import { outlookOf, tieredGain } from './value.ts';
 
 /** All live questions the student is entered for, those answered today included, and how a set is made of them. */
 export interface SetRequest extends Selection {
@@ -30,7 +30,7 @@ export function buildSet({ mode, confusable, ...selection }: SetRequest): BuiltI
   const context = contextFor(selection);
   const chosen = selectSet(selection, tieredGain, context).map((choice, priority) => {
     const { questionId, topicId, subjectId } = choice.candidate;
-    return { choice, questionId, topicId, subjectId, recall: choice.outlook.today, priority };
+    return { choice, questionId, topicId, subjectId, recall: outlookOf(choice.candidate, context).today, priority };
   });
   const ordered = orderSet(chosen, mode === 'morning' ? 'hardestFirst' : 'normal', confusable);
   return ordered.map(({ choice, questionId, topicId, subjectId }, index) => ({

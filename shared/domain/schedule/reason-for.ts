@@ -2,13 +2,13 @@ import type { Reason } from '#shared/schemas/reason.ts';
 import type { StudyContext } from './context.ts';
 import { recallPercent } from './mastery.ts';
 import type { Chosen } from './select.ts';
-import { isBarelyFormed } from './value.ts';
+import { isBarelyFormed, outlookOf } from './value.ts';
 
 /** A paper that is this near is the reason itself. */
 const SOON_DAYS = 7;
 
 /** Why a question was chosen: the first reason that holds. Source: scheduling specification, section 4. */
-export function reasonFor({ candidate, tier, outlook, isOfChosenTopic }: Chosen, context: StudyContext): Reason {
+export function reasonFor({ candidate, tier, isOfChosenTopic }: Chosen, context: StudyContext): Reason {
   const { memory, paperId, topicId, topicMarks, lastWasBelowHalf } = candidate;
   if (tier === 0) return { kind: 'setByTeacher' };
   if (isOfChosenTopic) return { kind: 'chosenTopic' };
@@ -20,6 +20,7 @@ export function reasonFor({ candidate, tier, outlook, isOfChosenTopic }: Chosen,
   if (memory === null) return { kind: 'firstLook', topicMarks: Math.round(topicMarks) };
   if (days <= SOON_DAYS) return { kind: 'paperSoon', paperId, days };
   if (context.weakerTopicIds.has(topicId)) return { kind: 'weakTopic' };
+  const outlook = outlookOf(candidate, context);
   return {
     kind: 'gain',
     withoutPercent: recallPercent(outlook.without),

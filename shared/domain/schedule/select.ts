@@ -3,9 +3,8 @@ import { compareText } from './compare-text.ts';
 import { StudyContext, type StudyMoment } from './context.ts';
 import { fillBudget, type Queue } from './fill-budget.ts';
 import { inOrder } from './in-order.ts';
-import type { Outlook } from './outlook.ts';
 import { groupBySubject } from './subjects.ts';
-import { outlookOf, type ValueFunction } from './value.ts';
+import type { ValueFunction } from './value.ts';
 
 export interface Selection extends StudyMoment {
   candidates: readonly Candidate[];
@@ -23,7 +22,6 @@ export interface Chosen {
   /** 0: set by a teacher. 1: now or never, or barely formed. 2: the rest. */
   tier: 0 | 1 | 2;
   score: number;
-  outlook: Outlook;
   /** Expected seconds within the scheduler's bounds. */
   seconds: number;
   /** True where the student chose its topic. */
@@ -46,12 +44,11 @@ export function selectSet(selection: Selection, value: ValueFunction, context = 
   for (const candidate of candidates) {
     const seconds = secondsOf(candidate);
     if (seconds > until + OVERSHOOT_SECONDS || !canBeAsked(candidate, context)) continue;
-    const { tier, score, outlook } = value(candidate, context);
+    const { tier, score } = value(candidate, context);
     scored.push({
       candidate,
       tier: candidate.isSet ? 0 : tier,
       score,
-      outlook,
       seconds,
       isOfChosenTopic: chosenTopics.has(candidate.topicId),
     });
@@ -95,7 +92,6 @@ function missedToday(candidates: readonly Candidate[], context: StudyContext): C
       candidate,
       tier: 1,
       score: 0,
-      outlook: outlookOf(candidate, context),
       seconds: secondsOf(candidate),
       isOfChosenTopic: false,
     }));

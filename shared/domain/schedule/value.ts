@@ -9,7 +9,6 @@ export interface Value {
   tier: 1 | 2;
   /** Higher is chosen first within a tier. */
   score: number;
-  outlook: Outlook;
 }
 
 /** A way to value questions: the product's own, and those it is compared with. */
@@ -38,11 +37,9 @@ export function outlookOf(candidate: Candidate, context: StudyContext): Outlook 
  */
 export const tieredGain: ValueFunction = (candidate, context) => {
   const lastChance = context.daysToLastChance(context.daysToExam(candidate));
-  const outlook = outlookOf(candidate, context);
-  const perSecond = (context.weight(candidate) / secondsOf(candidate)) * gainOf(outlook);
+  const perSecond = (context.weight(candidate) / secondsOf(candidate)) * gainOf(outlookOf(candidate, context));
   return {
     tier: lastChance === 1 || isBarelyFormed(candidate) ? 1 : 2,
     score: (perSecond * NEARNESS_DAYS) / (lastChance + NEARNESS_DAYS),
-    outlook,
   };
 };

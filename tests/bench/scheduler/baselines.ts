@@ -6,7 +6,6 @@ import type { Policy, Rules } from './policy.ts';
 import { uniform } from './random.ts';
 import type { Season } from './simulate.ts';
 
-const NO_OUTLOOK: Outlook = { today: 0, without: 0, withGo: 0 };
 const RANDOM = 50;
 /** Days in which the nearest paper is crammed. */
 const CRAM_DAYS = 7;
@@ -15,7 +14,7 @@ const LADDER = [1, 3, 7, 14, 30];
 /** Further than any number of days. */
 const FAR = 10_000;
 
-const ranked = (tier: 1 | 2, score: number): Value => ({ tier, score, outlook: NO_OUTLOOK });
+const ranked = (tier: 1 | 2, score: number): Value => ({ tier, score });
 
 /** Overdue first, the longest due before the rest; then new items, the nearest paper first; then what is due soonest. */
 function byDue(daysToDue: number | null, candidate: Candidate, context: StudyContext): Value {
@@ -40,10 +39,8 @@ const lowestRecall: ValueFunction = (candidate, context) => ranked(2, 1 - outloo
 export const gainPerSecond = (candidate: Candidate, context: StudyContext, outlook: Outlook): number =>
   (context.weight(candidate) / secondsOf(candidate)) * gainOf(outlook);
 
-const greedy: ValueFunction = (candidate, context) => {
-  const outlook = outlookOf(candidate, context);
-  return { tier: 2, score: gainPerSecond(candidate, context, outlook), outlook };
-};
+const greedy: ValueFunction = (candidate, context) =>
+  ranked(2, gainPerSecond(candidate, context, outlookOf(candidate, context)));
 
 const nearGreedy: ValueFunction = (candidate, context) => {
   const { score, ...rest } = greedy(candidate, context);

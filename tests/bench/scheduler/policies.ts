@@ -60,7 +60,7 @@ function knowing(season: Season): Rules {
     const outlook = outlookOf(item, days);
     const isBarelyFormed = candidate.memory !== null && (learner.memory(item)?.stability ?? 1) < 1;
     const perSecond = (context.weight(candidate) / secondsOf(candidate)) * gainOf(outlook);
-    return { tier: lastChance === 1 || isBarelyFormed ? 1 : 2, score: (perSecond * 5) / (lastChance + 5), outlook };
+    return { tier: lastChance === 1 || isBarelyFormed ? 1 : 2, score: (perSecond * 5) / (lastChance + 5) };
   };
   return { value };
 }

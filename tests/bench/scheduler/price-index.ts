@@ -2,7 +2,7 @@ import { default_w } from 'ts-fsrs';
 import { secondsOf } from '#shared/domain/schedule/candidate.ts';
 import { DEFAULT_MODEL, type Memory } from '#shared/domain/schedule/memory.ts';
 import { firstMemory, type Prior } from '#shared/domain/schedule/unseen.ts';
-import { outlookOf, type ValueFunction } from '#shared/domain/schedule/value.ts';
+import type { ValueFunction } from '#shared/domain/schedule/value.ts';
 import { Fsrs } from './fsrs.ts';
 import { Lattice } from './lattice.ts';
 import { type Branch, PRICES, Programme } from './programme.ts';
@@ -119,5 +119,5 @@ export const indexPerSecond =
       ? index.attempted(memory, context.elapsed(memory.lastOn), left)
       : index.unseen(context.prior(candidate), left);
     const score = (context.weight(candidate) / secondsOf(candidate)) * price;
-    return { tier: 2, score, outlook: outlookOf(candidate, context) };
+    return { tier: 2, score };
   };

@@ -3,8 +3,8 @@ import { loadScope, type Scope } from '#server/services/people/load-scope.ts';
 import { CANDIDATES } from '#server/services/practice/load-candidates.ts';
 import { loadStudy } from '#server/services/practice/load-study.ts';
 import { loadConfusable, proposeSet } from '#server/services/practice/propose-set.ts';
-import { type Spread, spreadOf } from './figures.ts';
-import { cpuOf, heapOf, inTurns } from './stopwatch.ts';
+import type { Spread } from './figures.ts';
+import { cpuOf, heapOf, timesOf } from './stopwatch.ts';
 
 /** One size's figures. Times in milliseconds, memory in megabytes. */
 export interface BuildFigures {
@@ -35,26 +35,37 @@ const queryAlone = ({ actor, today, now }: Scope): Promise<unknown> => select(CA
 const build = async (scope: Scope): Promise<unknown> =>
   proposeSet(scope, { kind: 'mixed' }, await loadStudy(scope), await loadConfusable());
 
-/** Builds a student's mixed set over and over. */
-export async function measureBuild(schoolId: string, studentId: string, runs: number): Promise<BuildFigures> {
-  const bare = () => asStudent(schoolId, studentId, queryAlone);
-  const whole = () => asStudent(schoolId, studentId, build);
-  const [queries, sets] = await inTurns(runs, bare, whole);
-  const heap = await heapOf(whole);
+/** A student with a bank of some size. */
+export interface Learner {
+  schoolId: string;
+  studentId: string;
+}
 
+/** Scoring and ordering, over and over, of questions loaded once. */
+async function measureScoring({ schoolId, studentId }: Learner) {
   const { school, study, confusable } = await asStudent(schoolId, studentId, async (scope) => ({
     school: scope.school,
     study: await loadStudy(scope),
     confusable: await loadConfusable(),
   }));
   const propose = () => proposeSet({ school }, { kind: 'mixed' }, study, confusable);
-  return {
-    questions: study.candidates.length,
-    items: propose().length,
-    query: spreadOf(queries),
-    set: spreadOf(sets),
-    cpu: spreadOf(cpuOf(propose)),
-    heap: spreadOf(heap.grown),
-    heapLeft: heap.left,
-  };
+  return { questions: study.candidates.length, items: propose().length, cpu: cpuOf(propose) };
+}
+
+/** Builds the students' mixed sets over and over, all sizes in turns. @returns figures in the students' order */
+export async function measureBuilds(learners: readonly Learner[], runs: number): Promise<BuildFigures[]> {
+  const as =
+    (work: (scope: Scope) => Promise<unknown>) =>
+    ({ schoolId, studentId }: Learner) =>
+    () =>
+      asStudent(schoolId, studentId, work);
+  const times = await timesOf(runs, learners.map(as(queryAlone)), learners.map(as(build)));
+  const figures: BuildFigures[] = [];
+  for (const [index, learner] of learners.entries()) {
+    const [query, set] = times[index] ?? [];
+    if (!query || !set) throw new Error('a size was not measured');
+    const { grown: heap, left: heapLeft } = await heapOf(() => as(build)(learner)());
+    figures.push({ ...(await measureScoring(learner)), query, set, heap, heapLeft });
+  }
+  return figures;
 }

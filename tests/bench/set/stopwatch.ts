@@ -1,5 +1,6 @@
 import { setFlagsFromString } from 'node:v8';
 import { runInNewContext } from 'node:vm';
+import { type Spread, spreadOf } from './figures.ts';
 
 /** The first runs are left out: the compiler is still at work. */
 const WARM_UP = 20;
@@ -20,32 +21,42 @@ async function timeOf(work: Work): Promise<number> {
   return performance.now() - start;
 }
 
-/** Two works in turns, so that whatever else the machine does falls on both. @returns milliseconds of each run */
-export async function inTurns(runs: number, one: Work, other: Work): Promise<[number[], number[]]> {
-  const times: [number[], number[]] = [[], []];
+/**
+ * Milliseconds that works take, two of each size, all in turns: whatever else the machine does falls on all alike.
+ * @returns both spreads of each size
+ */
+export async function timesOf(
+  runs: number,
+  ones: readonly Work[],
+  others: readonly Work[],
+): Promise<[one: Spread | undefined, other: Spread | undefined][]> {
+  const works = [...ones, ...others];
+  const times = works.map((): number[] => []);
   for (let turn = 0; turn < runs + WARM_UP; turn += 1) {
-    const pair = [await timeOf(one), await timeOf(other)] as const;
-    if (turn < WARM_UP) continue;
-    times[0].push(pair[0]);
-    times[1].push(pair[1]);
+    for (const [index, work] of works.entries()) {
+      const time = await timeOf(work);
+      if (turn >= WARM_UP) times[index]?.push(time);
+    }
   }
-  return times;
+  const spreads = times.map(spreadOf);
+  return ones.map((_, index) => [spreads[index], spreads[ones.length + index]]);
 }
 
-/** Processor time of `work`, collection of what it left included. @returns milliseconds of each run */
-export function cpuOf(work: () => unknown): number[] {
+/** Processor time in milliseconds of work that waits for nothing, the collection of what it left included. */
+export function cpuOf(work: () => unknown): Spread {
   const times: number[] = [];
+  collect();
   for (let run = 0; run < CPU_RUNS + WARM_UP; run += 1) {
     const before = process.cpuUsage();
     work();
     const { user, system } = process.cpuUsage(before);
     if (run >= WARM_UP) times.push((user + system) / 1000);
   }
-  return times;
+  return spreadOf(times);
 }
 
 /** Megabytes by which the heap grew in each run, and by which all runs together left it larger. */
-export async function heapOf(work: Work): Promise<{ grown: number[]; left: number }> {
+export async function heapOf(work: Work): Promise<{ grown: Spread; left: number }> {
   const grown: number[] = [];
   collect();
   const start = process.memoryUsage().heapUsed;
@@ -56,5 +67,5 @@ export async function heapOf(work: Work): Promise<{ grown: number[]; left: numbe
     grown.push((process.memoryUsage().heapUsed - before) / MEGABYTE);
   }
   collect();
-  return { grown, left: (process.memoryUsage().heapUsed - start) / MEGABYTE };
+  return { grown: spreadOf(grown), left: (process.memoryUsage().heapUsed - start) / MEGABYTE };
 }

@@ -2,13 +2,14 @@ import { describe, expect, test } from 'vitest';
 import type { Candidate } from '#shared/domain/schedule/candidate.ts';
 import { StudyContext, type StudyMoment } from '#shared/domain/schedule/context.ts';
 import { gainOf } from '#shared/domain/schedule/outlook.ts';
-import { tieredGain } from '#shared/domain/schedule/value.ts';
+import { outlookOf, tieredGain } from '#shared/domain/schedule/value.ts';
 import { aCandidate, aMemory, dayFromToday, MOMENT, TODAY } from '#tests/support/a-candidate.ts';
 
 /** The worth of the one question of a topic that carries one mark, so that w is the topic's weight. */
 const worthOf = (given: Partial<Candidate>, moment: Partial<StudyMoment> = {}) => {
   const candidate = aCandidate({ questionId: 'q', topicMarks: 1, ...given });
-  return tieredGain(candidate, new StudyContext([candidate], { ...MOMENT, ...moment }));
+  const context = new StudyContext([candidate], { ...MOMENT, ...moment });
+  return { ...tieredGain(candidate, context), outlook: outlookOf(candidate, context) };
 };
 
 // Tolerances as stated there.
