@@ -77,18 +77,19 @@ class Night {
 }
 
 /**
- * A school's nightly work: seconds of questions, recall against what was expected, and where that has drifted new
- * weights, the school's before the students' own, with the rebuilds they bring. Each step can be done again and finds
+ * A school's nightly work: recall against what was expected, and where that has drifted new weights, the school's before
+ * the students' own, with the rebuilds they bring; then how long questions take. Each step can be done again and finds
  * only what is left, so a run that ended half-way goes on at the next one, and two at once do no harm.
  * @throws the signal's reason once it is aborted
  */
 export async function runNightly(schoolId: string, options: NightlyOptions): Promise<NightlyReport> {
   const night = new Night(schoolId, options);
-  const versions = await night.inSchool(observeSeconds);
   const checked = await night.checkAll();
   const schoolFit = await night.fitSchool();
   const rebuiltForSchool = await night.rebuildAll();
   const studentFits = await night.fitStudents();
   const rebuilt = rebuiltForSchool + (await night.rebuildAll());
+  // Last: it reads the whole school at once, and nothing else waits for it.
+  const versions = await night.inSchool(observeSeconds);
   return { versions, checked, rebuilt, schoolFit, studentFits };
 }

@@ -1,7 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { describe, expect, test } from 'vitest';
 import { aMemory } from '#seeds/factories/answer.ts';
-import { aSitting } from '#seeds/factories/curriculum.ts';
+import { aClass, aSitting } from '#seeds/factories/curriculum.ts';
 import { aStudy, type Study } from '#seeds/factories/study.ts';
 import { execute, select, withSchool } from '#server/db/scope.ts';
 import { loadScope } from '#server/services/people/load-scope.ts';
@@ -62,6 +62,30 @@ describe('what is still to be examined', () => {
     const [mock] = await candidatesAt(study, new Date('2027-01-05T12:00:00Z'));
     const [summer] = await candidatesAt(study, new Date('2027-01-12T12:00:00Z'));
     expect([mock?.examOn, summer?.examOn]).toEqual(['2027-01-11', '2027-06-01']);
+  });
+});
+
+describe('what a topic weighs', () => {
+  const now = new Date('2027-05-01T12:00:00Z');
+  const weightsOf = async (study: Study) =>
+    (await candidatesAt(study, now)).map(({ topicMarks, topicWeight }) => ({ topicMarks, topicWeight }));
+
+  test('its marks among those of the subject’s papers, however many of its classes the student is in', async () => {
+    const study = await aStudy({ subjects: 1, topics: 2, questions: 1 });
+    await aClass(study.school, first(study), { students: [study.student] });
+    expect(await weightsOf(study)).toEqual([
+      { topicMarks: 10, topicWeight: 0.125 },
+      { topicMarks: 10, topicWeight: 0.125 },
+    ]);
+  });
+
+  test('the same as the other topics where the subject has no papers, or none that weighs a topic', async () => {
+    const study = await aStudy({ subjects: 2, topics: 4, questions: 1 });
+    await withSchool(study.school.id, async () => {
+      await execute('DELETE FROM topic_weights');
+      await execute('DELETE FROM papers WHERE id = $1', [first(study).paperId]);
+    });
+    expect(new Set((await weightsOf(study)).map(({ topicWeight }) => topicWeight))).toEqual(new Set([0.25]));
   });
 });
 

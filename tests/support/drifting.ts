@@ -1,5 +1,7 @@
+import { aStudent } from '#seeds/factories/people.ts';
 import { aQuestion } from '#seeds/factories/question.ts';
 import { aStudy, type Study } from '#seeds/factories/study.ts';
+import { execute, withSchool } from '#server/db/scope.ts';
 import { addDays } from '#shared/domain/time/calendar.ts';
 import { logAnswers, type MadeUpAnswer } from './log-answers.ts';
 
@@ -10,8 +12,23 @@ const START = '2027-01-04';
 /** The same answers each time: right in 45 of 100, whenever it was last right. The library's weights expect far more. */
 const isRecalled = (question: number, day: number): boolean => (question * 7919 + day * 104_729) % 100 < 45;
 
+/** With fewer students than ten a school has no weights of its own. */
+const CLASSMATES = 9;
+
+/** A student whose one repeat attempt turned out as expected. */
+async function checkedOnce({ school }: Study): Promise<void> {
+  const { id } = await aStudent(school);
+  await withSchool(school.id, () =>
+    execute(
+      `INSERT INTO student_models (school_id, user_id, attempts, observed, expected, checked_at)
+       VALUES ($1, $2, 1, 1, 1, now())`,
+      [school.id, id],
+    ),
+  );
+}
+
 /**
- * A school whose one student has answered so many questions so often, on every third day, and recalls less than the
+ * A school one of whose students has answered so many questions so often, on every third day, and recalls less than the
  * library's weights expect. No memory state is written.
  */
 export async function aDriftingStudy(questions = 24, days = 50): Promise<Study> {
@@ -35,5 +52,6 @@ export async function aDriftingStudy(questions = 24, days = 50): Promise<Study> 
     ),
   );
   await logAnswers(study.school, subject, topicId, answers.flat());
+  for (let n = 0; n < CLASSMATES; n++) await checkedOnce(study);
   return study;
 }

@@ -1,4 +1,5 @@
 import { select } from '#server/db/scope.ts';
+import { SMALLEST_GROUP } from '#server/services/statistics/version-figures.ts';
 import { driftOf, hasDrifted, type RecallCheck } from '#shared/domain/schedule/drift.ts';
 
 /** Whose weights: one student's, or with null the school's; and by how much recall fell short of what was expected. */
@@ -11,12 +12,15 @@ interface CheckRow extends RecallCheck {
   user_id: string;
 }
 
-/** The school's drift past the threshold, all students' newest attempts together; null where it holds. */
+/**
+ * The school's drift past the threshold, all students' newest attempts together; null where it holds, or where so few
+ * students have any that the school's weights would be one student's.
+ */
 export async function schoolToFit(): Promise<FitTask | null> {
   const [check] = await select<RecallCheck>(
     `SELECT coalesce(sum(attempts), 0)::int AS attempts, sum(observed * attempts) / sum(attempts) AS observed,
        sum(expected * attempts) / sum(attempts) AS expected
-     FROM student_models WHERE attempts > 0`,
+     FROM student_models WHERE attempts > 0 HAVING count(*) >= ${SMALLEST_GROUP}`,
   );
   return check && hasDrifted(check) ? { userId: null, drift: driftOf(check) ?? 0 } : null;
 }

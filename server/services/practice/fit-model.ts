@@ -25,14 +25,24 @@ const MOST_ATTEMPTS = 60_000;
 /** How a fit ended. `kept` means that the old weights did no worse. */
 export type FitOutcome = 'adopted' | 'kept' | 'too few attempts' | 'fitted lately';
 
-const practised = async (userId: string | null): Promise<string[]> => {
+/** Students to fit to, in an order that is another for each version: a large school's fits are not always of the same. */
+const practised = async (userId: string | null, version: number): Promise<string[]> => {
   const rows = await select<{ id: string }>(
     `SELECT u.id FROM users u WHERE ($1::uuid IS NULL OR u.id = $1)
-       AND EXISTS (SELECT FROM answers a WHERE a.user_id = u.id) ORDER BY u.id`,
-    [userId],
+       AND EXISTS (SELECT FROM answers a WHERE a.user_id = u.id) ORDER BY md5($2 || u.id::text), u.id`,
+    [userId, String(version)],
   );
   return rows.map((row) => row.id);
 };
+
+/** Answers that a fit would be made from. */
+async function countAnswers(userId: string | null): Promise<number> {
+  const [row] = await select<{ answers: number }>(
+    'SELECT count(*)::int AS answers FROM answers WHERE $1::uuid IS NULL OR user_id = $1',
+    [userId],
+  );
+  return Math.min(MOST_ATTEMPTS, row?.answers ?? 0);
+}
 
 /** The weights that a fit has to do better than: those now in force for the student, or for the school. */
 async function modelBefore(userId: string | null): Promise<MemoryModel> {
@@ -110,10 +120,10 @@ const saveFit = ({ schoolId, now }: SchoolScope, fit: Fit): Promise<object[]> =>
 type InSchool = <T>(work: (scope: SchoolScope) => Promise<T>) => Promise<T>;
 
 /** Logs are read student by student, each in a transaction of its own. */
-async function loadLogs(inSchool: InSchool, userId: string | null): Promise<QuestionLog[]> {
+async function loadLogs(inSchool: InSchool, userId: string | null, version: number): Promise<QuestionLog[]> {
   const logs: QuestionLog[] = [];
   let attempts = 0;
-  for (const id of await inSchool(() => practised(userId))) {
+  for (const id of await inSchool(() => practised(userId, version))) {
     if (attempts >= MOST_ATTEMPTS) break;
     const log = await inSchool(() => loadLog(id, null));
     logs.push(...eventsByQuestion(log));
@@ -134,16 +144,18 @@ export async function fitModel(
   { optimise, now }: { optimise: Optimise; now?: Date },
 ): Promise<FitOutcome> {
   const inSchool: InSchool = (work) => withSchool(schoolId, work, { now });
-  const logs = await loadLogs(inSchool, userId);
+  const earlier = await inSchool(() => earlierFit(userId));
+  const version = (earlier?.version ?? 0) + 1;
+  if (!(await inSchool(async (scope) => isTimeToFit(earlier, await countAnswers(userId), scope.now)))) {
+    return 'fitted lately';
+  }
+  const logs = await loadLogs(inSchool, userId, version);
   const data = fitData(logs);
   if (!data) return 'too few attempts';
-  const [earlier, at] = await inSchool(async (scope) => [await earlierFit(userId), scope.now]);
-  if (!isTimeToFit(earlier, data.attempts, at)) return 'fitted lately';
   const inForce = await inSchool(() => modelBefore(userId));
   const best = await bestFit(optimise, logs, data, inForce);
   const before = meanLoss((await judgeLogs(logs, inForce, data.judgedFrom)).newest);
   const after = meanLoss(best.judgement.newest);
-  const version = (earlier?.version ?? 0) + 1;
   const { weights } = best.model;
   await inSchool((scope) =>
     saveFit(scope, { userId, drift, version, weights, attempts: data.attempts, before, after }),

@@ -23,14 +23,14 @@ const weakestFirst = (a: MyTopicDto, b: MyTopicDto): number =>
 
 const isTakenElsewhere = ({ waitsIn }: LoadedCandidate): boolean => waitsIn !== null && waitsIn !== 'chosen';
 
-/** What today's standing would mean in one paper. */
-const forecastOf = (paper: MyPaper, topics: readonly MyTopic[], context: StudyContext) =>
+/** What today's standing would mean in one paper, on its own day or else on the season's last. */
+const forecastOf = (paper: MyPaper, topics: readonly MyTopic[], context: StudyContext, seasonEndsOn: string) =>
   forecastPaper({
     marks: paper.marks,
     topics: topics.flatMap(({ id, marks }) =>
       marks[paper.id] === undefined
         ? []
-        : [{ marks: marks[paper.id] ?? 0, mastery: context.masteries.get(id) ?? null }],
+        : [{ marks: marks[paper.id] ?? 0, mastery: context.masteryOn(id, paper.on ?? seasonEndsOn) }],
     ),
     recallElsewhere: context.recallInSubject(paper.subjectId),
     optimism: context.optimism,
@@ -66,7 +66,11 @@ export async function listMyTopics(scope: Scope): Promise<MyTopicListDto> {
     on: scope.today,
     items: items.sort(weakestFirst),
     papers: papers.map((paper) =>
-      presentForecast(paper, presentSubject(need(subjects, paper.subjectId)), forecastOf(paper, topics, context)),
+      presentForecast(
+        paper,
+        presentSubject(need(subjects, paper.subjectId)),
+        forecastOf(paper, topics, context, scope.school.seasonEndsOn),
+      ),
     ),
     openSet: await findOpenChosenSet(scope),
     isTooHopeful: context.optimism > 0,

@@ -91,9 +91,26 @@ const answeredToday = (row: Row): Candidate['answeredToday'] => {
   return { answers: row.answers_today, firstGrade, firstAt: row.first_at.getTime() };
 };
 
-/** A topic that no paper weighs still counts for a little, so that its questions are not left out for good. */
-const topicWeight = ({ topic_marks: marks, subject_marks: all }: Row): number =>
-  all > 0 ? Math.max(marks, 1) / all : 1;
+/**
+ * Each row's share of its subject's marks. A topic that no paper weighs still counts for a mark, so that it is not left
+ * out for good; in a subject where none is weighed, all topics count the same.
+ */
+function topicWeights(rows: readonly Row[]): (row: Row) => number {
+  const subjects = new Map<string, { topics: Set<string>; isWeighed: boolean }>();
+  for (const row of rows) {
+    let subject = subjects.get(row.subject_id);
+    if (!subject) {
+      subject = { topics: new Set(), isWeighed: false };
+      subjects.set(row.subject_id, subject);
+    }
+    subject.topics.add(row.topic_id);
+    subject.isWeighed ||= row.subject_marks > 0 && row.topic_marks > 0;
+  }
+  return ({ subject_id: id, topic_marks: marks, subject_marks: all }) => {
+    const subject = subjects.get(id);
+    return subject?.isWeighed ? Math.max(marks, 1) / all : 1 / (subject?.topics.size ?? 1);
+  };
+}
 
 /** All live questions the acting student is entered for, and the last day on which they are still worth practising. */
 export interface LoadedCandidates {
@@ -104,6 +121,7 @@ export interface LoadedCandidates {
 /** Every live question the acting student may be asked, as the scheduler takes them. */
 export async function loadCandidates({ actor, today, now, school }: Scope): Promise<LoadedCandidates> {
   const rows = await select<Row>(CANDIDATES, [actor.userId, today, now]);
+  const topicWeight = topicWeights(rows);
   const candidates = rows.map((row) => ({
     questionId: row.question_id,
     versionId: row.version_id,

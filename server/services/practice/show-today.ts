@@ -127,7 +127,7 @@ export async function showToday(scope: Scope): Promise<TodayDto> {
   const shownWeak = weakFor(weak, nextPapers).slice(0, WEAK_TOPICS);
   const topics = await loadTopics(shownWeak.map(({ topicId }) => topicId));
   const sayWhy = whyWords(study.candidates, subjects, sittings, weak);
-  const paperTitles = await loadPaperTitles(study.candidates.flatMap(({ paperId }) => paperId ?? []));
+  const paperTitles = await loadPaperTitles(new Set(study.candidates.flatMap(({ paperId }) => paperId ?? [])));
 
   const todaySet = (kind: TodayKind) => {
     const row = sets.find((set) => set.kind === kind);

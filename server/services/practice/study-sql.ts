@@ -5,7 +5,8 @@
  * - `entry`: classes they are in today, with the tier and option they are entered for.
  * - `paper`: papers of those entries; `next_on` and `last_on` are the next and the last sitting not yet started. A paper is over once its summer
  *   sitting has begun and no other is planned: a mock that has passed is not the end of it.
- * - `topic`: topics of those entries, with the day the class was taught it, the marks it carries in papers still to
+ * - `studied`: topics of those entries, each once, with the day the first of its classes was taught it.
+ * - `topic`: the same, with the day the class was taught it, the marks it carries in papers still to
  *   sit, the next of them, and the marks of all papers of its subject. A topic is over when all its papers are; one without papers never is.
  * - `choice`: what the teachers of those classes ask of a question: to come next, or to stay out of sets.
  * - `live`: live questions of those topics, each once, under the topic whose paper is next; none that a teacher keeps
@@ -21,7 +22,7 @@ export const STUDY = `
     FROM enrolments e JOIN classes c ON c.id = e.class_id
     WHERE e.user_id = $1 AND e.valid_from <= $2 AND (e.valid_to IS NULL OR e.valid_to >= $2)
   ), paper AS (
-    SELECT p.id, p.title, p.minutes, p.marks, entry.subject_id, sitting.next_on, sitting.last_on,
+    SELECT DISTINCT ON (p.id) p.id, p.title, p.minutes, p.marks, entry.subject_id, sitting.next_on, sitting.last_on,
       sitting.next_on IS NOT NULL OR sitting.has_ended IS NOT TRUE AS is_ahead
     FROM entry
     JOIN papers p ON p.specification_id = entry.specification_id
@@ -35,21 +36,27 @@ export const STUDY = `
       CROSS JOIN LATERAL (SELECT (s.sat_on + s.starts_at) AT TIME ZONE s.zone AS at) starts
       WHERE s.paper_id = p.id
     ) sitting
-  ), topic AS MATERIALIZED (
-    SELECT t.id, t.number, t.title, t.position, entry.subject_id, entry.tier, entry.option, taught.taught_on,
-      coalesce(sum(w.marks) FILTER (WHERE paper.is_ahead), 0)::int AS marks,
-      min(paper.next_on) AS exam_on,
-      (array_agg(paper.id ORDER BY paper.next_on, paper.id) FILTER (WHERE paper.next_on IS NOT NULL))[1] AS paper_id,
-      count(paper.id) = 0 OR bool_or(paper.is_ahead) AS is_ahead,
-      (SELECT coalesce(sum(p.marks), 0)::int FROM paper p WHERE p.subject_id = entry.subject_id) AS subject_marks
+    ORDER BY p.id
+  ), studied AS (
+    SELECT t.id, t.number, t.title, t.position, entry.subject_id, entry.tier, entry.option,
+      min(taught.taught_on) AS taught_on
     FROM entry
     JOIN topics t ON t.specification_id = entry.specification_id AND t.merged_into_id IS NULL
       AND (t.tier IS NULL OR t.tier = entry.tier) AND (t.option IS NULL OR t.option = entry.option)
     LEFT JOIN topic_teachings taught
       ON taught.class_id = entry.class_id AND taught.topic_id = t.id AND taught.taught_on <= $2
+    GROUP BY t.id, t.number, t.title, t.position, entry.subject_id, entry.tier, entry.option
+  ), topic AS MATERIALIZED (
+    SELECT t.id, t.number, t.title, t.position, t.subject_id, t.tier, t.option, t.taught_on,
+      coalesce(sum(w.marks) FILTER (WHERE paper.is_ahead), 0)::int AS marks,
+      min(paper.next_on) AS exam_on,
+      (array_agg(paper.id ORDER BY paper.next_on, paper.id) FILTER (WHERE paper.next_on IS NOT NULL))[1] AS paper_id,
+      count(paper.id) = 0 OR bool_or(paper.is_ahead) AS is_ahead,
+      (SELECT coalesce(sum(p.marks), 0)::int FROM paper p WHERE p.subject_id = t.subject_id) AS subject_marks
+    FROM studied t
     LEFT JOIN topic_weights w ON w.topic_id = t.id
     LEFT JOIN paper ON paper.id = w.paper_id
-    GROUP BY t.id, t.number, t.title, t.position, entry.subject_id, entry.tier, entry.option, taught.taught_on
+    GROUP BY t.id, t.number, t.title, t.position, t.subject_id, t.tier, t.option, t.taught_on
   ), choice AS MATERIALIZED (
     SELECT cq.question_id, bool_or(cq.choice = 'excluded') AS is_excluded,
       max(cq.chosen_at) FILTER (WHERE cq.choice = 'set') AS set_at
@@ -66,7 +73,7 @@ export const STUDY = `
       AND (v.tier IS NULL OR v.tier = topic.tier) AND (v.option IS NULL OR v.option = topic.option)
     LEFT JOIN choice ON choice.question_id = v.question_id
     WHERE qt.topic_id = ANY (ARRAY(SELECT id FROM topic)) AND choice.is_excluded IS NOT TRUE
-    ORDER BY v.question_id, topic.taught_on IS NULL, topic.exam_on, topic.id
+    ORDER BY v.question_id, topic.taught_on IS NULL, NOT topic.is_ahead, topic.exam_on, topic.id
   )`;
 
 /** The newest mark of an answer `a`, as `m`: marking again adds an event, and the newest counts. */

@@ -151,6 +151,17 @@ export class StudyContext {
     return this.#masteries;
   }
 
+  /** A topic's expected recall on the day of one of its papers, which need not be the next; null without questions. */
+  masteryOn(topicId: string, examOn: string): Mastery | null {
+    const topic = this.#topics.get(topicId);
+    if (!topic) return null;
+    return topicMastery(
+      topic.items.map((item) => ({ ...item, examOn })),
+      topic.tally,
+      this,
+    );
+  }
+
   /** The lowest third, by exam-day recall, of the topics taught and still to be examined. */
   get weakerTopicIds(): ReadonlySet<string> {
     if (this.#weaker) return this.#weaker;

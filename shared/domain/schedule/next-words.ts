@@ -15,7 +15,8 @@ export interface NextFacts {
 export function nextWords({ marks, maxMarks, howSure, returnsOn, paper }: NextFacts): string {
   const cause = causeWords(maxMarks - marks, maxMarks, howSure);
   if (returnsOn === null) {
-    return `${cause}${cause ? 'and this' : 'This'} was the last look before ${paper?.title ?? 'the exam'}.`;
+    const exam = paper ? `${paper.title} on ${longDayWords(paper.on)}` : 'the exam';
+    return `${cause}${cause ? 'and this' : 'This'} was the last look before ${exam}.`;
   }
   const back = `${cause}${cause ? 'so this' : 'This'} comes back about ${longDayWords(returnsOn)}.`;
   return paper ? `${back} ${paper.title} is on ${longDayWords(paper.on)}.` : back;

@@ -18,7 +18,7 @@ export function reasonFor({ candidate, tier, isOfChosenTopic }: Chosen, context:
   if (context.daysToLastChance(days) === 1 && !isAgainToday) return { kind: 'lastLook', paperId };
   if (isBarelyFormed(candidate) || isAgainToday) return { kind: lastWasBelowHalf ? 'missedLast' : 'notFirm' };
   if (memory === null) return { kind: 'firstLook', topicMarks: Math.round(topicMarks) };
-  if (days <= SOON_DAYS) return { kind: 'paperSoon', paperId, days };
+  if (days <= SOON_DAYS && paperId !== null) return { kind: 'paperSoon', paperId, days };
   if (context.weakerTopicIds.has(topicId)) return { kind: 'weakTopic' };
   const outlook = outlookOf(candidate, context);
   return {

@@ -16,7 +16,10 @@ export function DriftNote({ estimates }: { estimates: EstimatesDto }) {
         </p>
         <ul className="my-2 list-disc pl-5">
           <li>that student’s ranges reach further down, and “Probably” becomes “Perhaps”;</li>
-          <li>the model is fitted again at night, to that student’s own answers once there are 1,000;</li>
+          <li>
+            at night, where the server has the optimiser, the model is fitted again to that student’s own answers once
+            there are 1,000;
+          </li>
           <li>the same is done for the whole school where all students together drift as far.</li>
         </ul>
         <p>{driftingWords(estimates)}</p>

@@ -90,7 +90,7 @@ const plain = (id: string, label: string, prepare: Policy['prepare']): Policy =>
   isPlainStart: true,
 });
 
-/** What students and programs do instead. */
+/** What students do instead. */
 export const BASELINES: readonly Policy[] = [
   plain('random', 'random', random),
   plain('blocked', 'blocked by topic, cramming the nearest paper', blocked),

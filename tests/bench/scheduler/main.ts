@@ -47,7 +47,7 @@ async function bench(options: Options): Promise<number> {
   console.log(`\n${seconds()} on ${options.workers} threads, ${Math.round((user + system) / 1e6)} s of processor time`);
   if (options.json) await writeFile(options.json, `${JSON.stringify({ options, results, lines }, null, 1)}\n`);
   if (options.svg) await writeFile(options.svg, picture(results, options));
-  return lines.every(({ isPassed }) => isPassed) ? 0 : 1;
+  return lines.every(({ isPassed }) => isPassed !== false) ? 0 : 1;
 }
 
 /** What was asked for; ends with 2, saying why, where it cannot be. */

@@ -91,14 +91,17 @@ function sensitivity(results: Results, { hasSensitivity, types }: Options): stri
   ];
 }
 
+const outcomeWord = (isPassed: Line['isPassed']): string =>
+  isPassed === null ? 'not run' : isPassed ? 'pass   ' : 'FAIL   ';
+
 function verdict(lines: readonly Line[], { isQuick, isStandard }: Options): string[] {
   if (!isStandard) return ['These are not the settings that the acceptance lines are about.'];
-  const failed = lines.filter(({ isPassed }) => !isPassed).length;
+  const count = (outcome: Line['isPassed']): number => lines.filter(({ isPassed }) => isPassed === outcome).length;
   return [
     isQuick
       ? 'What TG must reach (a quick look: a line fails where it is missed by more than two standard errors)'
       : 'What TG must reach',
-    ...lines.map(({ text, figure: found, isPassed }) => `${isPassed ? 'pass' : 'FAIL'}  ${text.padEnd(66)} ${found}`),
-    `${lines.length - failed} passed, ${failed} failed`,
+    ...lines.map(({ text, figure: found, isPassed }) => `${outcomeWord(isPassed)}  ${text.padEnd(66)} ${found}`),
+    `${count(true)} passed, ${count(false)} failed, ${count(null)} not run`,
   ];
 }

@@ -19,7 +19,7 @@ export class Results {
     return this.#shares.get(`${rowId}/${type}/${policy}`);
   }
 
-  /** Everything, for other programs. */
+  /** Everything, for other tools. */
   toJSON(): Record<string, readonly number[]> {
     return Object.fromEntries(this.#shares);
   }

@@ -13,7 +13,7 @@ test.each([
   ],
   [{ ...facts, marks: 1, paper: null }, 'One mark was missed, so this comes back about Thursday 22 April.'],
   [{ ...facts, marks: 0, paper: null }, 'No marks this time, so this comes back about Thursday 22 April.'],
-  [{ ...facts, returnsOn: null }, 'This was the last look before Biology Paper 1.'],
+  [{ ...facts, returnsOn: null }, 'This was the last look before Biology Paper 1 on Tuesday 11 May.'],
   [
     { ...facts, marks: 0, returnsOn: null, paper: null },
     'No marks this time, and this was the last look before the exam.',
