@@ -50,18 +50,18 @@ function Axes() {
   );
 }
 
-/** The count stands on the far side of the dot from the diagonal, where no neighbour is. */
+/** The count stands above or below the dot, away from the diagonal: beside it, near neighbours would run together. */
 function Dot({ band, most, isFar }: { band: SeenBand; most: number; isFar: boolean }) {
   const [cx, cy, r] = [x(band.expected), y(band.observed), radius(band.attempts, most)];
-  const isLeft = band.difference > 0 && band.expected > 15;
+  const isAbove = band.difference > 0;
   const colour = isFar ? 'var(--gap)' : 'var(--ink)';
   return (
     <g fill={colour}>
       <circle cx={cx} cy={cy} r={r} />
       <text
-        x={isLeft ? cx - r - 4 : cx + r + 4}
-        y={cy + 4}
-        textAnchor={isLeft ? 'end' : 'start'}
+        x={cx}
+        y={isAbove ? cy - r - 4 : cy + r + 12}
+        textAnchor="middle"
         stroke="var(--ground)"
         strokeWidth="3"
         paintOrder="stroke"
