@@ -40,5 +40,7 @@ export const todaySchema = z.object({
   mixed: todaySetSchema,
   morning: todaySetSchema,
   weakTopics: z.array(weakTopicSchema).max(5),
+  /** True where the estimates have lately been too high for this student. */
+  isTooHopeful: z.boolean(),
 });
 export type TodayDto = z.output<typeof todaySchema>;

@@ -41,7 +41,11 @@ export function Component() {
         </div>
         <aside className="lg:border-l lg:border-rule lg:pl-8" aria-label="Papers and weak topics">
           <NextPapers papers={today.nextPapers} />
-          <WeakTopics topics={today.weakTopics} hasPapers={today.nextPapers.length > 0} />
+          <WeakTopics
+            topics={today.weakTopics}
+            hasPapers={today.nextPapers.length > 0}
+            isTooHopeful={today.isTooHopeful}
+          />
         </aside>
       </div>
     </div>

@@ -7,6 +7,7 @@ import { execute, select, withSchool } from '#server/db/scope.ts';
 import { loadScope } from '#server/services/people/load-scope.ts';
 import { loadCandidates } from '#server/services/practice/load-candidates.ts';
 import { verifyLog } from '#server/services/practice/verify-log.ts';
+import { myTopicListSchema } from '#shared/schemas/my-topics.ts';
 import { type SetDto, setSummarySchema } from '#shared/schemas/practice.ts';
 import { todaySchema } from '#shared/schemas/today.ts';
 import { signedInAs, testApp } from '#tests/support/app.ts';
@@ -233,4 +234,31 @@ test('Today shows one’s own time in the exam, and weak topics of the next pape
   const nextSubjects = new Set(today.nextPapers.map((paper) => paper.subject.id));
   expect(today.weakTopics.length).toBeGreaterThan(0);
   expect(today.weakTopics.filter((topic) => !nextSubjects.has(topic.subject.id))).toEqual([]);
+});
+
+test('a student whose estimates have lately been too high is told so on Today and on Topics, with ranges that reach further down', async () => {
+  const study = await aStudy({ subjects: 1, topics: 1, questions: 3 });
+  const agent = await signedInAs(app, study.student);
+  const read = async () => {
+    const today = todaySchema.parse((await agent.get('/api/today').expect(200)).body);
+    const topics = myTopicListSchema.parse((await agent.get('/api/my-topics').expect(200)).body);
+    return { told: [today.isTooHopeful, topics.isTooHopeful], low: topics.items[0]?.range?.low };
+  };
+  for (const { questionId } of await candidatesAt(study, new Date())) {
+    await aMemory(study.school, study.student, questionId, { stability: 90, lastOn: '2026-11-01' });
+  }
+  const before = await read();
+  await withSchool(study.school.id, () =>
+    execute(
+      `INSERT INTO student_models (school_id, user_id, attempts, observed, expected, checked_at)
+       VALUES ($1, $2, 200, 0.6, 0.75, now())`,
+      [study.school.id, study.student.id],
+    ),
+  );
+  const after = await read();
+  expect([before.told, after.told]).toEqual([
+    [false, false],
+    [true, true],
+  ]);
+  expect(after.low ?? 100).toBeLessThan(before.low ?? 0);
 });

@@ -146,5 +146,6 @@ export async function showToday(scope: Scope): Promise<TodayDto> {
       recall: recallPercent(onExamDay),
       standing,
     })),
+    isTooHopeful: context.optimism > 0,
   };
 }

@@ -20,10 +20,8 @@ export function reasonFor({ candidate, tier, isOfChosenTopic }: Chosen, context:
   if (memory === null) return { kind: 'firstLook', topicMarks: Math.round(topicMarks) };
   if (days <= SOON_DAYS && paperId !== null) return { kind: 'paperSoon', paperId, days };
   if (context.weakerTopicIds.has(topicId)) return { kind: 'weakTopic' };
-  const outlook = outlookOf(candidate, context);
-  return {
-    kind: 'gain',
-    withoutPercent: recallPercent(outlook.without),
-    withGoPercent: recallPercent(outlook.withGo),
-  };
+  const { without, withGo } = outlookOf(candidate, context);
+  // Less what the model has lately expected too much: what is said must not be what has just proved too hopeful.
+  const said = (recalled: number) => recallPercent(Math.max(0, recalled - context.optimism));
+  return { kind: 'gain', withoutPercent: said(without), withGoPercent: said(withGo) };
 }

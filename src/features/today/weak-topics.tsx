@@ -3,8 +3,14 @@ import type { TodayDto } from '#shared/schemas/today.ts';
 import { StrandLabel } from '#src/components/strand-label.tsx';
 import { Tally } from '#src/components/tally.tsx';
 
+interface WeakTopicsProps {
+  topics: TodayDto['weakTopics'];
+  hasPapers: boolean;
+  isTooHopeful: boolean;
+}
+
 /** The weakest topics of the papers that come first. */
-export function WeakTopics({ topics, hasPapers }: { topics: TodayDto['weakTopics']; hasPapers: boolean }) {
+export function WeakTopics({ topics, hasPapers, isTooHopeful }: WeakTopicsProps) {
   return (
     <section className="mt-9" aria-labelledby="weak">
       <h2 id="weak" className="!text-[1.25rem] pb-2 border-b border-ink">
@@ -31,7 +37,9 @@ export function WeakTopics({ topics, hasPapers }: { topics: TodayDto['weakTopics
             ))}
           </ul>
           <p className="hint mt-3">
-            Recall you could expect on the day, an estimate. One stroke is weak, two developing, three secure.
+            Recall you could expect on the day, an estimate
+            {isTooHopeful ? ' that has lately been too high for you' : ''}. One stroke is weak, two developing, three
+            secure.
           </p>
         </>
       )}

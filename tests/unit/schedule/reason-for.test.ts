@@ -88,6 +88,12 @@ describe('the first reason that holds (scheduling specification, section 4)', ()
     });
   });
 
+  test('less what the model has lately expected too much', () => {
+    expect(reasonOf({ memory: firm }, { optimism: 0.1 })).toMatchObject({
+      withoutPercent: Math.round(100 * (MOMENT.model.recall(50, 60) - 0.1)),
+    });
+  });
+
   test('the last planned study day is a last look, however far the paper', () => {
     expect(reasonOf({ memory: firm }, { lastStudyOn: TODAY })).toEqual({ kind: 'lastLook', paperId: 'paper' });
   });
