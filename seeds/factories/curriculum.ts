@@ -35,6 +35,13 @@ export async function aSubject(
   });
 }
 
+/** One more specification of the subject. */
+export const aSpecification = (
+  school: FactorySchool,
+  subject: FactorySubject,
+  name = 'Combined',
+): Promise<{ id: string }> => withSchool(school.id, () => Specification.create({ subjectId: subject.id, name }));
+
 /** A topic of the subject's specification, worth marks in its paper. */
 export async function aTopic(
   school: FactorySchool,

@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type TestAgent from 'supertest/lib/agent.js';
 import { describe, expect, test } from 'vitest';
 import { anAnswerGiven } from '#seeds/factories/answer.ts';
-import { aClass, aSubject, aTopic } from '#seeds/factories/curriculum.ts';
+import { aClass, aSpecification, aSubject, aTopic } from '#seeds/factories/curriculum.ts';
 import { aHeadOfDepartment, aStudent, aTeacher } from '#seeds/factories/people.ts';
 import { aQuestion } from '#seeds/factories/question.ts';
 import { aStudy } from '#seeds/factories/study.ts';
@@ -215,15 +215,7 @@ describe('a question cannot be set', () => {
   test('for a class whose specification has none of its topics', async () => {
     const room = await aClassroom();
     const { school, subject } = room;
-    const specificationId = randomUUID();
-    await withSchool(school.id, () =>
-      execute('INSERT INTO specifications (school_id, id, subject_id, name) VALUES ($1, $2, $3, $4)', [
-        school.id,
-        specificationId,
-        subject.id,
-        'Combined',
-      ]),
-    );
+    const { id: specificationId } = await aSpecification(school, subject);
     const topic = await aTopic(school, { ...subject, specificationId });
     const { id } = await room.ask({ topicId: topic.id });
     const { errors } = await refused(room, id, { choice: 'set' });

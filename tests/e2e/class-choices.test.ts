@@ -1,9 +1,8 @@
-import { randomUUID } from 'node:crypto';
 import { expect, test } from 'vitest';
-import { aClass } from '#seeds/factories/curriculum.ts';
+import { aClass, aSpecification } from '#seeds/factories/curriculum.ts';
 import { aHeadOfDepartment, aStudent } from '#seeds/factories/people.ts';
 import { aQuestion } from '#seeds/factories/question.ts';
-import { execute, select, withSchool } from '#server/db/scope.ts';
+import { select, withSchool } from '#server/db/scope.ts';
 import { SchoolClass } from '#server/models/school-class.ts';
 import { withChromium } from '#tests/support/chromium.ts';
 import { aDepartment, button, heading, toast, type WritingDepartment } from '#tests/support/editor-page.ts';
@@ -17,15 +16,7 @@ const chosenIn = ({ school }: WritingDepartment) =>
 
 /** A class of the subject that takes a specification of its own. */
 async function aClassElsewhere({ school, subject, author }: WritingDepartment): Promise<string> {
-  const specificationId = randomUUID();
-  await withSchool(school.id, () =>
-    execute('INSERT INTO specifications (school_id, id, subject_id, name) VALUES ($1, $2, $3, $4)', [
-      school.id,
-      specificationId,
-      subject.id,
-      'Combined',
-    ]),
-  );
+  const { id: specificationId } = await aSpecification(school, subject);
   const { id, name } = await aClass(school, subject, { teachers: [author] });
   await withSchool(school.id, () => SchoolClass.update({ specificationId }, { where: { id } }));
   return name;

@@ -2,7 +2,6 @@ import { type ChildProcess, spawn } from 'node:child_process';
 import { once } from 'node:events';
 import { mkdirSync, mkdtempSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { setTimeout as sleep } from 'node:timers/promises';
 import { migrate } from '#server/db/migrator.ts';
 import { pinBuild } from '#server/launch/build.mjs';
 import { plaitDir } from '#server/launch/paths.mjs';
@@ -10,6 +9,7 @@ import { freePort } from '#server/launch/ports.mjs';
 import { startThrowAwayCluster, type ThrowAwayCluster } from '#server/launch/postgres.mjs';
 import { ensureDatabase, ensureRoles } from '#server/launch/roles.mjs';
 import { databaseUrl, rolePasswords } from './database-urls.ts';
+import { waitUntilReady } from './wait-until-ready.ts';
 
 const DATABASE = 'plait_running';
 const READY_MS = 30_000;
@@ -27,20 +27,6 @@ export interface AppProcess {
   isRunning: () => boolean;
   /** Ends everything and removes what was made. */
   stop: () => Promise<void>;
-}
-
-async function waitUntilReady(origin: string, child: ChildProcess): Promise<void> {
-  const deadline = performance.now() + READY_MS;
-  while (performance.now() < deadline) {
-    if (child.exitCode !== null) throw new Error(`the server ended with code ${child.exitCode}`);
-    const isReady = await fetch(`${origin}/ready`).then(
-      (response) => response.ok,
-      () => false,
-    );
-    if (isReady) return;
-    await sleep(50);
-  }
-  throw new Error('the server was not ready in time');
 }
 
 /** Makes the cluster, the tables and the server. `settings` reach the server's environment. */
@@ -73,7 +59,7 @@ export async function startAppProcess(settings: NodeJS.ProcessEnv = {}): Promise
       },
       stdio: ['ignore', 'inherit', 'inherit'],
     });
-    await waitUntilReady(origin, child);
+    await waitUntilReady(origin, child, READY_MS);
   };
   const kill = async () => {
     if (!child || child.exitCode !== null || child.signalCode !== null) return;

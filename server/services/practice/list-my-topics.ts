@@ -12,7 +12,6 @@ import { groupBy } from './group-by.ts';
 import type { LoadedCandidate } from './load-candidates.ts';
 import { loadMyPapers, loadMyTopics, type MyPaper, type MyTopic } from './load-my-topics.ts';
 import { loadStudy } from './load-study.ts';
-import { loadNextPapers } from './next-papers.ts';
 import { loadSubjects, need } from './study-facts.ts';
 
 // Weak, then developing, secure, and last what cannot be said.
@@ -22,6 +21,12 @@ const weakestFirst = (a: MyTopicDto, b: MyTopicDto): number =>
   ORDER[a.standing] - ORDER[b.standing] || (a.recallOnDay ?? 100) - (b.recallOnDay ?? 100);
 
 const isTakenElsewhere = ({ waitsIn }: LoadedCandidate): boolean => waitsIn !== null && waitsIn !== 'chosen';
+
+/** The first dated paper that examines a topic. @param papers soonest first, those without a sitting last */
+function nextPaper({ marks }: MyTopic, papers: readonly MyPaper[]): { title: string; on: string } | null {
+  const paper = papers.find(({ id }) => marks[id] !== undefined);
+  return paper?.on ? { title: paper.title, on: paper.on } : null;
+}
 
 /** What today's standing would mean in one paper, on its own day or else on the season's last. */
 const forecastOf = (paper: MyPaper, topics: readonly MyTopic[], context: StudyContext, seasonEndsOn: string) =>
@@ -43,10 +48,6 @@ export async function listMyTopics(scope: Scope): Promise<MyTopicListDto> {
   const topics = await loadMyTopics(scope);
   const papers = await loadMyPapers(scope);
   const subjects = await loadSubjects();
-  const nextPapers = await loadNextPapers(
-    scope,
-    topics.map((topic) => topic.id),
-  );
   const context = new StudyContext(candidates, moment);
   const byTopic = groupBy(candidates, ({ topicId }) => topicId);
   const items = topics.map((topic) => {
@@ -58,7 +59,7 @@ export async function listMyTopics(scope: Scope): Promise<MyTopicListDto> {
       memories: own.flatMap(({ memory }) => memory ?? []),
       isAhead: own.some(({ examOn }) => examOn !== null),
       canPractise: own.some((candidate) => !isTakenElsewhere(candidate) && canBeAsked(candidate, context)),
-      paper: nextPapers.get(topic.id) ?? null,
+      paper: nextPaper(topic, papers),
       today: scope.today,
     });
   });

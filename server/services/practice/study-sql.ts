@@ -3,11 +3,12 @@
  * $1 is the student, $2 the school's day, $3 the instant.
  *
  * - `entry`: classes they are in today, with the tier and option they are entered for.
- * - `paper`: papers of those entries; `next_on` and `last_on` are the next and the last sitting not yet started. A paper is over once its summer
- *   sitting has begun and no other is planned: a mock that has passed is not the end of it.
+ * - `paper`: papers of those entries, each once; `next_on` and `last_on` are the next and the last sitting not yet
+ *   started. A paper is over once its summer sitting has begun and no other is planned: a mock that has passed is not
+ *   the end of it.
  * - `studied`: topics of those entries, each once, with the day the first of its classes was taught it.
- * - `topic`: the same, with the day the class was taught it, the marks it carries in papers still to
- *   sit, the next of them, and the marks of all papers of its subject. A topic is over when all its papers are; one without papers never is.
+ * - `topic`: the same with the marks it carries in papers still to sit, the next of them, and the marks of all papers of
+ *   its subject. A topic is over when all its papers are; one without papers never is.
  * - `choice`: what the teachers of those classes ask of a question: to come next, or to stay out of sets.
  * - `live`: live questions of those topics, each once, under the topic whose paper is next; none that a teacher keeps
  *   out of sets.

@@ -4,6 +4,7 @@ import type { Grade } from '#shared/domain/schedule/grade.ts';
 import { DEFAULT_MODEL } from '#shared/domain/schedule/memory.ts';
 import { contextFor, type Selection, selectSet } from '#shared/domain/schedule/select.ts';
 import { addDays } from '#shared/domain/time/calendar.ts';
+import { aCandidate } from '#tests/support/a-candidate.ts';
 import type { Learner } from './learner.ts';
 import { luckOf, seenAs, trueGrade } from './luck.ts';
 import type { Policy } from './policy.ts';
@@ -117,22 +118,17 @@ export class Season {
   }
 }
 
-const candidateOf = (item: World['items'][number]): Candidate => ({
-  questionId: item.id,
-  topicId: item.topicId,
-  subjectId: item.subjectId,
-  memory: null,
-  firstGrade: null,
-  lastWasBelowHalf: false,
-  answeredToday: null,
-  isTaken: false,
-  isSet: false,
-  marks: 1,
-  expectedSeconds: item.seconds,
-  topicWeight: item.topicWeight,
-  // No more than its questions carry, so that they share out the whole of its weight: section 1.
-  topicMarks: 1,
-  examOn: dateOf(item.paperDay),
-  paperId: item.paperId,
-  taughtOn: dateOf(item.taughtDay),
-});
+/** A question never attempted, of one mark. */
+const candidateOf = (item: World['items'][number]): Candidate =>
+  aCandidate({
+    questionId: item.id,
+    topicId: item.topicId,
+    subjectId: item.subjectId,
+    expectedSeconds: item.seconds,
+    topicWeight: item.topicWeight,
+    // No more than its questions carry, so that they share out the whole of its weight: section 1.
+    topicMarks: 1,
+    examOn: dateOf(item.paperDay),
+    paperId: item.paperId,
+    taughtOn: dateOf(item.taughtDay),
+  });

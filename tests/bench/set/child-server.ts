@@ -1,8 +1,8 @@
-import { type ChildProcess, fork } from 'node:child_process';
+import { fork } from 'node:child_process';
 import { once } from 'node:events';
-import { setTimeout as sleep } from 'node:timers/promises';
 import { fileURLToPath } from 'node:url';
 import { freePort } from '#server/launch/ports.mjs';
+import { waitUntilReady } from '#tests/support/wait-until-ready.ts';
 import type { Probe } from './probe.ts';
 
 const READY_MS = 60_000;
@@ -13,20 +13,6 @@ export interface ChildServer {
   /** What the process says of itself since the last time it was asked. */
   probe: () => Promise<Probe>;
   stop: () => Promise<void>;
-}
-
-async function waitUntilReady(origin: string, child: ChildProcess): Promise<void> {
-  const deadline = performance.now() + READY_MS;
-  while (performance.now() < deadline) {
-    if (child.exitCode !== null) throw new Error(`the server ended with code ${child.exitCode}`);
-    const isReady = await fetch(`${origin}/ready`).then(
-      (response) => response.ok,
-      () => false,
-    );
-    if (isReady) return;
-    await sleep(50);
-  }
-  throw new Error('the server was not ready in time');
 }
 
 /** Starts one of this folder's servers. `settings` reach its environment beside PORT and PUBLIC_ORIGIN. */
@@ -43,7 +29,7 @@ export async function startChildServer(file: string, settings: NodeJS.ProcessEnv
     await ended;
   };
   try {
-    await waitUntilReady(origin, child);
+    await waitUntilReady(origin, child, READY_MS);
   } catch (error) {
     await stop();
     throw error;
